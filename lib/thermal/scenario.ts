@@ -9,14 +9,7 @@ export type FlightPhase = 'doors-shut-departure' | 'airborne' | 'doors-shut-arri
 export type Face = 'front' | 'back' | 'left' | 'right' | 'top'
 export type Activity = 'asleep' | 'resting' | 'alert' | 'distressed'
 export type AnimalFlag =
-  | 'snub-nosed'
-  | 'elderly'
-  | 'juvenile'
-  | 'pregnant'
-  | 'sedated'
-  | 'obese'
-  | 'unacclimated'
-  | 'ill'
+  'snub-nosed' | 'elderly' | 'juvenile' | 'pregnant' | 'sedated' | 'obese' | 'unacclimated' | 'ill'
 
 /** The same animal run three ways (typical, prone to heat, prone to cold). A run gives all animals one variant. */
 export type Variant = 'typical' | 'heat-prone' | 'cold-prone'
@@ -293,13 +286,7 @@ export interface InitialState {
 }
 
 /** Which metabolic line a profile scales: see lib/thermal/metabolism.ts for equation and source of each. */
-export type MetabolicLine =
-  | 'kleiber'
-  | 'bird'
-  | 'farm-horse'
-  | 'chick'
-  | 'squamate'
-  | 'boid'
+export type MetabolicLine = 'kleiber' | 'bird' | 'farm-horse' | 'chick' | 'squamate' | 'boid'
 
 /** Limits of product safety (thermal-model.md A11b): a row without them cannot be assessed. */
 export interface CoreLimits {
@@ -335,7 +322,12 @@ export interface ProfileValues {
     | { model: 'coat'; tissueMinWm2K: number; tissueMaxWm2K: number; bareShare: number }
     | { model: 'ectotherm'; wholeBodyWm2K: number }
   coat: { depthMm: number; conductivityWmK: number; windPenalty: number }
-  respiration: { oxygenExtraction: number; pantingMultiple: number; pantingCost: number; exhaled: 'mammal' | 'small' }
+  respiration: {
+    oxygenExtraction: number
+    pantingMultiple: number
+    pantingCost: number
+    exhaled: 'mammal' | 'small'
+  }
   skin: { wettednessBase: number; wettednessMax: number; sweatCapGm2h?: number }
   bands: ControlBands
   /** Neonate factor on the room between rest and maximum thermogenesis: see C2. Absent: adult. */
