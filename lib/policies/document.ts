@@ -1,0 +1,26 @@
+import type { Actor } from './actor'
+import type { ConsignmentFacts } from './consignment'
+import type { Line } from './table'
+
+export const DOCUMENT_KINDS = ['sheet', 'manifest', 'checklist', 'handover', 'label'] as const
+export type DocumentKind = (typeof DOCUMENT_KINDS)[number]
+
+/** A stored document and the consignment it belongs to. */
+export interface DocumentFacts extends ConsignmentFacts {
+  kind: DocumentKind
+}
+
+const FOR_DRIVERS: readonly DocumentKind[] = ['manifest', 'checklist', 'handover', 'label']
+const FOR_SHIPPERS: readonly DocumentKind[] = ['manifest', 'sheet']
+
+export const documentPolicy = {
+  'document.read': {
+    dispatcher: true,
+    vet: true,
+    admin: true,
+    driver: (actor: Actor, facts: DocumentFacts) =>
+      facts.driverIds.includes(actor.id) && FOR_DRIVERS.includes(facts.kind),
+    shipper: (actor: Actor, facts: DocumentFacts) =>
+      actor.shipperId !== null && actor.shipperId === facts.shipperId && FOR_SHIPPERS.includes(facts.kind),
+  } satisfies Line<DocumentFacts>,
+}
