@@ -1,0 +1,48 @@
+import type { Migration } from '@/lib/db/migrate'
+
+export const up: Migration = ({ context }) =>
+  context.sequelize.query(`CREATE TABLE legs (
+  id BIGINT UNSIGNED NOT NULL AUTO_INCREMENT PRIMARY KEY,
+  consignment_id BIGINT UNSIGNED NOT NULL,
+  ref VARCHAR(24) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  position SMALLINT UNSIGNED NOT NULL,
+  kind ENUM('road','shed','ramp','flight','sea','rail','border','rest') NOT NULL,
+  flight_phase ENUM('doors-shut-departure','airborne','doors-shut-arrival') NULL,
+  from_place_id BIGINT UNSIGNED NULL,
+  to_place_id BIGINT UNSIGNED NULL,
+  start_local VARCHAR(16) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  start_zone VARCHAR(40) CHARACTER SET ascii COLLATE ascii_bin NULL,
+  start_offset_min SMALLINT NULL,
+  starts_at DATETIME(3) NULL,
+  end_local VARCHAR(16) CHARACTER SET ascii COLLATE ascii_bin NOT NULL,
+  end_zone VARCHAR(40) CHARACTER SET ascii COLLATE ascii_bin NULL,
+  end_offset_min SMALLINT NULL,
+  ends_at DATETIME(3) NULL,
+  carrier VARCHAR(80) NOT NULL,
+  service_number VARCHAR(40) NOT NULL,
+  surroundings JSON NOT NULL,
+  pressure_kpa DOUBLE NOT NULL,
+  out_of_crate BOOLEAN NOT NULL,
+  party_in_charge VARCHAR(120) NOT NULL,
+  party_telephone VARCHAR(40) NOT NULL,
+  party_hours VARCHAR(60) NOT NULL,
+  attended BOOLEAN NOT NULL,
+  driver_id BIGINT UNSIGNED NULL,
+  delay_typical_min DOUBLE NOT NULL,
+  delay_worst_min DOUBLE NOT NULL,
+  stops JSON NOT NULL,
+  last_point_of_return VARCHAR(120) NOT NULL,
+  fallback VARCHAR(160) NOT NULL,
+  note VARCHAR(500) NOT NULL,
+  air_entered_at DATETIME(3) NULL,
+  air_entered_by BIGINT UNSIGNED NULL,
+  UNIQUE KEY legs_ref (consignment_id, ref),
+  KEY legs_driver (driver_id, starts_at),
+  CONSTRAINT legs_consignment FOREIGN KEY (consignment_id) REFERENCES consignments (id) ON DELETE CASCADE,
+  CONSTRAINT legs_from_place FOREIGN KEY (from_place_id) REFERENCES places (id),
+  CONSTRAINT legs_to_place FOREIGN KEY (to_place_id) REFERENCES places (id),
+  CONSTRAINT legs_driver FOREIGN KEY (driver_id) REFERENCES users (id),
+  CONSTRAINT legs_air_entered_by FOREIGN KEY (air_entered_by) REFERENCES users (id)
+)`)
+
+export const down: Migration = ({ context }) => context.sequelize.query('DROP TABLE legs')
