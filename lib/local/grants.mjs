@@ -30,6 +30,10 @@ export const GRANTS = {
   findings: APPEND,
   approvals: [...APPEND, ...only('voided_at', 'voided_reason', 'withdrawn')],
   overrides: APPEND,
+  conditions: [
+    ...APPEND,
+    ...only('answer', 'answered_by', 'answered_how', 'answered_at', 'answer_note', 'recorded_by', 'kept'),
+  ],
   documents: [...APPEND, ...only('state', 'state_changed_at', 'voided_reason')],
   acknowledgements: APPEND,
   change_requests: APPEND,
