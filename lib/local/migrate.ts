@@ -15,12 +15,12 @@ const sequelize = createDatabase(() => ({
 
 const [direction = 'up', flag, target] = process.argv.slice(2)
 const umzug = migrator(sequelize)
-const to =
-  flag === '--to' && target !== undefined ? { to: target === '0' ? (0 as const) : target } : undefined
+const to = flag === '--to' ? target : undefined
 
 try {
-  if (direction === 'up') report('applied', await umzug.up(to?.to === 0 ? undefined : to))
-  else if (direction === 'down') report('taken back', await umzug.down(to))
+  if (direction === 'up') report('applied', await umzug.up(to === undefined ? undefined : { to }))
+  else if (direction === 'down')
+    report('taken back', await umzug.down(to === undefined ? undefined : { to: to === '0' ? 0 : to }))
   else if (direction === 'pending') report('pending', await umzug.pending())
   else throw new Error(`Unknown direction “${direction}”: put up, down or pending.`)
 } catch (error) {
