@@ -246,7 +246,9 @@ export interface Animal {
   activityDecayMin: number
   posture?: 'curled' | 'lying' | 'standing'
   hoursSinceFed?: number
+  /** Minutes from departure at which water, and food, are offered; read by the rules. */
   waterOfferedMin?: number[]
+  foodOfferedMin?: number[]
   acclimatedToC?: number
   flags: AnimalFlag[]
 }
@@ -288,7 +290,7 @@ export interface InitialState {
 /** Which metabolic line a profile scales: see lib/thermal/metabolism.ts for equation and source of each. */
 export type MetabolicLine = 'kleiber' | 'bird' | 'farm-horse' | 'chick' | 'squamate' | 'boid'
 
-/** Limits of product safety (thermal-model.md A11b): a row without them cannot be assessed. */
+/** Limits of product safety, well inside anything fatal on record: a row without them cannot be assessed. */
 export interface CoreLimits {
   criticalLowC: number
   alarmLowC: number
@@ -330,8 +332,18 @@ export interface ProfileValues {
   }
   skin: { wettednessBase: number; wettednessMax: number; sweatCapGm2h?: number }
   bands: ControlBands
-  /** Neonate factor on the room between rest and maximum thermogenesis: see C2. Absent: adult. */
+  /** Share of the body's heat capacity in the shell. */
   shellShare: number
+  /** How it rests in a crate unless the plan says otherwise. Default: lying. */
+  posture?: 'curled' | 'lying' | 'standing'
+  /** J/kgK; default 3470. */
+  specificHeatJkgK?: number
+  /** Young are born unable to make much extra heat: ageDays then limits thermogenesis. */
+  altricial?: boolean
+  /** What the flag "snub-nosed" leaves of the extra breath, on rows without a snub-nosed row of their own. */
+  snubNosedFactor?: number
+  /** Share of sun the coat takes up. Default 0.7. */
+  solarAbsorptance?: number
 }
 
 /** Start and end, K of core error, of each effector's smooth band. */

@@ -94,6 +94,18 @@ export const animalSchema = z.strictObject({
     )
     .optional()
     .describe('Minutes at which water is offered. Absent: unknown; rules on water answer unknown.'),
+  foodOfferedMin: z
+    .array(
+      figure({
+        what: 'Food offered',
+        unit: 'min',
+        min: 0,
+        max: 100_000,
+        more: 'From departure; before it, hoursSinceFed says',
+      }),
+    )
+    .optional()
+    .describe('Minutes at which food is offered on the way. Absent: none is.'),
   acclimatedToC: optionalFigure({ what: 'Acclimated down to', unit: '°C', min: -60, max: 40 }, 'unknown'),
   flags: z
     .array(word('Flag', FLAGS))
