@@ -1,0 +1,18 @@
+import type { DemoConsignment } from './common'
+import { glasgowMuscat } from './glasgow-muscat'
+import { glasgowValletta } from './glasgow-valletta'
+import { lauderKelso } from './lauder-kelso'
+import { peeblesUtrecht } from './peebles-utrecht'
+import { princetonSedona } from './princeton-sedona'
+import { balfronPeebles, obanCarlisle, peeblesBalfron } from './short-runs'
+
+export const DEMO_CONSIGNMENTS: readonly DemoConsignment[] = [
+  lauderKelso,
+  peeblesUtrecht,
+  glasgowMuscat,
+  glasgowValletta,
+  princetonSedona,
+  balfronPeebles,
+  peeblesBalfron,
+  obanCarlisle,
+]
