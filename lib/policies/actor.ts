@@ -9,6 +9,8 @@ export interface Actor {
   role: Role
   /** Only a shipper's user has one: the firm this person speaks for. */
   shipperId: number | null
+  /** Where the request came from, for the audit trail alone: no policy reads it. */
+  ip?: string | null
 }
 
 export const ROLE_WORDS: Record<Role, string> = {

@@ -2,7 +2,7 @@ import type { Actor } from './actor'
 import type { ConsignmentFacts } from './consignment'
 import type { Line } from './table'
 
-export const DOCUMENT_KINDS = ['sheet', 'manifest', 'checklist', 'handover', 'label'] as const
+export const DOCUMENT_KINDS = ['go_no_go', 'manifest'] as const
 export type DocumentKind = (typeof DOCUMENT_KINDS)[number]
 
 /** A stored document and the consignment it belongs to. */
@@ -10,8 +10,8 @@ export interface DocumentFacts extends ConsignmentFacts {
   kind: DocumentKind
 }
 
-const FOR_DRIVERS: readonly DocumentKind[] = ['manifest', 'checklist', 'handover', 'label']
-const FOR_SHIPPERS: readonly DocumentKind[] = ['manifest', 'sheet']
+const FOR_DRIVERS: readonly DocumentKind[] = ['manifest']
+const FOR_SHIPPERS: readonly DocumentKind[] = ['manifest', 'go_no_go']
 
 export const documentPolicy = {
   'document.read': {
