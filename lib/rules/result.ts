@@ -39,6 +39,11 @@ export interface Finding {
   sourceTag: 'seen' | 'second-hand' | 'memory' | 'judgement'
   /** Never true for critical, law and carrier findings. */
   overridable: boolean
+  /** Why a vet may not override a finding whose kind could be: the journey 3 °C warmer (colder) passes critical. */
+  overrideRefusedBecause?: string
+  /** Breach of a body limit: minutes of the leg past it and the body temperature farthest out, worst schedule. An override holds no further than these. */
+  minutesPast?: number
+  worstBodyC?: number
 }
 
 export interface LegVerdict {

@@ -13,18 +13,36 @@ export const FACES = ['front', 'back', 'left', 'right', 'top'] as const
 export const LEG_KINDS = ['road', 'shed', 'ramp', 'flight', 'sea', 'rail', 'border', 'rest'] as const
 export const FLIGHT_PHASES = ['doors-shut-departure', 'airborne', 'doors-shut-arrival'] as const
 export const WALL_MATERIALS = ['plywood', 'plastic', 'fibreboard', 'metal-mesh', 'insulated-foam'] as const
-export const BEDDING_MATERIALS = ['none', 'newspaper', 'wood-shavings', 'straw', 'absorbent-pad', 'foam'] as const
-export const ANIMAL_FLAGS = ['snub-nosed', 'elderly', 'juvenile', 'pregnant', 'sedated', 'obese', 'unacclimated', 'ill'] as const
+export const BEDDING_MATERIALS = [
+  'none',
+  'newspaper',
+  'wood-shavings',
+  'straw',
+  'absorbent-pad',
+  'foam',
+] as const
+export const ANIMAL_FLAGS = [
+  'snub-nosed',
+  'elderly',
+  'juvenile',
+  'pregnant',
+  'sedated',
+  'obese',
+  'unacclimated',
+  'ill',
+] as const
 export const PURPOSES = ['commercial', 'research', 'exhibition', 'private'] as const
 
 export const telephone = (label: string) =>
   text(label, 40).refine((value) => value === '' || /^\+?[0-9 ()-]{6,}$/.test(value), {
-    error: (issue) => `${label} “${String(issue.input)}”: put digits with the country code, for example +44 7700 900100.`,
+    error: (issue) =>
+      `${label} “${String(issue.input)}”: put digits with the country code, for example +44 7700 900100.`,
   })
 
 export const localTime = (label: string) =>
   z.string().refine((value) => value === '' || /^\d{4}-\d{2}-\d{2}T\d{2}:\d{2}$/.test(value), {
-    error: (issue) => `${label} “${String(issue.input)}”: put a date and a time, for example 2026-06-09 09:20.`,
+    error: (issue) =>
+      `${label} “${String(issue.input)}”: put a date and a time, for example 2026-06-09 09:20.`,
   })
 
 const partySchema = z.object({
@@ -52,13 +70,18 @@ export const animalSchema = z.object({
   ageDays: draftQuantity({ label: 'Age', unit: 'days', min: 0, max: 40_000 }),
   massKg: draftQuantity({ label: 'Mass', unit: 'kg', min: 0.005, max: 1_500 }),
   /** Identical animals in one box, day-old chicks for example, are one entry. */
-  count: quantity({ label: 'How many', unit: 'animals', min: 1, max: 500 }).refine(Number.isInteger, 'How many: put a whole number.'),
+  count: quantity({ label: 'How many', unit: 'animals', min: 1, max: 500 }).refine(
+    Number.isInteger,
+    'How many: put a whole number.',
+  ),
   temperament: z.enum(['calm', 'anxious', 'unknown']),
   crateTrained: z.boolean(),
   coat: coatSchema,
   flags: z.array(z.enum(ANIMAL_FLAGS)),
   medicines: text('Medicines', 300),
-  examinedOn: z.string().refine((value) => value === '' || /^\d{4}-\d{2}-\d{2}$/.test(value), 'Date examined: put a date.'),
+  examinedOn: z
+    .string()
+    .refine((value) => value === '' || /^\d{4}-\d{2}-\d{2}$/.test(value), 'Date examined: put a date.'),
   examinedBy: text('Examined by', 120),
   lastFedLocal: localTime('Last fed'),
   lastWateredLocal: localTime('Last watered'),
@@ -70,7 +93,10 @@ export const openingSchema = z.object({
   kind: z.enum(['door', 'slats', 'slots', 'holes', 'window']),
   widthCm: quantity({ label: 'Opening width', unit: 'cm', min: 0.2, max: 400 }),
   heightCm: quantity({ label: 'Opening height', unit: 'cm', min: 0.2, max: 400 }),
-  howMany: quantity({ label: 'How many openings', unit: '', min: 1, max: 200 }).refine(Number.isInteger, 'How many openings: put a whole number.'),
+  howMany: quantity({ label: 'How many openings', unit: '', min: 1, max: 200 }).refine(
+    Number.isInteger,
+    'How many openings: put a whole number.',
+  ),
   sillHeightCm: draftQuantity({ label: 'Sill above floor', unit: 'cm', min: 0, max: 300 }),
   meshOpenPct: quantity({ label: 'Mesh open', unit: '%', min: 5, max: 100 }),
   blockedPct: quantity({ label: 'Blocked', unit: '%', min: 0, max: 100 }),
@@ -117,7 +143,10 @@ export const weatherRowSchema = z.object({
 
 const openAirSchema = z.object({
   type: z.literal('open-air'),
-  rows: z.array(weatherRowSchema).min(1, 'Weather: put at least one row.').max(60, 'Weather: put at most 60 rows.'),
+  rows: z
+    .array(weatherRowSchema)
+    .min(1, 'Weather: put at least one row.')
+    .max(60, 'Weather: put at most 60 rows.'),
   shadePct: quantity({ label: 'Shade', unit: '%', min: 0, max: 100 }),
 })
 
@@ -152,7 +181,11 @@ const enclosedSchema = z.object({
   outside: openAirSchema,
 })
 
-export const surroundingsSchema = z.discriminatedUnion('type', [controlledSchema, openAirSchema, enclosedSchema])
+export const surroundingsSchema = z.discriminatedUnion('type', [
+  controlledSchema,
+  openAirSchema,
+  enclosedSchema,
+])
 
 export const stopSchema = z.object({
   minute: quantity({ label: 'Stop, minutes into the leg', unit: 'min', min: 0, max: 20_000 }),
@@ -195,7 +228,10 @@ export const planSchema = z.object({
   consignor: partySchema,
   consignee: partySchema,
   /** Reachable for the whole journey. */
-  emergencyContact: z.object({ name: text('Emergency contact', 120), telephone: telephone('Emergency telephone') }),
+  emergencyContact: z.object({
+    name: text('Emergency contact', 120),
+    telephone: telephone('Emergency telephone'),
+  }),
   handlingNote: text('Handling note', 1_000),
   animals: z.array(animalSchema).max(60, 'Animals: put at most 60 entries.'),
   crates: z.array(crateSchema).max(26, 'Crates: put at most 26.'),

@@ -14,7 +14,12 @@ export interface Range {
 export function quantity({ label, unit, min, max }: Range) {
   const allowed = `put ${spell(min)} to ${spell(max)}${unit === '' ? '' : ` ${unit}`}.`
   return z
-    .number({ error: (issue) => (isBlank(issue.input) ? `${label} is missing: ${allowed}` : `${label} “${String(issue.input)}” is not a number: ${allowed}`) })
+    .number({
+      error: (issue) =>
+        isBlank(issue.input)
+          ? `${label} is missing: ${allowed}`
+          : `${label} “${String(issue.input)}” is not a number: ${allowed}`,
+    })
     .refine((value) => value >= min && value <= max, {
       error: (issue) => `${label} ${spell(Number(issue.input))}${unit === '' ? '' : ` ${unit}`}: ${allowed}`,
     })
@@ -30,7 +35,9 @@ export function text(label: string, max = 200) {
   return z
     .string({ error: `${label} is missing.` })
     .trim()
-    .max(max, { error: (issue) => `${label} is ${String(issue.input).length} characters long: put at most ${max}.` })
+    .max(max, {
+      error: (issue) => `${label} is ${String(issue.input).length} characters long: put at most ${max}.`,
+    })
 }
 
 /** Text that may not be empty. */

@@ -81,6 +81,14 @@ const valuesSchema = z.strictObject({
   }),
   bands: z.strictObject({ vasomotor: band, cold: band, pant: band, wet: band }),
   shellShare: share('Shell share'),
+  posture: word('Posture', ['curled', 'lying', 'standing']).optional().describe('Absent: lying.'),
+  specificHeatJkgK: optionalFigure({ what: 'Specific heat', unit: 'J/kgK', min: 1_000, max: 5_000 }, '3470'),
+  altricial: z.boolean().optional().describe('Young make little extra heat: age then limits it. Absent: no.'),
+  snubNosedFactor: optionalFigure(
+    { what: 'Snub-nosed factor', unit: '', min: 0, max: 1 },
+    'the flag needs a row of its own',
+  ),
+  solarAbsorptance: optionalFigure({ what: 'Share of sun taken up', unit: '', min: 0, max: 1 }, '0.7'),
 })
 
 /** A species row in force, as lib/species declares it. */
