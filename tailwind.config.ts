@@ -1,18 +1,20 @@
 import type { Config } from 'tailwindcss'
 import plugin from 'tailwindcss/plugin'
-import { COLOUR_NAMES, COLOURS, FACES, RAMP, RAMP_NAMES, SCREENS, SPACE, TYPE } from './lib/tokens'
+import { COLOUR_NAMES, COLOURS, FACES, PHONE_TYPE, RAMP, RAMP_NAMES, SCREENS, TYPE } from './lib/tokens'
 import type { Light } from './lib/tokens'
 
-/** Everything here is computed from lib/tokens.ts; colours are variables, so that night and paper need no second set of classes. */
+/**
+ * Everything here is computed from lib/tokens.ts; colours are variables, so that night and paper need no second set of classes.
+ * Distances are Tailwind's own steps of 4 px; the ones in use are SPACE in lib/tokens.ts.
+ */
 const config: Config = {
   content: ['./app/**/*.tsx', './components/**/*.tsx'],
   theme: {
     colors: colours(),
-    spacing: Object.fromEntries(Object.entries(SPACE).map(([key, px]) => [key, rem(px)])),
     screens: Object.fromEntries(Object.entries(SCREENS).map(([name, px]) => [name, `${px}px`])),
     fontFamily: Object.fromEntries(Object.keys(FACES).map((face) => [face, `var(--f-${face})`])),
     fontSize: Object.fromEntries(
-      Object.entries(TYPE).map(([name, [size, line]]) => [name, [rem(size), { lineHeight: rem(line) }]]),
+      Object.keys(TYPE).map((name) => [name, [`var(--t-${name})`, { lineHeight: `var(--l-${name})` }]]),
     ),
     borderRadius: { none: '0', hole: '50%' },
     boxShadow: {},
@@ -22,7 +24,8 @@ const config: Config = {
   plugins: [
     plugin(({ addBase }) => {
       addBase({
-        ':root': { ...inks('day'), ...faces(), 'color-scheme': 'light' },
+        ':root': { ...inks('day'), ...faces(), ...sizes(TYPE), 'color-scheme': 'light' },
+        [`@media screen and (width < ${SCREENS.desk}px)`]: { ':root': sizes(PHONE_TYPE) },
         '[data-theme=night]': { ...inks('night'), 'color-scheme': 'dark' },
         '@media (prefers-color-scheme: dark)': {
           '[data-theme=system]': { ...inks('night'), 'color-scheme': 'dark' },
@@ -61,6 +64,20 @@ function inks(light: Light): Record<string, string> {
     ...Object.entries(COLOURS[light]).map(([name, value]) => [`--${name}`, value]),
     ...ramp,
   ])
+}
+
+/** Size and line of each name, so that a phone can overrule them without a second set of classes. */
+function sizes(type: Record<string, readonly [number, number] | undefined>): Record<string, string> {
+  return Object.fromEntries(
+    Object.entries(type).flatMap(([name, step]) =>
+      step
+        ? [
+            [`--t-${name}`, rem(step[0])],
+            [`--l-${name}`, rem(step[1])],
+          ]
+        : [],
+    ),
+  )
 }
 
 /** next/font names its families itself and hands them over as --face-… (app/fonts.ts). */

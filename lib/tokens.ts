@@ -118,22 +118,8 @@ export function rampStep(tempC: number): RampName {
   return name
 }
 
-/** Distances, px. A key is the number a class carries (p-4 is 16 px). */
-export const SPACE = {
-  '0': 0,
-  px: 1,
-  '0.5': 2,
-  '1': 4,
-  '1.5': 6,
-  '2': 8,
-  '2.5': 10,
-  '3': 12,
-  '4': 16,
-  '5': 20,
-  '6': 24,
-  '8': 32,
-  '12': 48,
-} as const
+/** Distances in use, px. A class counts in steps of 4 (p-4 is 16 px). Page margin 24, on a phone 16. */
+export const SPACE = [2, 4, 8, 12, 16, 24, 32, 48] as const
 
 export type FaceName = 'head' | 'text' | 'fig' | 'crate'
 
@@ -164,7 +150,7 @@ export const PAPER_FONTS: readonly {
   { face: 'crate', weight: 400, style: 'normal', file: 'saira-stencil-one-400.ttf' },
 ]
 
-/** Size and line, px. Smallest: 12 on a screen, 15 on a phone, 7.5 pt on paper. */
+/** Size and line, px, on the desk. Smallest: 12 on a screen, 15 on a phone, 7.5 pt on paper. */
 export const TYPE = {
   caption: [12, 16],
   small: [13, 18],
@@ -187,6 +173,22 @@ export const TYPE = {
   'stamp-l': [26, 30],
 } as const satisfies Record<string, readonly [number, number]>
 export type TypeName = keyof typeof TYPE
+
+/** What the same names measure under SCREENS.desk, where a sheet is read at arm's length or in a cab. */
+export const PHONE_TYPE: Partial<Record<TypeName, readonly [number, number]>> = {
+  caption: [15, 20],
+  small: [16, 22],
+  body: [18, 26],
+  note: [16, 22],
+  long: [18, 26],
+  sub: [18, 24],
+  section: [21, 26],
+  'stamp-s': [15, 18],
+  'stamp-m': [18, 20],
+  'stamp-l': [19, 24],
+  'mark-s': [22, 24],
+  'mark-m': [26, 28],
+}
 
 /** Line weights, px: an alarm limit is always half as thick as a critical one. */
 export const STROKE = {

@@ -26,11 +26,11 @@ export function describedBy({
 export function Field({ id, label, hint, error, className, children }: FieldFace & { children: ReactNode }) {
   return (
     <div className={join('flex min-w-0 flex-col gap-0.5', className)}>
-      <label htmlFor={id} className="text-small font-semibold max-desk:text-long">
+      <label htmlFor={id} className="text-small font-semibold">
         {label}
       </label>
       {hint && (
-        <span id={`${id}-hint`} className="text-caption text-mute max-desk:text-note">
+        <span id={`${id}-hint`} className="text-caption text-mute">
           {hint}
         </span>
       )}
@@ -56,9 +56,9 @@ export function FieldSet({
       aria-invalid={error ? true : undefined}
       className={join('flex min-w-0 flex-col gap-1', className)}
     >
-      <legend className="mb-0.5 text-small font-semibold max-desk:text-long">{legend}</legend>
+      <legend className="mb-0.5 text-small font-semibold">{legend}</legend>
       {hint && (
-        <span id={`${id}-hint`} className="text-caption text-mute max-desk:text-note">
+        <span id={`${id}-hint`} className="text-caption text-mute">
           {hint}
         </span>
       )}
@@ -106,4 +106,4 @@ export function InputBox({
 
 /** The control itself carries no edge: its box does. */
 export const CONTROL =
-  'w-full min-w-0 flex-1 appearance-none bg-transparent px-2 py-1 text-body text-ink outline-none max-desk:text-phone disabled:text-mute'
+  'w-full min-w-0 flex-1 appearance-none bg-transparent px-2 py-1 text-body text-ink outline-none disabled:text-mute'

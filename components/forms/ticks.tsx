@@ -36,7 +36,7 @@ export function Tick({
         <span>{label}</span>
       </label>
       {hint && (
-        <span id={`${id}-hint`} className="block pl-[26px] text-caption text-mute max-desk:text-note">
+        <span id={`${id}-hint`} className="block pl-[26px] text-caption text-mute">
           {hint}
         </span>
       )}

@@ -18,8 +18,7 @@ export function BoxedFacts({
     <dl
       style={{ '--columns': columns } as React.CSSProperties}
       className={join(
-        // The outer rule is the frame; inner rules are drawn as gaps of the grid, so that no box has a double edge.
-        'm-0 grid grid-cols-2 gap-px overflow-hidden border-2 border-ink bg-rule desk:grid-cols-(--columns)',
+        'm-0 grid grid-cols-2 overflow-hidden border-2 border-ink bg-sheet desk:grid-cols-(--columns)',
         className,
       )}
     >
@@ -45,7 +44,8 @@ export function Fact({
   return (
     <div
       className={join(
-        'min-w-0 bg-sheet px-2.5 pb-1.5 pt-1',
+        // Each box rules its right and its foot; the frame cuts off the ones that would double it.
+        '-mb-px -mr-px min-w-0 border-b border-r border-rule px-2.5 pb-1.5 pt-1',
         whole && 'max-desk:col-span-2',
         tall && 'desk:row-span-2',
         className,

@@ -1,8 +1,9 @@
 /**
- * A broken rule round its parent (which is `relative`). Drawn as a stroke: a CSS border's dashes have no fixed length, and
- * a background would neither print nor survive forced colours. Half of the stroke is cut off by the edge.
+ * A broken rule round its parent (which is `relative` and sets --w, --d and --g: width, dash, gap). Drawn as a stroke: a
+ * CSS border's dashes have no fixed length, and a background would neither print nor survive forced colours. Half of the
+ * stroke is cut off by the edge.
  */
-export function BrokenFrame({ width, dash, gap }: { width: number; dash: number; gap: number }) {
+export function BrokenFrame() {
   return (
     <svg aria-hidden="true" className="absolute inset-0 block size-full overflow-hidden">
       <rect
@@ -10,25 +11,23 @@ export function BrokenFrame({ width, dash, gap }: { width: number; dash: number;
         height="100%"
         fill="none"
         stroke="currentColor"
-        strokeWidth={width * 2}
-        strokeDasharray={`${dash} ${gap}`}
+        className="[stroke-dasharray:var(--d)_var(--g)] [stroke-width:calc(var(--w)*2)]"
       />
     </svg>
   )
 }
 
 /** The broken upright before the count of conditions. */
-export function BrokenUpright({ width, dash, gap }: { width: number; dash: number; gap: number }) {
+export function BrokenUpright() {
   return (
-    <svg aria-hidden="true" width={width} className="absolute inset-y-0 left-0 block h-full">
+    <svg aria-hidden="true" className="absolute inset-y-0 left-0 block h-full w-(--w) overflow-hidden">
       <line
-        x1={width / 2}
-        x2={width / 2}
+        x1="50%"
+        x2="50%"
         y1="0"
         y2="100%"
         stroke="currentColor"
-        strokeWidth={width}
-        strokeDasharray={`${dash} ${gap}`}
+        className="[stroke-dasharray:var(--d)_var(--g)] [stroke-width:var(--w)]"
       />
     </svg>
   )

@@ -55,7 +55,7 @@ export function buttonClass({
   refused?: boolean
 }): string {
   return join(
-    'inline-flex cursor-pointer items-center justify-center gap-2 border text-center font-semibold no-underline',
+    'inline-flex cursor-pointer items-center justify-center gap-2 border text-center font-semibold no-underline desk:whitespace-nowrap',
     size === 'phone'
       ? 'min-h-14 px-4 py-2 text-phone'
       : 'min-h-8 px-[14px] py-[5px] text-body max-desk:min-h-11',

@@ -57,7 +57,7 @@ export function WorkRow({
   return (
     <div
       role="status"
-      className="flex flex-wrap items-center gap-x-4 gap-y-2 border-y border-rule py-2 text-small max-desk:text-note"
+      className="flex flex-wrap items-center gap-x-4 gap-y-2 border-y border-rule py-2 text-small"
     >
       <Holes done={done} of={of} />
       <span className="font-semibold">{words}</span>

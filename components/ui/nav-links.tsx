@@ -10,15 +10,28 @@ export function NavLinks({
   links,
   label,
   stacked = false,
+  inRow = false,
 }: {
   links: readonly NavLink[]
   label: string
+  /** Under one another, in the menu of a narrow head. */
   stacked?: boolean
+  /** Side by side over the whole width of a narrow head. */
+  inRow?: boolean
 }) {
   const path = usePathname()
   const current = longest(links, path)
   return (
-    <nav aria-label={label} className={stacked ? 'flex flex-col' : 'flex items-stretch gap-1'}>
+    <nav
+      aria-label={label}
+      className={
+        inRow
+          ? 'flex divide-x divide-rule border-b-2 border-ink bg-sheet board:hidden'
+          : stacked
+            ? 'flex flex-col'
+            : 'flex items-stretch gap-1'
+      }
+    >
       {links.map((link) => (
         <Link
           key={link.href}
@@ -26,9 +39,11 @@ export function NavLinks({
           aria-current={link.href === current ? 'page' : undefined}
           className={join(
             'relative flex items-center text-ink no-underline decoration-hand hover:underline aria-[current]:font-semibold',
-            stacked
-              ? 'min-h-12 border-t border-hair px-4 text-phone aria-[current]:border-l-[4px] aria-[current]:border-l-ink'
-              : "px-2.5 aria-[current]:after:absolute aria-[current]:after:inset-x-2.5 aria-[current]:after:bottom-0 aria-[current]:after:h-1 aria-[current]:after:bg-ink aria-[current]:after:content-['']",
+            inRow
+              ? "min-h-12 flex-1 justify-center px-2 text-center aria-[current]:after:absolute aria-[current]:after:inset-x-0 aria-[current]:after:bottom-0 aria-[current]:after:h-1.5 aria-[current]:after:bg-ink aria-[current]:after:content-['']"
+              : stacked
+                ? 'min-h-12 border-t border-hair px-4 text-phone aria-[current]:border-l-[4px] aria-[current]:border-l-ink'
+                : "px-2.5 aria-[current]:after:absolute aria-[current]:after:inset-x-2.5 aria-[current]:after:bottom-0 aria-[current]:after:h-1 aria-[current]:after:bg-ink aria-[current]:after:content-['']",
           )}
         >
           {link.words}

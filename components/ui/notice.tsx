@@ -30,7 +30,7 @@ export function Notice({
 /** One sentence with the double rule: it waits to be put right. Stands under a field or in a cell. */
 export function Attention({ children, id }: { children: ReactNode; id?: string }) {
   return (
-    <span id={id} className="dbl block pl-2 text-small font-semibold max-desk:text-note">
+    <span id={id} className="dbl block pl-2 text-small font-semibold">
       {children}
     </span>
   )

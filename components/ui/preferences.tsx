@@ -105,7 +105,7 @@ function Switch<T extends string>({
           type="button"
           aria-pressed={option.value === value}
           onClick={() => onChange(option.value)}
-          className="cursor-pointer border-b-3 border-transparent px-2 pt-[3px] text-small text-hand max-desk:min-h-11 max-desk:px-3 max-desk:text-note aria-pressed:border-ink aria-pressed:font-semibold aria-pressed:text-ink"
+          className="cursor-pointer border-b-3 border-transparent px-2 pt-[3px] text-small text-hand max-desk:min-h-11 max-desk:px-3 aria-pressed:border-ink aria-pressed:font-semibold aria-pressed:text-ink"
         >
           {option.words}
         </button>

@@ -7,7 +7,7 @@ export function SignOutButton() {
   return (
     <button
       type="button"
-      className="link touch text-small max-desk:text-phone"
+      className="link touch text-small"
       onClick={() => void signOut({ callbackUrl: '/sign-in' })}
     >
       Sign out

@@ -16,39 +16,19 @@ export interface StampProps {
   size?: StampSize
 }
 
-const FRAME = {
-  s: {
-    width: 2,
-    dash: 6,
-    gap: 4,
-    words: 'h-6 text-stamp-s px-2.5',
-    cond: 'pl-2',
-    count: 'ml-2 px-2 text-small',
-  },
-  m: {
-    width: 2,
-    dash: 6,
-    gap: 4,
-    words: 'h-8 text-stamp-m px-3',
-    cond: 'pl-3',
-    count: 'ml-[11px] px-[11px] text-[1.0625rem]',
-  },
-  phone: {
-    width: 3,
-    dash: 9,
-    gap: 6,
-    words: 'h-11 text-section px-4',
-    cond: 'pl-4',
-    count: 'ml-3 px-3 text-section',
-  },
-  l: {
-    width: 4,
-    dash: 13,
-    gap: 8,
-    words: 'h-[58px] text-stamp-l px-5',
-    cond: 'pl-5',
-    count: 'ml-[18px] px-[18px] text-[1.875rem]',
-  },
+/** Width, dash and gap of the frame as variables: on a phone the L stamp draws itself narrower, words and all. */
+const SIZES = {
+  s: 'h-6 max-desk:h-8 text-stamp-s px-2.5 [--w:2px] [--d:6px] [--g:4px]',
+  m: 'h-8 max-desk:h-10 text-stamp-m px-3 [--w:2px] [--d:6px] [--g:4px]',
+  phone: 'h-11 text-section px-4 [--w:3px] [--d:9px] [--g:6px]',
+  l: 'h-[58px] text-stamp-l px-5 [--w:4px] [--d:13px] [--g:8px] max-desk:h-12 max-desk:px-3 max-desk:[--w:3px] max-desk:[--d:9px] max-desk:[--g:6px]',
+} as const
+
+const COUNT = {
+  s: 'ml-2 px-2 text-small',
+  m: 'ml-[11px] px-[11px] text-[1.0625rem]',
+  phone: 'ml-3 px-3 text-section',
+  l: 'ml-[18px] px-[18px] text-[1.875rem] max-desk:ml-3 max-desk:px-3 max-desk:text-section',
 } as const
 
 /** Frame and fill carry the verdict, and the words are always there. A solid block of ink is NO-GO and nothing else. */
@@ -57,10 +37,9 @@ export function Stamp({ verdict, conditions = 0, outOfDate = false, size = 's' }
   if (!outOfDate && verdict === 'none') {
     return <span className={join('text-mute', size === 's' ? 'text-small' : 'text-body')}>Not assessed</span>
   }
-  const frame = FRAME[size]
   const base = join(
     'relative inline-flex items-center whitespace-nowrap font-head font-extrabold uppercase tracking-[.045em]',
-    frame.words,
+    SIZES[size],
   )
   if (outOfDate) {
     return (
@@ -78,35 +57,23 @@ export function Stamp({ verdict, conditions = 0, outOfDate = false, size = 's' }
   }
   if (verdict === 'go') {
     return (
-      <span
-        role="img"
-        aria-label={name}
-        className={join(
-          base,
-          'border-ink text-ink',
-          size === 'l' ? 'border-4' : size === 'phone' ? 'border-3' : 'border-2',
-        )}
-      >
+      <span role="img" aria-label={name} className={join(base, 'border-(length:--w) border-ink text-ink')}>
         {VERDICT_WORDS.go}
       </span>
     )
   }
   return (
-    <span
-      role="img"
-      aria-label={name}
-      className={join(base, 'text-ink', conditions > 0 && frame.cond, conditions > 0 && '!pr-0')}
-    >
-      <BrokenFrame {...frame} />
+    <span role="img" aria-label={name} className={join(base, 'text-ink', conditions > 0 && '!pr-0')}>
+      <BrokenFrame />
       {VERDICT_WORDS.conditional}
       {conditions > 0 && (
         <span
           className={join(
             'fig relative flex items-center self-stretch font-semibold tracking-normal',
-            frame.count,
+            COUNT[size],
           )}
         >
-          <BrokenUpright {...frame} />
+          <BrokenUpright />
           {conditions}
         </span>
       )}

@@ -26,6 +26,8 @@ export function Top({
   home?: string
 }) {
   const shown = links ?? (user ? NAVIGATION[user.role] : [])
+  // Two or three links stand in the open on a phone; more go into the menu.
+  const few = shown.length > 1 && shown.length <= 3
   return (
     <header className="no-print">
       <a
@@ -53,9 +55,10 @@ export function Top({
             <span className="text-mute">{words}</span>
           )}
         </div>
-        <NarrowMenu user={user} links={shown} words={words} />
+        <NarrowMenu user={user} links={few ? [] : shown} words={words} />
       </div>
       <Slat />
+      {few && <NavLinks links={shown} label="Main, narrow" inRow />}
     </header>
   )
 }
@@ -84,7 +87,7 @@ function NarrowMenu({
         Menu
       </summary>
       <div className="absolute inset-x-0 z-10 border-b-2 border-ink bg-sheet">
-        <NavLinks links={links} label="Main, narrow" stacked />
+        {links.length > 0 && <NavLinks links={links} label="Main, narrow" stacked />}
         <div className="flex flex-wrap items-center gap-4 border-t border-rule px-4 py-3">
           <UnitSwitch />
           <LightSwitch />

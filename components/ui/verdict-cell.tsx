@@ -25,8 +25,8 @@ export function VerdictCell({
 }) {
   if (verdict === null || verdict === 'none') return <span className="text-mute">none yet</span>
   const frame = join(
-    'fig relative inline-block border-2 px-1 py-px text-center text-small whitespace-nowrap',
-    wide ? 'min-w-[76px]' : 'min-w-[54px]',
+    'fig relative inline-block [--d:6px] [--g:4px] [--w:2px] border-2 px-1 py-px text-center text-small whitespace-nowrap',
+    wide ? 'min-w-[4.75rem]' : 'min-w-[3.375rem]',
   )
   return (
     <span className="inline-flex flex-wrap items-center gap-x-2 gap-y-0.5">
@@ -41,7 +41,7 @@ export function VerdictCell({
         <span className={join(frame, 'border-ink')}>{children}</span>
       ) : (
         <span className={join(frame, '!border-0 !px-1.5 !py-[3px]')}>
-          <BrokenFrame width={2} dash={6} gap={4} />
+          <BrokenFrame />
           {children}
         </span>
       )}
@@ -69,12 +69,12 @@ function FrameSample({ verdict }: { verdict: Verdict }) {
     <span
       aria-hidden="true"
       className={join(
-        'relative inline-block h-4 w-8 text-ink',
+        'relative inline-block h-4 w-8 text-ink [--d:6px] [--g:4px] [--w:2px]',
         verdict === 'go' && 'border-2 border-ink',
         verdict === 'no-go' && 'keep-ink bg-ink',
       )}
     >
-      {verdict === 'conditional' && <BrokenFrame width={2} dash={6} gap={4} />}
+      {verdict === 'conditional' && <BrokenFrame />}
     </span>
   )
 }
