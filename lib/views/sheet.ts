@@ -145,8 +145,10 @@ export interface ConditionView {
 
 export interface FindingView {
   number: number
-  /** Index in the assessment's findings. */
+  /** Index in the assessment's findings of the one shown, the narrowest of its kind. */
   index: number
+  /** All findings told in this row: the same rule on other legs or animals with the same answer. */
+  indexes: number[]
   rule: string
   basis: Basis
   /** "Physiology", "Law", … */
