@@ -9,7 +9,7 @@ export function Throttled({ endsMs, nowMs, zone }: { endsMs: number; nowMs: numb
   return (
     <section role="status" aria-label="Wait">
       <h2 className="text-page">Too many checks from one place</h2>
-      <p className="mt-2 text-long max-desk:text-phone">
+      <p className="mt-2 text-long">
         {leftS > 0 ? 'The page answers again in' : 'The wait is over. Check the code again.'}
       </p>
       {leftS > 0 && (
@@ -18,9 +18,9 @@ export function Throttled({ endsMs, nowMs, zone }: { endsMs: number; nowMs: numb
           <p aria-hidden="true" className="fig text-big font-semibold">
             {minutesAndSeconds(leftS)}
           </p>
-          <p className="mt-1 max-desk:text-note">
-            at {clock(endsMs, zone)} {zoneName(endsMs, zone)}. A paper can also be checked by ringing the desk: the number
-            stands on it under “Ring in this order”.
+          <p className="mt-1">
+            at {clock(endsMs, zone)} {zoneName(endsMs, zone)}. A paper can also be checked by ringing the
+            desk: the number stands on it under “Ring in this order”.
           </p>
         </>
       )}

@@ -11,13 +11,13 @@ export function VerificationResult({ view }: { view: VerificationView }) {
   return (
     <section aria-label="Result" role="status">
       <DocumentState state={view.state}>
-        <p className="mt-1 text-long max-desk:text-phone">{words.fact}</p>
-        <p className="mt-1 font-semibold max-desk:text-note">{words.act}</p>
-        <p className="mt-1.5 text-mute max-desk:text-note">
+        <p className="mt-1 text-long">{words.fact}</p>
+        <p className="mt-1 font-semibold">{words.act}</p>
+        <p className="mt-1.5 text-mute">
           Checked {fullTime(view.checked)}. It can change at any minute: check again at each handover.
         </p>
       </DocumentState>
-      <dl className="mt-4 divide-y divide-hair border-y-2 border-ink max-desk:text-note">
+      <dl className="mt-4 divide-y divide-hair border-y-2 border-ink">
         {view.code && (
           <Row name="Code">
             <span className="fig">{view.code}</span>
@@ -26,9 +26,9 @@ export function VerificationResult({ view }: { view: VerificationView }) {
         {view.paper && <PaperRows view={view} />}
         {!view.paper && <Row name="Kind of paper">Nothing is known of it here</Row>}
       </dl>
-      <p className="mt-4 max-desk:text-note">
-        <b>This is not a verdict.</b> The page says whether the paper is the one we issued. Whether the animals may go, and on
-        what conditions, stands on the paper itself.
+      <p className="mt-4">
+        <b>This is not a verdict.</b> The page says whether the paper is the one we issued. Whether the
+        animals may go, and on what conditions, stands on the paper itself.
       </p>
     </section>
   )

@@ -1,0 +1,67 @@
+import Link from 'next/link'
+import { Cell, Head, Ledger } from '@/components/ui/ledger'
+import { Mark } from '@/components/ui/mark'
+import type { MailRow } from '@/lib/views/administration'
+import { MailStateCell, needsDecision } from './mail-state'
+
+/** The mail queue. Double rule: somebody has to decide; nothing goes twice by itself. */
+export function MailTable({
+  rows,
+  chosenId,
+  hrefOf,
+}: {
+  rows: readonly MailRow[]
+  chosenId: number | null
+  hrefOf: (row: MailRow) => string
+}) {
+  return (
+    <>
+      <Ledger caption="Mails, newest first" className="max-desk:min-w-[44rem]">
+        <thead>
+          <tr>
+            <Head>State</Head>
+            <Head>Mail</Head>
+            <Head>To</Head>
+            <Head>Last word</Head>
+            <Head>Action</Head>
+          </tr>
+        </thead>
+        <tbody>
+          {rows.map((row) => (
+            <tr
+              key={row.id}
+              aria-current={row.id === chosenId ? 'true' : undefined}
+              className="aria-[current]:bg-handwash aria-[current]:[&>td:first-child]:shadow-[inset_4px_0_0_var(--hand)]"
+            >
+              <Cell attention={needsDecision(row.state)} className="whitespace-nowrap">
+                <MailStateCell row={row} />
+              </Cell>
+              <Cell>
+                {row.mark && (
+                  <>
+                    <Mark size="s">{row.mark}</Mark>{' '}
+                  </>
+                )}
+                {row.subject}
+              </Cell>
+              <Cell className="break-all text-small">{row.to}</Cell>
+              <Cell className="text-small">{row.lastWord}</Cell>
+              <Cell>
+                <Link href={hrefOf(row)} scroll={false} className="link">
+                  {needsDecision(row.state) ? 'Decide' : 'Open'}
+                  <span className="sr-only">
+                    {' '}
+                    {row.subject}, to {row.to}
+                  </span>
+                </Link>
+              </Cell>
+            </tr>
+          ))}
+        </tbody>
+      </Ledger>
+      <p className="mt-1.5 text-small text-mute">
+        Double rule: somebody has to decide. No mail is ever sent twice by itself.
+      </p>
+    </>
+  )
+}

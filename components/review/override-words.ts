@@ -1,0 +1,30 @@
+import type { FindingView } from '@/lib/views/sheet'
+
+/** Why a finding can't be overridden; null where a vet may do it by name. */
+export function whyNotOverridable(finding: FindingView): { bold: string; more: string } | null {
+  if (finding.status === 'overridden')
+    return { bold: 'Overridden.', more: 'It stands with the signature below.' }
+  if (finding.overridable && finding.status === 'breach') return null
+  const met = finding.status === 'met' || finding.status === 'note' ? ' It is met.' : ''
+  if (finding.margin.limitKind === 'critical')
+    return { bold: 'Not possible: critical.', more: `Nobody overrides it.${met}` }
+  switch (finding.basis) {
+    case 'law':
+      return {
+        bold: 'Not possible: law.',
+        more: met === '' ? 'Only a paper attached changes the finding; release waits for it.' : met.trim(),
+      }
+    case 'carrier':
+      return {
+        bold: 'Not possible: the carrier’s own.',
+        more: met === '' ? 'Only the carrier’s written consent changes it.' : met.trim(),
+      }
+    default:
+      return { bold: 'Nothing to override.', more: met.trim() || finding.statusWords }
+  }
+}
+
+/** Whether a finding speaks of one of these crates: about all animals, or about one inside. */
+export function speaksOf(finding: FindingView, animalIds: ReadonlySet<string>): boolean {
+  return finding.animalIds.length === 0 || finding.animalIds.some((id) => animalIds.has(id))
+}
