@@ -51,6 +51,8 @@ export const up: Migration = ({ context }) =>
   KEY consignments_verdict_departs (verdict, departs_at, id),
   KEY consignments_holder_departs (holder, departs_at, id),
   KEY consignments_shipper_departs (shipper_id, departs_at, id),
+  -- Named here, so that taking back its foreign key (0015) leaves no index behind.
+  KEY consignments_assessment (assessment_id),
   CONSTRAINT consignments_shipper FOREIGN KEY (shipper_id) REFERENCES shippers (id),
   CONSTRAINT consignments_in_force_snapshot FOREIGN KEY (in_force_snapshot_hash) REFERENCES snapshots (hash),
   CONSTRAINT consignments_created_by FOREIGN KEY (created_by) REFERENCES users (id),

@@ -8,7 +8,7 @@ export const root = path.resolve(path.dirname(fileURLToPath(import.meta.url)), '
 
 /** Everything one machine keeps: the database, secrets, mails. Tests keep theirs apart, so that neither disturbs the other. */
 export const dataDir = path.resolve(root, process.env.DATA_DIR || '.data')
-export const testDataDir = path.join(dataDir, 'test')
+export const testDataDir = path.join(root, '.data', 'test')
 
 /**
  * Where the database's files are under a data folder. A socket path may hold 107 characters and a project may lie

@@ -1,4 +1,5 @@
 import { QueryTypes } from 'sequelize'
+import type { Model, ModelStatic } from 'sequelize'
 import { expect, test } from 'vitest'
 import { database } from '@/lib/db/connection'
 import { models } from '@/models'
@@ -9,6 +10,8 @@ interface ColumnRow {
   column_type: string
   is_nullable: 'YES' | 'NO'
 }
+
+const all: ModelStatic<Model>[] = Object.values(models)
 
 const columns = await database().query<ColumnRow>(
   `SELECT table_name AS table_name, column_name AS column_name, column_type AS column_type, is_nullable AS is_nullable
@@ -32,7 +35,7 @@ function spelling(type: unknown): string {
     .replaceAll(', ', ',')
 }
 
-test.each(Object.values(models).map((model) => [model.getTableName() as string, model] as const))(
+test.each(all.map((model) => [model.getTableName() as string, model] as const))(
   '%s: the model and the table say the same',
   (table, model) => {
     const inTable = columns
@@ -49,9 +52,5 @@ test.each(Object.values(models).map((model) => [model.getTableName() as string, 
 test('every table has its model', () => {
   const tables = new Set(columns.map((column) => column.table_name))
   tables.delete('schema_migrations')
-  expect([...tables].sort()).toEqual(
-    Object.values(models)
-      .map((model) => model.getTableName() as string)
-      .sort(),
-  )
+  expect([...tables].sort()).toEqual(all.map((model) => model.getTableName() as string).sort())
 })
