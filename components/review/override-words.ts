@@ -1,3 +1,4 @@
+import type { ReviewCrate } from '@/lib/views/review'
 import type { FindingView } from '@/lib/views/sheet'
 
 /** Why a finding can't be overridden; null where a vet may do it by name. */
@@ -24,7 +25,18 @@ export function whyNotOverridable(finding: FindingView): { bold: string; more: s
   }
 }
 
-/** Whether a finding speaks of one of these crates: about all animals, or about one inside. */
-export function speaksOf(finding: FindingView, animalIds: ReadonlySet<string>): boolean {
-  return finding.animalIds.length === 0 || finding.animalIds.some((id) => animalIds.has(id))
+/**
+ * The findings a signature over these crates is about: those on an animal inside one, and those on all animals. A breach of
+ * a crate nobody looked at can't slip in, and an override ticked for a crate since left out doesn't go along.
+ */
+export function coveredFindings(
+  findings: readonly FindingView[],
+  crates: readonly Pick<ReviewCrate, 'crateId' | 'animals'>[],
+  crateIds: readonly string[],
+): FindingView[] {
+  const covered = crates.filter((crate) => crateIds.includes(crate.crateId))
+  const animalIds = new Set(covered.flatMap((crate) => crate.animals.map((animal) => animal.animalId)))
+  return findings.filter(
+    (finding) => finding.animalIds.length === 0 || finding.animalIds.some((id) => animalIds.has(id)),
+  )
 }

@@ -1,0 +1,89 @@
+import { z } from 'zod'
+import { overrideSchema, vetConditionSchema } from '@/lib/schemas/approval'
+import type { ApproveCrates, ReturnCrates } from '@/lib/schemas/approval'
+import { itemId } from '@/lib/schemas/act'
+import type { ReviewCrate } from '@/lib/views/review'
+import type { FindingView } from '@/lib/views/sheet'
+import { coveredFindings } from './override-words'
+
+export const DECISIONS = ['approve', 'return'] as const
+export type Decision = (typeof DECISIONS)[number]
+
+const overrideRowSchema = z.object({ on: z.boolean(), reason: z.string() })
+const conditionRowSchema = vetConditionSchema.extend({ legId: z.string() })
+
+/**
+ * The review as a vet fills it in: one row of overrides for each finding on the page. What the verbs take is made of it
+ * below; the verbs check it again against the stored findings.
+ */
+export const reviewFormSchema = z
+  .object({
+    decision: z.enum(DECISIONS, { error: 'Decision: choose approve or return.' }),
+    crateIds: z.array(itemId).min(1, { error: 'Crates: choose at least one.' }),
+    overrides: z.array(overrideRowSchema),
+    conditions: z.array(conditionRowSchema),
+    reasons: z.string(),
+    examined: z.string(),
+    password: z.string(),
+  })
+  .superRefine((values, context) => {
+    const issue = (path: (string | number)[], message: string) =>
+      context.addIssue({ code: 'custom', path, message })
+    if (values.decision === 'return') {
+      if (values.reasons.trim() === '')
+        issue(['reasons'], 'Reasons are missing: say what the desk has to change.')
+      return
+    }
+    values.overrides.forEach(({ on, reason }, index) => {
+      const parsed = overrideSchema.shape.reason.safeParse(reason)
+      if (on && !parsed.success) issue(['overrides', index, 'reason'], parsed.error.issues[0]?.message ?? '')
+    })
+    if (values.examined === '') issue(['examined'], 'Examined: say whether you have examined the animals.')
+    if (values.password === '') issue(['password'], 'Your password is missing.')
+  })
+
+export type ReviewForm = z.infer<typeof reviewFormSchema>
+
+export interface ReviewSubject {
+  consignmentId: number
+  planHash: string
+  findings: readonly FindingView[]
+  crates: readonly ReviewCrate[]
+}
+
+/** What the approve verb takes: a row that speaks of several findings overrides each of them for the same reason. */
+export function approvalOf(values: ReviewForm, subject: ReviewSubject, requestId: string): ApproveCrates {
+  const covered = coveredFindings(subject.findings, subject.crates, values.crateIds)
+  return {
+    consignmentId: subject.consignmentId,
+    requestId,
+    crateIds: values.crateIds,
+    planHash: subject.planHash,
+    password: values.password,
+    examined: values.examined === 'yes',
+    conditions: values.conditions.map((row) => ({ ...row, legId: row.legId === '' ? null : row.legId })),
+    overrides: chosenOverrides(values, subject.findings)
+      .filter(({ finding }) => covered.includes(finding))
+      .flatMap(({ finding, reason }) => finding.indexes.map((findingIndex) => ({ findingIndex, reason }))),
+  }
+}
+
+export function returnOf(values: ReviewForm, subject: ReviewSubject, requestId: string): ReturnCrates {
+  return {
+    consignmentId: subject.consignmentId,
+    requestId,
+    crateIds: values.crateIds,
+    reason: values.reasons.trim(),
+  }
+}
+
+/** Findings ticked for overriding, with the reason given. */
+export function chosenOverrides(
+  values: Pick<ReviewForm, 'overrides'>,
+  findings: readonly FindingView[],
+): { finding: FindingView; reason: string }[] {
+  return findings.flatMap((finding, index) => {
+    const row = values.overrides[index]
+    return row?.on ? [{ finding, reason: row.reason.trim() }] : []
+  })
+}
