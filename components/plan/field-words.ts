@@ -179,7 +179,11 @@ export interface NamesInPlan {
 
 /** A value as the page would show it: "40 mm", "Wood shavings", "Yes", "2 openings", "nothing". */
 export function valueWords(path: string, value: unknown, names: NamesInPlan): string {
-  const key = path.split('.').filter((part) => !/^\d+$/.test(part)).at(-1) ?? ''
+  const key =
+    path
+      .split('.')
+      .filter((part) => !/^\d+$/.test(part))
+      .at(-1) ?? ''
   if (value === null || value === undefined || value === '') return 'nothing'
   if (typeof value === 'boolean') return value ? 'Yes' : 'No'
   const named = nameBehind(key, value, names)
@@ -188,20 +192,28 @@ export function valueWords(path: string, value: unknown, names: NamesInPlan): st
   if (typeof value === 'string') return CHOICES[key]?.[value] ?? value.replace(/^(\d{4}-\d\d-\d\d)T/, '$1 ')
   if (Array.isArray(value)) {
     const words = value.map((item) => (typeof item === 'string' ? (CHOICES[key]?.[item] ?? item) : null))
-    return words.every((word) => word !== null) && words.length > 0 ? words.join(', ') : `${value.length} rows`
+    return words.every((word) => word !== null) && words.length > 0
+      ? words.join(', ')
+      : `${value.length} rows`
   }
   return 'as entered'
 }
 
-function withFieldUnit(path: string, value: number): string {
+/** The unit of the field at a path; undefined where it holds no figure with one. */
+export function fieldUnit(path: string): string | undefined {
   const named = path.split('.').filter((part) => !/^\d+$/.test(part))
-  const unit = FIELDS[named.slice(-2).join('.')]?.[1] ?? FIELDS[named.at(-1) ?? '']?.[1]
+  return FIELDS[named.slice(-2).join('.')]?.[1] ?? FIELDS[named.at(-1) ?? '']?.[1]
+}
+
+function withFieldUnit(path: string, value: number): string {
+  const unit = fieldUnit(path)
   const figure = String(value).replace('-', '−')
   return unit === undefined ? figure : `${figure}\u00a0${unit}`
 }
 
 function nameBehind(key: string, value: unknown, names: NamesInPlan): string | null {
-  const byId = (rows: readonly { id: number; name: string }[]) => rows.find(({ id }) => id === value)?.name ?? null
+  const byId = (rows: readonly { id: number; name: string }[]) =>
+    rows.find(({ id }) => id === value)?.name ?? null
   switch (key) {
     case 'fromPlaceId':
     case 'toPlaceId':

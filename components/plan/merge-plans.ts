@@ -28,7 +28,11 @@ export function mergePlans(base: Plan, mine: Plan, theirs: Plan): MergedPlan {
 
 /** An animal that takes another number keeps its crate. */
 function withOwnAnimals(base: Plan, mine: Plan, theirs: Plan): Plan {
-  const animals = withOwnIds(mine.animals, theirs.animals, new Map(base.animals.map((item) => [item.id, item])))
+  const animals = withOwnIds(
+    mine.animals,
+    theirs.animals,
+    new Map(base.animals.map((item) => [item.id, item])),
+  )
   const renamed = new Map(mine.animals.map(({ id }, index) => [id, animals[index]?.id ?? id]))
   const crates = mine.crates.map((crate) => ({
     ...crate,
@@ -76,7 +80,13 @@ interface Item {
  * Rows keyed by id. Their order leads and mine are put after the row they followed. A row one of us took out and the
  * other changed stays in: leaving out is the act that loses typing.
  */
-function mergeItems(path: Keys, base: readonly Item[], mine: readonly Item[], theirs: readonly Item[], notes: Notes) {
+function mergeItems(
+  path: Keys,
+  base: readonly Item[],
+  mine: readonly Item[],
+  theirs: readonly Item[],
+  notes: Notes,
+) {
   const before = new Map(base.map((item) => [item.id, item]))
   const ours = withOwnIds(mine, theirs, before)
   const byMine = new Map(ours.map((item) => [item.id, item]))
@@ -84,7 +94,11 @@ function mergeItems(path: Keys, base: readonly Item[], mine: readonly Item[], th
   const order = theirs.map(({ id }) => id)
   ours.forEach(({ id }, place) => {
     if (byTheirs.has(id)) return
-    const after = ours.slice(0, place).map((item) => item.id).findLast((known) => order.includes(known))
+    const after = ours
+      .slice(0, place)
+      .map((item) => item.id)
+      .filter((known) => order.includes(known))
+      .at(-1)
     order.splice(after === undefined ? 0 : order.indexOf(after) + 1, 0, id)
   })
   const kept = order.filter((id) => {
@@ -106,7 +120,11 @@ function mergeItems(path: Keys, base: readonly Item[], mine: readonly Item[], th
 }
 
 /** Both of us may have added an "animal-4": mine then takes the next free number. */
-function withOwnIds<T extends Item>(mine: readonly T[], theirs: readonly Item[], before: ReadonlyMap<string, Item>): T[] {
+function withOwnIds<T extends Item>(
+  mine: readonly T[],
+  theirs: readonly Item[],
+  before: ReadonlyMap<string, Item>,
+): T[] {
   const taken = new Set([...mine, ...theirs].map(({ id }) => id))
   const added = new Set(theirs.filter(({ id }) => !before.has(id)).map(({ id }) => id))
   return mine.map((item) => {

@@ -1,3 +1,4 @@
+import { fieldId } from '@/components/forms/field-id'
 import type { Plan } from '@/lib/schemas/plan'
 
 /*
@@ -48,4 +49,9 @@ export function valueAt(plan: Plan, path: string): unknown {
     if (typeof value !== 'object' || value === null) return undefined
     return (value as Record<string, unknown>)[key]
   }, plan)
+}
+
+/** Id of the field at a path, for labels, links and the focus. */
+export function planPathId(path: string): string {
+  return fieldId('plan', path)
 }

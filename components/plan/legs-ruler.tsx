@@ -1,0 +1,186 @@
+'use client'
+
+import { useEffect, useRef, useState } from 'react'
+import { Marks } from '@/components/charts/marks'
+import { zoneOffsetMin } from '@/lib/planning/local-time'
+import { hatch } from '@/lib/views/charts/hatch'
+import { clock, dayDate, hourMin, zoneName } from '@/lib/views/format'
+import { patternOf } from './leg-swatch'
+import { legName } from './option-words'
+import { usePlanLegs } from './plan-timeline'
+import { rulerLayout, rulerTicks } from './ruler-layout'
+import type { RulerLayout } from './ruler-layout'
+
+const LEFT = 48
+const BAR = { top: 46, height: 40 }
+
+/** All legs on one true time scale, on the clocks of both ends of the journey; time that belongs to no leg stands open. */
+export function LegsRuler({ chosen, onChoose }: { chosen: number; onChoose: (index: number) => void }) {
+  const { legs, timeline } = usePlanLegs()
+  const frame = useRef<HTMLDivElement>(null)
+  const width = useWidth(frame)
+  const inner = width - LEFT - 8
+  const layout = width > 0 ? rulerLayout(timeline.legs, inner) : null
+  const zones = [...new Set([timeline.departureZone, timeline.arrivalZone])].filter((zone) => zone !== null)
+  return (
+    <div ref={frame} className="mb-1 max-desk:hidden">
+      {layout !== null && (
+        <svg width={width} height={108} role="img" aria-label={summary(legs.length, layout)}>
+          {zones.map((zone, row) => (
+            <ZoneRuler
+              key={zone}
+              layout={layout}
+              zone={zone}
+              y={14 + row * 18}
+              inner={inner}
+              first={row === 0}
+            />
+          ))}
+          <g transform={`translate(${LEFT} 0)`}>
+            {layout.legs.map(({ index, fromPx, toPx }) => {
+              const leg = legs[index]
+              if (leg === undefined) return null
+              const box = { x: fromPx, y: BAR.top, width: toPx - fromPx, height: BAR.height }
+              return (
+                <g key={leg.id} onClick={() => onChoose(index)} className="cursor-pointer">
+                  <rect {...box} className={index === chosen ? 'fill-handwash' : 'fill-band'} />
+                  <Marks marks={[hatch(patternOf(leg), box)]} />
+                  <rect
+                    {...box}
+                    strokeWidth={index === chosen ? 2.5 : 1.25}
+                    className={index === chosen ? 'fill-none stroke-hand' : 'fill-none stroke-ink'}
+                  />
+                  <LegLabel box={box} index={index} name={legName(leg)} />
+                </g>
+              )
+            })}
+            {layout.gaps.map((gap) => (
+              <g key={gap.after}>
+                <rect
+                  x={gap.fromPx}
+                  y={BAR.top - 3}
+                  width={Math.max(3, gap.toPx - gap.fromPx)}
+                  height={BAR.height + 6}
+                  strokeWidth="2"
+                  className="fill-sheet stroke-ink"
+                />
+                <text
+                  x={(gap.fromPx + gap.toPx) / 2}
+                  y={BAR.top + BAR.height + 17}
+                  textAnchor="middle"
+                  fontSize="12"
+                  fontWeight="600"
+                >
+                  {hourMin(gap.minutes)} {gap.overlap ? 'in two legs' : 'in no leg'}
+                </text>
+              </g>
+            ))}
+          </g>
+        </svg>
+      )}
+      {layout !== null && layout.untimed.length > 0 && (
+        <p className="text-small text-mute">
+          Not on the ruler, because a time or a place is missing: leg{' '}
+          {layout.untimed.map((index) => index + 1).join(', ')}.
+        </p>
+      )}
+    </div>
+  )
+}
+
+interface Bar {
+  x: number
+  y: number
+  width: number
+  height: number
+}
+
+/** Number and name on a label pasted on the hatching, as much as fits. */
+function LegLabel({ box, index, name }: { box: Bar; index: number; name: string }) {
+  const short = String(index + 1)
+  const room = Math.floor((box.width - 22) / 7.2)
+  const words = room >= name.length ? name : ''
+  const width = words === '' ? 8 + short.length * 9 : 22 + name.length * 6.8
+  if (box.width < width + 6) return null
+  return (
+    <>
+      <rect x={box.x + 6} y={box.y + 11} width={width} height={18} className="fill-sheet" />
+      <text
+        x={box.x + 10}
+        y={box.y + 25}
+        fontSize="14"
+        fontWeight="700"
+        style={{ fontFamily: 'var(--f-head)' }}
+      >
+        {short}
+      </text>
+      {words !== '' && (
+        <text x={box.x + 23} y={box.y + 25} fontSize="12">
+          {words}
+        </text>
+      )}
+    </>
+  )
+}
+
+function ZoneRuler({
+  layout,
+  zone,
+  y,
+  inner,
+  first,
+}: {
+  layout: RulerLayout
+  zone: string
+  y: number
+  inner: number
+  first: boolean
+}) {
+  const ticks = rulerTicks(layout, inner, zoneOffsetMin(layout.startMs, zone))
+  return (
+    <g className={first ? '' : 'opacity-90'}>
+      <text x={0} y={y} fontSize="12" fontWeight={first ? 600 : 400}>
+        {zoneName(layout.startMs, zone)}
+      </text>
+      <line x1={LEFT} x2={LEFT + inner} y1={y + 5} y2={y + 5} strokeWidth="1" className="stroke-rule" />
+      {ticks.map((ms) => {
+        const words = clock(ms, zone)
+        const x = LEFT + layout.at(ms)
+        return (
+          <g key={ms}>
+            <line x1={x} x2={x} y1={y + 2} y2={y + 8} strokeWidth="1" className="stroke-ink" />
+            <text
+              x={Math.min(x, LEFT + inner - 16)}
+              y={y}
+              textAnchor="middle"
+              fontSize="12"
+              fontWeight={first ? 600 : 400}
+              className={first ? '' : '!fill-mute'}
+              style={{ fontFamily: words === '00:00' ? undefined : 'var(--f-fig)' }}
+            >
+              {words === '00:00' ? dayDate(ms, zone) : words}
+            </text>
+          </g>
+        )
+      })}
+    </g>
+  )
+}
+
+function summary(many: number, layout: RulerLayout): string {
+  const gaps = layout.gaps.length
+  const hours = hourMin((layout.endMs - layout.startMs) / 60_000)
+  return `${many} legs over ${hours} hours and minutes on one time scale${gaps > 0 ? `, with ${gaps} places where they do not join` : ''}.`
+}
+
+function useWidth(frame: React.RefObject<HTMLElement | null>): number {
+  const [width, setWidth] = useState(0)
+  useEffect(() => {
+    const element = frame.current
+    if (element === null) return
+    const watch = new ResizeObserver(([entry]) => setWidth(Math.floor(entry?.contentRect.width ?? 0)))
+    watch.observe(element)
+    return () => watch.disconnect()
+  }, [frame])
+  return width
+}
