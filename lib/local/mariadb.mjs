@@ -14,7 +14,16 @@ import {
 import { userInfo } from 'node:os'
 import path from 'node:path'
 import { databaseFiles } from './paths.mjs'
-import { SetupError, findProgram, freePort, portIsFree, processExists, run, until } from './run.mjs'
+import {
+  SetupError,
+  endWithUs,
+  findProgram,
+  freePort,
+  portIsFree,
+  processExists,
+  run,
+  until,
+} from './run.mjs'
 
 const USUAL_PORT = 33_306
 /** SKIP LOCKED came with 10.6. */
@@ -226,6 +235,7 @@ async function launch(files, programs, port) {
     { detached: true, stdio: ['ignore', log, log], env: { ...process.env, TZ: 'UTC' } },
   )
   closeSync(log)
+  const letLive = endWithUs(child)
   let ended
   child.once('error', (error) => (ended = error.message))
   child.once('exit', (code) => (ended ??= `exit code ${code}`))
@@ -234,6 +244,7 @@ async function launch(files, programs, port) {
   })
   if (ended !== undefined || !up)
     throw new SetupError(`MariaDB did not start (${ended ?? 'no answer'}).\n${lastErrors(files.log, from)}`)
+  letLive()
   child.unref()
 }
 

@@ -18,6 +18,18 @@ export function failAndExit(error) {
   process.exit(1)
 }
 
+const children = new Set()
+process.on('exit', () => {
+  for (const child of children) child.kill('SIGTERM')
+})
+
+/** Ends this child with our own process, if it has not ended before; the returned function lets it live on. */
+export function endWithUs(child) {
+  children.add(child)
+  child.once('exit', () => children.delete(child))
+  return () => children.delete(child)
+}
+
 /**
  * Runs a program to its end. Resolves with its exit code and what it printed; with `show` the output goes straight to the
  * terminal instead. Rejects only where the program cannot be started.
@@ -28,6 +40,7 @@ export function run(command, args, { input, show = false, ...options } = {}) {
       ...options,
       stdio: [input === undefined ? 'ignore' : 'pipe', show ? 'inherit' : 'pipe', show ? 'inherit' : 'pipe'],
     })
+    endWithUs(child)
     let stdout = ''
     let stderr = ''
     child.stdout?.setEncoding('utf8').on('data', (part) => (stdout += part))

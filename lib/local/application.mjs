@@ -1,0 +1,87 @@
+import { mkdirSync } from 'node:fs'
+import path from 'node:path'
+import { bundleWorker } from './build.mjs'
+import { root } from './paths.mjs'
+import { Supervised, processNote } from './processes.mjs'
+import { SetupError, portIsFree, until } from './run.mjs'
+
+const HEALTHY_WITHIN_MS = 120_000
+/** Falling this often in a row before it was ever healthy means it cannot start at all. */
+const HOPELESS = 3
+
+/**
+ * Starts the web server and the worker and keeps both alive. The application must be built, and its database ready.
+ * `healthy` resolves once the web server answers; `stop` ends both.
+ */
+export async function startApplication({ folder, host, port, variables, dev = false, say }) {
+  mkdirSync(folder, { recursive: true })
+  const note = processNote(path.join(folder, 'processes.json'), `STEADFOLD_FOLDER=${folder}`)
+  await note.endLeftovers()
+  if (!(await portIsFree(port, host))) {
+    throw new SetupError(
+      `Port ${port} is in use by another program. Free it, or choose another: PORT=${port + 1} npm start`,
+    )
+  }
+  const env = {
+    ...process.env,
+    ...variables,
+    STEADFOLD_FOLDER: folder,
+    NODE_ENV: dev ? 'development' : 'production',
+  }
+  let lost
+  const common = { cwd: root, env, say, note }
+  const web = new Supervised({
+    ...common,
+    name: 'web',
+    command: process.execPath,
+    args: [
+      path.join(root, 'node_modules/next/dist/bin/next'),
+      dev ? 'dev' : 'start',
+      '-H',
+      host,
+      '-p',
+      String(port),
+    ],
+    onFall: (falls, reason) => {
+      if (falls >= HOPELESS) lost = reason
+    },
+  })
+  let worker
+  const endWatch = dev
+    ? await bundleWorker({
+        onRebuild: (errors) => (errors.length > 0 ? say('worker', `${errors[0].text}\n`) : worker?.restart()),
+      })
+    : undefined
+  worker = new Supervised({
+    ...common,
+    name: 'worker',
+    command: process.execPath,
+    args: ['--enable-source-maps', path.join(root, 'dist/worker/worker.mjs')],
+  })
+  const stop = async () => {
+    await endWatch?.()
+    await Promise.all([web.stop(), worker.stop()])
+  }
+  const address = `http://${host === '0.0.0.0' ? '127.0.0.1' : host}:${port}`
+  const healthy = async () => {
+    const up = await until(async () => lost !== undefined || (await isHealthy(address)), {
+      timeoutMs: HEALTHY_WITHIN_MS,
+      everyMs: 150,
+    })
+    if (up && lost === undefined) return
+    throw new SetupError(
+      `The web server does not answer at ${address}${lost === undefined ? '' : ` (${lost})`}; its own words are above.`,
+    )
+  }
+  return { address, web, worker, healthy, stop }
+}
+
+async function isHealthy(address) {
+  try {
+    const response = await fetch(`${address}/api/health`, { signal: AbortSignal.timeout(5_000) })
+    await response.arrayBuffer()
+    return response.ok
+  } catch {
+    return false
+  }
+}
