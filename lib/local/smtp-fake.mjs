@@ -54,10 +54,14 @@ function smtpServer(state) {
     disabledCommands: ['STARTTLS'],
     size: 40 * 1024 * 1024,
     closeTimeout: 500,
+    onMailFrom(address, session, callback) {
+      // Decided once a letter, so that all its recipients meet the same fate.
+      session.fate = spend(state) ? state.failure.mode : 'none'
+      callback()
+    },
     onRcptTo(address, session, callback) {
-      const { mode } = state.failure
-      if (mode === 'refuse' && spend(state)) return callback(smtpError(550, 'No such mailbox here.'))
-      if (mode === 'later' && spend(state)) return callback(smtpError(451, 'Try again later.'))
+      if (session.fate === 'refuse') return callback(smtpError(550, 'No such mailbox here.'))
+      if (session.fate === 'later') return callback(smtpError(451, 'Try again later.'))
       callback()
     },
     onData(stream, session, callback) {
@@ -66,7 +70,7 @@ function smtpServer(state) {
       stream.on('end', () => {
         keep(state, Buffer.concat(parts), session.envelope)
         // The letter is here, but the sender never learns it.
-        if (state.failure.mode === 'drop' && spend(state)) return hangUp(server, session)
+        if (session.fate === 'drop') return hangUp(server, session)
         callback(null, 'Kept.')
       })
     },

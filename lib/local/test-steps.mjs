@@ -1,0 +1,132 @@
+import { existsSync, mkdirSync, readFileSync, rmSync } from 'node:fs'
+import path from 'node:path'
+import { build, bundleWorker } from './build.mjs'
+import { root, testDataDir } from './paths.mjs'
+import { run } from './run.mjs'
+import { holdTestServer } from './test-database.mjs'
+import { startTestApplication } from './test-application.mjs'
+
+/** What npm test runs, in order. A step without tests of its own counts as one check. */
+export const STEPS = [
+  {
+    name: 'format',
+    title: 'Format',
+    work: () => check('node_modules/prettier/bin/prettier.cjs', ['--check', '.']),
+  },
+  {
+    name: 'lint',
+    title: 'Lint',
+    work: () => check('node_modules/eslint/bin/eslint.js', ['.', '--max-warnings', '0']),
+  },
+  { name: 'types', title: 'Types', work: types },
+  { name: 'unit', title: 'Unit and property tests', work: () => vitest('unit') },
+  { name: 'db', title: 'Tests on MariaDB', work: onDatabase },
+  { name: 'build', title: 'Production build', work: production },
+  { name: 'e2e', title: 'Browser tests in Chromium', work: browser },
+]
+
+const env = { ...process.env, TZ: 'UTC', NEXT_TELEMETRY_DISABLED: '1' }
+
+async function check(script, args) {
+  const { code } = await run(process.execPath, [path.join(root, script), ...args], {
+    cwd: root,
+    env,
+    show: true,
+  })
+  return code === 0 ? { passed: 1, failed: 0 } : { passed: 0, failed: 1 }
+}
+
+async function types() {
+  const routes = await check('node_modules/next/dist/bin/next', ['typegen'])
+  return routes.failed > 0 ? routes : check('node_modules/typescript/bin/tsc', ['--noEmit'])
+}
+
+async function vitest(project) {
+  const report = reportFile(`${project}.json`)
+  const args = ['run', '--config', 'tests/vitest.config.ts', '--project', project]
+  const reporters = ['--reporter=default', '--reporter=json', `--outputFile.json=${report}`]
+  const { code } = await run(
+    process.execPath,
+    [path.join(root, 'node_modules/vitest/vitest.mjs'), ...args, ...reporters],
+    {
+      cwd: root,
+      env,
+      show: true,
+    },
+  )
+  return counts(report, code, (told) => {
+    // A file that cannot even be read has no tests to fail: it counts as one.
+    const unreadable = told.testResults.filter(
+      ({ status, assertionResults }) => status === 'failed' && assertionResults.length === 0,
+    )
+    return {
+      passed: told.numPassedTests,
+      failed: told.numFailedTests + unreadable.length,
+      skipped: told.numPendingTests + told.numTodoTests,
+    }
+  })
+}
+
+async function onDatabase(undo) {
+  await bundleWorker()
+  return withServer(undo, () => vitest('db'))
+}
+
+async function production() {
+  const done = await build((words) => console.log(words))
+  console.log(done ? 'Built.' : 'Already built from these sources.')
+  return { passed: 1, failed: 0 }
+}
+
+/** The application as people run it: built, on its own database with the demo in it, mailing to a server that keeps all. */
+async function browser(undo) {
+  await build((words) => console.log(words))
+  return withServer(undo, async (server) => {
+    const application = await startTestApplication(server, undo)
+    const report = reportFile('e2e.json')
+    try {
+      const args = ['test', '--config', 'tests/playwright.config.ts']
+      const { code } = await run(
+        process.execPath,
+        [path.join(root, 'node_modules/@playwright/test/cli.js'), ...args],
+        {
+          cwd: root,
+          env: { ...env, ...application.testVariables, E2E_REPORT: report },
+          show: true,
+        },
+      )
+      return counts(report, code, ({ stats }) => ({
+        passed: stats.expected,
+        failed: stats.unexpected + stats.flaky,
+        skipped: stats.skipped,
+      }))
+    } finally {
+      await application.stop()
+    }
+  })
+}
+
+async function withServer(undo, work) {
+  const { server, stop } = await holdTestServer()
+  undo.add(stop)
+  try {
+    return await work(server)
+  } finally {
+    undo.delete(stop)
+    await stop()
+  }
+}
+
+function reportFile(name) {
+  mkdirSync(testDataDir, { recursive: true })
+  const file = path.join(testDataDir, name)
+  rmSync(file, { force: true })
+  return file
+}
+
+/** Never better than the exit code: a run that failed without saying which test still counts as one failure. */
+function counts(report, code, read) {
+  const told = existsSync(report) ? read(JSON.parse(readFileSync(report, 'utf8'))) : { passed: 0, failed: 0 }
+  const nothing = told.passed + told.failed === 0
+  return { ...told, failed: told.failed === 0 && (code !== 0 || nothing) ? 1 : told.failed }
+}
