@@ -39,7 +39,7 @@ export interface Prepared {
  * `refused` for a row without alarm and critical limits, which cannot be assessed.
  */
 export function prepare(given: Scenario, catalogue: Readonly<Record<string, ProfileRow>>): Prepared {
-  const rows = given.profiles ?? catalogue
+  const rows = { ...catalogue, ...given.profiles }
   const scenario = {
     ...given,
     crates: given.crates.map((crate) => ({

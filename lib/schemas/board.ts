@@ -12,6 +12,8 @@ export const boardQuerySchema = z.object({
   state: z.array(z.enum(CONSIGNMENT_STATES)).catch([]).default([]),
   verdict: z.array(z.enum(BOARD_VERDICTS)).catch([]).default([]),
   holder: z.enum(HOLDERS).nullable().catch(null).default(null),
+  /** Only what leaves on this day or later, a day in UTC. */
+  leavesFrom: z.iso.date().nullable().catch(null).default(null),
   /** Closed consignments are left out unless asked for. */
   closed: z.boolean().catch(false).default(false),
   sort: z.enum(BOARD_SORTS).catch('departure').default('departure'),
@@ -30,6 +32,7 @@ export function boardQueryOf(search: URLSearchParams): BoardQuery {
     state: search.getAll('state'),
     verdict: search.getAll('verdict'),
     holder: search.get('holder'),
+    leavesFrom: search.get('leavesFrom'),
     closed: search.get('closed') === '1',
     sort: search.get('sort') ?? undefined,
     descending: search.get('descending') === '1',

@@ -1,4 +1,5 @@
 import { z } from 'zod'
+import { SHIPPED_ROWS } from '@/lib/rules/shipped-rows'
 import type { ProfileRow, Scenario } from '@/lib/thermal/scenario'
 import { journeyIssues, type ScenarioIssue } from './scenario/checks'
 import { contextSchema, initialStateSchema, limitChangeSchema } from './scenario/context'
@@ -19,7 +20,7 @@ export type ParsedScenario = { ok: true; scenario: Scenario } | { ok: false; iss
  */
 export function parseScenario(
   json: unknown,
-  catalogue: Readonly<Record<string, ProfileRow>>,
+  catalogue: Readonly<Record<string, ProfileRow>> = SHIPPED_ROWS,
 ): ParsedScenario {
   const parsed = scenarioSchema.safeParse(json)
   if (!parsed.success)

@@ -12,18 +12,19 @@ const WEATHER_BEYOND_MIN = 300
 
 /**
  * What no single field can tell: names that must agree, weather that must reach, limits that may not move outward.
- * `catalogue` holds the species rows in force where the scenario brings none of its own.
+ * `catalogue` holds the species rows in force where the scenario brings no row of its own.
  */
 export function journeyIssues(
   scenario: Scenario,
   catalogue: Readonly<Record<string, ProfileRow>>,
 ): ScenarioIssue[] {
+  const rows = { ...catalogue, ...scenario.profiles }
   return [
     ...nameIssues(scenario),
     ...referenceIssues(scenario),
     ...weatherIssues(scenario),
-    ...profileIssues(scenario, scenario.profiles ?? catalogue),
-    ...limitIssues(scenario, scenario.profiles ?? catalogue),
+    ...profileIssues(scenario, rows),
+    ...limitIssues(scenario, rows),
     ...initialIssues(scenario),
   ]
 }
