@@ -3,6 +3,7 @@
  * guesses which was meant. Offsets come straight from Intl at a given instant, so the zone of the process never enters
  * (date-fns-tz reads a Date handed to it in the process zone, and picks a side of both traps in silence).
  */
+import { shortZoneName } from './zone-names'
 
 const MINUTE_MS = 60_000
 
@@ -80,8 +81,9 @@ export function localMoment(instantMs: number, zone: string): LocalMoment {
 
 /** "BST (UTC+1)", or "UTC+4" where the zone has no abbreviation of its own. */
 export function zoneLabel(instantMs: number, zone: string): string {
-  const utc = spellOffset(zoneOffsetMin(instantMs, zone))
-  const name = abbreviation(instantMs, zone)
+  const offsetMin = zoneOffsetMin(instantMs, zone)
+  const utc = spellOffset(offsetMin)
+  const name = shortZoneName(zone, offsetMin)
   return name === null || name === utc ? utc : `${name} (${utc})`
 }
 
@@ -163,21 +165,6 @@ function clockOf(zone: string): Intl.DateTimeFormat {
   })
   clocks.set(zone, made)
   return made
-}
-
-const namers = new Map<string, Intl.DateTimeFormat>()
-
-function abbreviation(instantMs: number, zone: string): string | null {
-  // en-GB knows European names (BST, CEST), en-US American ones (EDT); elsewhere Intl prints an offset and we say our own.
-  for (const language of ['en-GB', 'en-US']) {
-    const key = `${language} ${zone}`
-    const namer =
-      namers.get(key) ?? new Intl.DateTimeFormat(language, { timeZone: zone, timeZoneName: 'short' })
-    namers.set(key, namer)
-    const name = namer.formatToParts(instantMs).find(({ type }) => type === 'timeZoneName')?.value
-    if (name && /^[A-Z]{2,5}$/.test(name)) return name
-  }
-  return null
 }
 
 const DAYS = ['Sun', 'Mon', 'Tue', 'Wed', 'Thu', 'Fri', 'Sat'] as const

@@ -1,11 +1,12 @@
-import type { Line, NoFacts } from './table'
+import { line } from './table'
+import type { NoFacts } from './table'
 
 /** Clinical acts are a vet's alone: not a dispatcher's, and not an admin's. */
 export const approvalPolicy = {
-  'approval.queue': { vet: true } satisfies Line<NoFacts>,
-  'approval.approve': { vet: true } satisfies Line<NoFacts>,
-  'approval.return': { vet: true } satisfies Line<NoFacts>,
-  'approval.withdraw': { vet: true } satisfies Line<NoFacts>,
-  'approval.override': { vet: true } satisfies Line<NoFacts>,
-  'approval.countersign': { vet: true } satisfies Line<NoFacts>,
+  'approval.queue': line<NoFacts>({ vet: true }),
+  'approval.approve': line<NoFacts>({ vet: true }),
+  'approval.return': line<NoFacts>({ vet: true }),
+  'approval.withdraw': line<NoFacts>({ vet: true }),
+  'approval.override': line<NoFacts>({ vet: true }),
+  'approval.countersign': line<NoFacts>({ vet: true }),
 }

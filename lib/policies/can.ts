@@ -5,7 +5,7 @@ import { approvalPolicy } from './approval'
 import { consignmentPolicy } from './consignment'
 import { documentPolicy } from './document'
 import { runPolicy } from './run'
-import type { Line, NoFacts } from './table'
+import type { Line } from './table'
 
 /** Every verb and which role may use it on what. Anything not written here is refused. */
 export const POLICY = {
@@ -19,12 +19,8 @@ export const POLICY = {
 export type Verb = keyof typeof POLICY
 export const VERBS = Object.keys(POLICY) as readonly Verb[]
 
-type PermissionOf<V extends Verb> = (typeof POLICY)[V][keyof (typeof POLICY)[V]]
-type FactsOfPermission<P> = P extends (actor: Actor, facts: infer Facts) => boolean ? Facts : never
 /** The record a verb's policy looks at; undefined where it looks at none. */
-export type FactsOf<V extends Verb> = [FactsOfPermission<PermissionOf<V>>] extends [never]
-  ? NoFacts
-  : FactsOfPermission<PermissionOf<V>>
+export type FactsOf<V extends Verb> = (typeof POLICY)[V] extends Line<infer Facts> ? Facts : never
 
 /**
  * Whether the actor may use the verb on this record. Nobody signed in, an unknown verb or role, or a record the policy

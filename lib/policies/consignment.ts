@@ -1,5 +1,6 @@
 import type { Actor, Role } from './actor'
-import type { Line, NoFacts } from './table'
+import { line } from './table'
+import type { NoFacts } from './table'
 
 /** What a policy must know of a consignment. Plain, already loaded: a policy asks no database. */
 export interface ConsignmentFacts {
@@ -13,32 +14,32 @@ const ours = (actor: Actor, facts: ConsignmentFacts) =>
 const drives = (actor: Actor, facts: ConsignmentFacts) => facts.driverIds.includes(actor.id)
 
 export const consignmentPolicy = {
-  'consignment.list': { dispatcher: true, vet: true, admin: true, shipper: true } satisfies Line<NoFacts>,
-  'consignment.create': { dispatcher: true } satisfies Line<NoFacts>,
+  'consignment.list': line<NoFacts>({ dispatcher: true, vet: true, admin: true, shipper: true }),
+  'consignment.create': line<NoFacts>({ dispatcher: true }),
 
-  'consignment.read': {
+  'consignment.read': line<ConsignmentFacts>({
     dispatcher: true,
     vet: true,
     admin: true,
     driver: drives,
     shipper: ours,
-  } satisfies Line<ConsignmentFacts>,
-  'consignment.save': { dispatcher: true } satisfies Line<ConsignmentFacts>,
-  'consignment.assess': { dispatcher: true } satisfies Line<ConsignmentFacts>,
-  'consignment.submit': { dispatcher: true } satisfies Line<ConsignmentFacts>,
-  'consignment.release': { dispatcher: true } satisfies Line<ConsignmentFacts>,
-  'consignment.cancel': { dispatcher: true } satisfies Line<ConsignmentFacts>,
-  'consignment.confirm-air': { dispatcher: true } satisfies Line<ConsignmentFacts>,
-  'consignment.confirm-condition': { dispatcher: true } satisfies Line<ConsignmentFacts>,
-  'consignment.record-instruction': { dispatcher: true } satisfies Line<ConsignmentFacts>,
+  }),
+  'consignment.save': line<ConsignmentFacts>({ dispatcher: true }),
+  'consignment.assess': line<ConsignmentFacts>({ dispatcher: true }),
+  'consignment.submit': line<ConsignmentFacts>({ dispatcher: true }),
+  'consignment.release': line<ConsignmentFacts>({ dispatcher: true }),
+  'consignment.cancel': line<ConsignmentFacts>({ dispatcher: true }),
+  'consignment.confirm-air': line<ConsignmentFacts>({ dispatcher: true }),
+  'consignment.confirm-condition': line<ConsignmentFacts>({ dispatcher: true }),
+  'consignment.record-instruction': line<ConsignmentFacts>({ dispatcher: true }),
 
   /** A dispatcher does these in a driver's place and writes down why. */
-  'consignment.depart': { dispatcher: true, driver: drives } satisfies Line<ConsignmentFacts>,
-  'consignment.deliver': { dispatcher: true, driver: drives } satisfies Line<ConsignmentFacts>,
-  'consignment.stop': { dispatcher: true, driver: drives } satisfies Line<ConsignmentFacts>,
+  'consignment.depart': line<ConsignmentFacts>({ dispatcher: true, driver: drives }),
+  'consignment.deliver': line<ConsignmentFacts>({ dispatcher: true, driver: drives }),
+  'consignment.stop': line<ConsignmentFacts>({ dispatcher: true, driver: drives }),
 
-  'consignment.acknowledge': { shipper: ours } satisfies Line<ConsignmentFacts>,
-  'consignment.ask-change': { shipper: ours } satisfies Line<ConsignmentFacts>,
+  'consignment.acknowledge': line<ConsignmentFacts>({ shipper: ours }),
+  'consignment.ask-change': line<ConsignmentFacts>({ shipper: ours }),
 }
 
 /** The parts of a consignment that pages show or leave out. */
@@ -65,8 +66,7 @@ const PARTS_BY_ROLE: Record<Role, readonly ConsignmentPart[]> = {
 
 /** What of this consignment the actor may be shown; nothing where the actor may not read it at all. */
 export function visibleParts(actor: Actor, facts: ConsignmentFacts): readonly ConsignmentPart[] {
-  const line: Line<ConsignmentFacts> = consignmentPolicy['consignment.read']
-  const permission = line[actor.role]
+  const permission = consignmentPolicy['consignment.read'][actor.role]
   const reads = permission === true || (permission !== undefined && permission(actor, facts))
   return reads ? PARTS_BY_ROLE[actor.role] : []
 }

@@ -1,6 +1,6 @@
 import type { Actor } from './actor'
 import type { ConsignmentFacts } from './consignment'
-import type { Line } from './table'
+import { line } from './table'
 
 export const DOCUMENT_KINDS = ['go_no_go', 'manifest'] as const
 export type DocumentKind = (typeof DOCUMENT_KINDS)[number]
@@ -14,7 +14,7 @@ const FOR_DRIVERS: readonly DocumentKind[] = ['manifest']
 const FOR_SHIPPERS: readonly DocumentKind[] = ['manifest', 'go_no_go']
 
 export const documentPolicy = {
-  'document.read': {
+  'document.read': line<DocumentFacts>({
     dispatcher: true,
     vet: true,
     admin: true,
@@ -22,5 +22,5 @@ export const documentPolicy = {
       facts.driverIds.includes(actor.id) && FOR_DRIVERS.includes(facts.kind),
     shipper: (actor: Actor, facts: DocumentFacts) =>
       actor.shipperId !== null && actor.shipperId === facts.shipperId && FOR_SHIPPERS.includes(facts.kind),
-  } satisfies Line<DocumentFacts>,
+  }),
 }

@@ -1,5 +1,6 @@
 import type { Actor } from './actor'
-import type { Line, NoFacts } from './table'
+import { line } from './table'
+import type { NoFacts } from './table'
 
 /** What a policy must know of one leg of the revision in force. */
 export interface RunLegFacts {
@@ -10,8 +11,8 @@ export interface RunLegFacts {
 const own = (actor: Actor, facts: RunLegFacts) => facts.driverId !== null && facts.driverId === actor.id
 
 export const runPolicy = {
-  'run.list': { driver: true } satisfies Line<NoFacts>,
-  'run.read': { driver: own, dispatcher: true, vet: true } satisfies Line<RunLegFacts>,
-  'run.enter': { driver: own } satisfies Line<RunLegFacts>,
-  'run.hand-over': { driver: own } satisfies Line<RunLegFacts>,
+  'run.list': line<NoFacts>({ driver: true }),
+  'run.read': line<RunLegFacts>({ driver: own, dispatcher: true, vet: true }),
+  'run.enter': line<RunLegFacts>({ driver: own }),
+  'run.hand-over': line<RunLegFacts>({ driver: own }),
 }
