@@ -7,6 +7,8 @@ export { gather } from './gather'
 export { endure, type Endured, type EndureOptions } from './endure'
 export { stateAt } from './snapshots'
 export { ENGINE_VERSION } from './version'
+export { rightHandSide } from './right-hand-side'
+export { profileOf } from './journey'
 export { holdLegAt, lengthenLeg, schedulesOf, shiftAir, withDelays } from './schedule'
 export type {
   Closure,

@@ -43,7 +43,7 @@ export interface AnimalTrack {
   waterLossPctMass: number[]
   /** Share of thermogenic and of evaporative capacity in use. */
   effort: { coldPct: number[]; heatPct: number[] }
-  /** Minute from which core ran away upward (C3), absent when it never did. */
+  /** Minute from which core ran away upward, absent when it never did. */
   runawayFromMin?: number
 }
 
