@@ -1,7 +1,15 @@
 import { Model } from 'sequelize'
 import type { CreationOptional, InferAttributes, InferCreationAttributes, Sequelize } from 'sequelize'
 import { z } from 'zod'
+import type { Profile } from '@/lib/species'
 import { count, json, key, link, moment, optional, text } from './columns'
+
+const profileShape = z.looseObject({
+  key: z.string(),
+  version: z.number().int(),
+  limits: z.record(z.string(), z.looseObject({ value: z.number(), unit: z.string() })),
+  remarks: z.array(z.string()),
+})
 
 /** One version of a species row; never changed, never removed. */
 export class SpeciesProfile extends Model<
@@ -14,8 +22,8 @@ export class SpeciesProfile extends Model<
   declare version: number
   declare commonName: string
   declare scientificName: string
-  /** The sourced profile; whoever computes with it parses it by its own schema. */
-  declare profile: Record<string, unknown>
+  /** Every figure with its source; profileValues of lib/species refuses a row that cannot be computed with. */
+  declare profile: Profile
   declare createdBy: number | null
   declare createdAt: CreationOptional<Date>
 }
@@ -28,7 +36,7 @@ export function initSpeciesProfile(sequelize: Sequelize): typeof SpeciesProfile 
       version: count(),
       commonName: text(80),
       scientificName: text(80),
-      profile: json('profile', z.record(z.string(), z.unknown())),
+      profile: json('profile', profileShape),
       createdBy: optional(link()),
       createdAt: moment(),
     },

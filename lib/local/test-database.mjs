@@ -4,7 +4,7 @@ import { applyGrants, createDatabaseAndUsers, dropDatabase } from './grants.mjs'
 import { query, startMariadb, stopMariadb } from './mariadb.mjs'
 import { testDataDir } from './paths.mjs'
 import { SetupError, processExists, until } from './run.mjs'
-import { migrateUp } from './schema.mjs'
+import { migrateUp, runTypescript } from './schema.mjs'
 import { keepSecrets } from './secrets.mjs'
 import { databaseVariables, migrateVariables } from './variables.mjs'
 
@@ -15,8 +15,11 @@ import { databaseVariables, migrateVariables } from './variables.mjs'
 const lock = path.join(testDataDir, 'server.lock')
 const borrowed = path.join(testDataDir, 'server.borrowed')
 
-/** A fresh database for the run of this process: migrated, and with the application's rights. `remove` drops it again. */
-export async function makeTestDatabase(name = `steadfold_test_${process.pid}`) {
+/**
+ * A fresh database for the run of this process: migrated, with the application's rights and, unless asked otherwise, the
+ * reference rows. `remove` drops it again.
+ */
+export async function makeTestDatabase(name = `steadfold_test_${process.pid}`, { reference = true } = {}) {
   const secrets = keepSecrets(testDataDir)
   // The server may be stopped by another run only while no run has a database: both happen under the lock.
   const server = await exclusively(async () => {
@@ -36,6 +39,7 @@ export async function makeTestDatabase(name = `steadfold_test_${process.pid}`) {
   }
   await migrateUp(variables)
   await applyGrants(server, name)
+  if (reference) await runTypescript('lib/local/seed.ts', ['reference'], variables)
   const remove = () =>
     exclusively(async () => {
       await dropDatabase(server, name)

@@ -11,7 +11,7 @@ let owner: Sequelize
 let remove: () => Promise<void>
 
 beforeAll(async () => {
-  const made = await makeTestDatabase(`steadfold_test_${process.pid}_migrations`)
+  const made = await makeTestDatabase(`steadfold_test_${process.pid}_migrations`, { reference: false })
   remove = made.remove
   owner = createDatabase(() => ({
     ...env().database,

@@ -1,4 +1,5 @@
 import { newCrate } from '@/lib/planning/new-plan'
+import { guineaPig } from '@/lib/species/guinea-pig'
 import { models } from '@/models'
 import { next, orMake, stored } from './given'
 import type { Given } from './given'
@@ -41,12 +42,14 @@ export async function place(given: Given<'Place'> = {}) {
 }
 
 export async function speciesProfile(given: Given<'SpeciesProfile'> = {}) {
+  const profile = given.profile ?? { ...guineaPig, key: `guinea-pig-${next()}` }
+  const { key, version, commonName, scientificName } = profile
   return stored(models.SpeciesProfile, {
-    key: `animal-${next()}`,
-    version: 1,
-    commonName: 'Animal',
-    scientificName: 'Animalia',
-    profile: {},
+    key,
+    version,
+    commonName,
+    scientificName,
+    profile,
     ...given,
     createdBy: await orMake(given.createdBy, () => user({ role: 'admin' })),
   })
