@@ -14,9 +14,9 @@ const paperSchema = z
       .default([])
       .describe('Whom it speaks of. Default: every animal.'),
     issued: instantText('Issued').optional().describe('ISO 8601, UTC.'),
-    issuedMs: instantMs('Issued').optional(),
+    issuedMs: instantMs('Issued').optional().describe('The same in milliseconds since 1970.'),
     expires: instantText('Expires').optional().describe('ISO 8601, UTC.'),
-    expiresMs: instantMs('Expires').optional(),
+    expiresMs: instantMs('Expires').optional().describe('The same in milliseconds since 1970.'),
     values: z
       .record(z.string(), z.number())
       .default({})

@@ -53,6 +53,7 @@ export function identifier(what: string) {
       error: (issue) =>
         `${what} ${quote(issue.input)}: put 1 to 64 letters, digits, dots, dashes or underscores.`,
     })
+    .describe(`${what}, 1 to 64 letters, digits, dots, dashes or underscores.`)
 }
 
 export function words(what: string, max: number) {
@@ -65,6 +66,7 @@ export function words(what: string, max: number) {
     .max(max, {
       error: (issue) => `${what} is ${String(issue.input).length} characters long: put at most ${max}.`,
     })
+    .describe(`${what}, text of at most ${max} characters.`)
 }
 
 export function quote(input: unknown) {
