@@ -32,7 +32,9 @@ export function figureOr(it: Figure, otherwise: number, source: string) {
 
 /** One of a fixed list of words. */
 export function word<const T extends readonly [string, ...string[]]>(what: string, words: T) {
-  return z.enum(words, { error: (issue) => `${what} ${quote(issue.input)}: put one of ${words.join(', ')}.` })
+  return z
+    .enum(words, { error: (issue) => `${what} ${quote(issue.input)}: put one of ${words.join(', ')}.` })
+    .describe(`${what}: ${words.join(', ')}.`)
 }
 
 export function flag(what: string, description: string) {
