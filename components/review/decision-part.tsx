@@ -8,11 +8,11 @@ import { ErrorSummary } from '@/components/ui/error-summary'
 import { Notice } from '@/components/ui/notice'
 import type { ReviewView } from '@/lib/views/review'
 import type { FindingView } from '@/lib/views/sheet'
-import { approvalStatement } from './approval-statement'
 import { chosenOverrides } from './review-form-schema'
 import type { ReviewForm } from './review-form-schema'
 import type { ReviewFormState } from './review-desk'
 import { SignerFacts } from './signer-facts'
+import { Statement } from './statement'
 import { stillMissing } from './still-missing'
 
 /** Decision, statement and signature. What is still missing stands at the button. */
@@ -78,7 +78,12 @@ export function DecisionPart({
         {!returning && (
           <>
             <h3 className="text-sub">Sign</h3>
-            <p className="mt-1 text-small">{approvalStatement({ marks, view, overridden, values })}</p>
+            <Statement
+              examined={values.examined}
+              marks={marks}
+              conditionCount={view.sheet.conditions.length + values.conditions.length}
+              overridden={overridden.map(({ finding }) => finding)}
+            />
             <Radios
               {...form.field('examined')}
               className="mt-2"
