@@ -1,7 +1,7 @@
 'use client'
 
 import { useFieldArray, useFormContext, useWatch } from 'react-hook-form'
-import { CrateDrawing } from '@/components/crates/crate-drawing'
+import { CratePicture } from './crate-picture'
 import { SelectField } from '@/components/forms/select-field'
 import { Button } from '@/components/ui/button'
 import { Empty } from '@/components/ui/notice'
@@ -60,7 +60,7 @@ export function CratesPart({ chosen, onChoose }: { chosen: number; onChoose: (in
       }
     >
       <div className="grid max-board:divide-y max-board:divide-rule board:grid-cols-[auto_1fr] board:divide-x board:divide-rule [&>*]:min-w-0 [&>*]:px-3.5 [&>*]:py-3">
-        <div>{crate && <CrateDrawing crate={crate} mark={mark} />}</div>
+        <div>{crate && <CratePicture crate={crate} mark={mark} />}</div>
         <div className="flex flex-col gap-3" key={fields[index]?.rowKey}>
           <CrateFields index={index} />
           <OccupantsField index={index} />

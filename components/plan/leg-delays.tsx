@@ -43,7 +43,7 @@ function Stops({ index }: { index: number }) {
       {fields.map((field, row) => (
         <div
           key={field.rowKey}
-          className="grid grid-cols-[1fr_7rem_auto] items-end gap-2 border-t border-hair py-1.5"
+          className="grid grid-cols-[1fr_6.25rem_auto] items-end gap-1.5 border-t border-hair py-1.5"
         >
           <PlanSelect
             path={`legs.${index}.stops.${row}.kind`}
@@ -60,7 +60,7 @@ function Stops({ index }: { index: number }) {
             className="link pb-1.5 text-small max-desk:min-h-11"
             onClick={() => remove(row)}
           >
-            Take out<span className="sr-only"> stop {row + 1}</span>
+            Out<span className="sr-only">: take out stop {row + 1}</span>
           </button>
         </div>
       ))}

@@ -14,7 +14,7 @@ import { planPathId } from './plan-path'
 
 /** What is round the crates on one leg: air held by a machine, open air, or a space with air of its own. */
 export function LegSurroundings({ index }: { index: number }) {
-  const { control, setValue } = useFormContext<Plan>()
+  const { control, register, setValue } = useFormContext<Plan>()
   const leg = useWatch({ control, name: `legs.${index}` })
   // What was typed for another kind of surroundings comes back when somebody changes their mind.
   const typed = useRef(new Map<string, PlanSurroundings>())
@@ -30,11 +30,10 @@ export function LegSurroundings({ index }: { index: number }) {
       <Radios
         id={planPathId(`legs.${index}.surroundings.type`)}
         label={<span className="sr-only">Surroundings</span>}
-        name={`surroundings-${leg.id}`}
+        {...register(`legs.${index}.surroundings.type`)}
         inRow
         options={SURROUNDINGS_OPTIONS}
         key={type}
-        defaultValue={type}
         onChange={(event) => choose(event.target.value as PlanSurroundings['type'])}
       />
       {type === 'controlled' && <ControlledFields index={index} />}

@@ -5,7 +5,7 @@ import { Marks } from '@/components/charts/marks'
 import { zoneOffsetMin } from '@/lib/planning/local-time'
 import { hatch } from '@/lib/views/charts/hatch'
 import { clock, dayDate, hourMin, zoneName } from '@/lib/views/format'
-import { patternOf } from './leg-swatch'
+import { PATTERN_OF_KIND } from '@/components/charts/pattern-of-kind'
 import { legName } from './option-words'
 import { usePlanLegs } from './plan-timeline'
 import { rulerLayout, rulerTicks } from './ruler-layout'
@@ -44,7 +44,7 @@ export function LegsRuler({ chosen, onChoose }: { chosen: number; onChoose: (ind
               return (
                 <g key={leg.id} onClick={() => onChoose(index)} className="cursor-pointer">
                   <rect {...box} className={index === chosen ? 'fill-handwash' : 'fill-band'} />
-                  <Marks marks={[hatch(patternOf(leg), box)]} />
+                  <Marks marks={[hatch(PATTERN_OF_KIND[leg.kind], box)]} />
                   <rect
                     {...box}
                     strokeWidth={index === chosen ? 2.5 : 1.25}

@@ -1,0 +1,48 @@
+'use client'
+
+import { keepPreviousData, useQuery } from '@tanstack/react-query'
+import { useRouter, useSearchParams } from 'next/navigation'
+import { useMemo } from 'react'
+import type { BoardView } from '@/lib/views/board'
+import { boardAddressOf, boardSearch } from './board-address'
+import type { BoardAddress } from './board-address'
+
+/**
+ * The board of the address bar. The server sends the first rows with the page; after that the handler is asked, and old
+ * rows stay in place until new ones come.
+ */
+export function useBoard(first: { search: string; view: BoardView }) {
+  const router = useRouter()
+  const params = useSearchParams()
+  const address = useMemo(() => boardAddressOf(new URLSearchParams(params)), [params])
+  const search = boardSearch(address)
+  const query = useQuery({
+    queryKey: ['consignments', search],
+    queryFn: ({ signal }) => readBoard(search, signal),
+    initialData: search === first.search ? first.view : undefined,
+    initialDataUpdatedAt: first.view.readMs,
+    placeholderData: keepPreviousData,
+    refetchInterval: 30_000,
+  })
+  return {
+    address,
+    view: query.data,
+    waiting: query.isPlaceholderData || query.isPending,
+    failed: query.isError,
+    again: () => void query.refetch(),
+    go: (next: BoardAddress, how: 'push' | 'replace' = 'push') => {
+      const text = boardSearch(next)
+      const href = text === '' ? '/consignments' : `/consignments?${text}`
+      router[how](href, { scroll: false })
+    },
+  }
+}
+
+async function readBoard(search: string, signal: AbortSignal): Promise<BoardView> {
+  const answer = await fetch(`/api/consignments?${search}`, {
+    signal,
+    headers: { accept: 'application/json' },
+  })
+  if (!answer.ok) throw new Error(`The board answered ${answer.status}.`)
+  return (await answer.json()) as BoardView
+}

@@ -1,0 +1,42 @@
+import { Cell, Head, Ledger, RowHead } from '@/components/ui/ledger'
+import type { ConditionView } from '@/lib/views/sheet'
+
+/** What must be so for the verdict to hold, of whom it was asked, and what they answered. */
+export function ConditionsTable({ conditions }: { conditions: readonly ConditionView[] }) {
+  if (conditions.length === 0) return <p className="text-mute">The verdict rests on no condition.</p>
+  return (
+    <Ledger caption="Conditions">
+      <thead>
+        <tr>
+          <Head>No.</Head>
+          <Head>Leg</Head>
+          <Head>What must be so</Head>
+          <Head>Asked of</Head>
+          <Head>Confirmed</Head>
+        </tr>
+      </thead>
+      <tbody>
+        {conditions.map((condition) => (
+          <tr key={condition.conditionId}>
+            <RowHead className="font-head text-sub font-bold">{condition.number}</RowHead>
+            <Cell className="whitespace-nowrap">{condition.legWords}</Cell>
+            <Cell>{condition.text}</Cell>
+            <Cell>{condition.askedOf}</Cell>
+            <Cell attention={condition.answer === 'refused' || condition.kept === 'broken'}>
+              <Answer condition={condition} />
+            </Cell>
+          </tr>
+        ))}
+      </tbody>
+    </Ledger>
+  )
+}
+
+function Answer({ condition: { answer, answerWords, kept } }: { condition: ConditionView }) {
+  return (
+    <>
+      {answer === 'waiting' || answer === 'refused' ? <b>{answerWords}</b> : answerWords}
+      {kept !== null && <b>{kept === 'kept' ? '. Kept' : '. Broken'}</b>}
+    </>
+  )
+}

@@ -1,0 +1,77 @@
+import { Cell, Head, Ledger, RowHead } from '@/components/ui/ledger'
+import type { FindingView } from '@/lib/views/sheet'
+import { MarginLine } from './margin-figures'
+
+/** What was asked, by whom, what the plan gives, and whether anybody may override it. */
+export function FindingsTable({
+  findings,
+  animalId,
+}: {
+  findings: readonly FindingView[]
+  animalId?: string
+}) {
+  const shown =
+    animalId === undefined
+      ? findings
+      : findings.filter(({ animalIds }) => animalIds.length === 0 || animalIds.includes(animalId))
+  if (shown.length === 0) return <p className="text-mute">Nothing was found against this plan.</p>
+  return (
+    <Ledger caption="Findings, the deciding ones first">
+      <thead>
+        <tr>
+          <Head>No.</Head>
+          <Head>Basis</Head>
+          <Head>Who, leg</Head>
+          <Head>What is asked, where from</Head>
+          <Head>Plan gives</Head>
+          <Head>To spare</Head>
+          <Head>Status</Head>
+        </tr>
+      </thead>
+      <tbody>
+        {shown.map((finding) => (
+          <tr key={finding.number} id={`finding-${finding.number}`}>
+            <RowHead className="font-head text-sub font-bold">{finding.number}</RowHead>
+            <Cell>{finding.basisWords}</Cell>
+            <Cell>{finding.whoLegWords}</Cell>
+            <Cell className="max-w-[34rem]">
+              {finding.asked}
+              {finding.note !== '' && finding.note !== finding.asked && (
+                <span className="block text-small">{finding.note}</span>
+              )}
+              {(finding.citation !== '' || finding.sourceWords !== '') && (
+                <span className="block text-small text-mute">
+                  {[finding.citation, finding.sourceWords].filter(Boolean).join('; ')}
+                </span>
+              )}
+            </Cell>
+            <Cell>{finding.givesWords}</Cell>
+            <Cell>
+              {finding.margin.minutes === null && finding.margin.outsideAirC === null ? (
+                finding.spareWords
+              ) : (
+                <MarginLine margin={finding.margin} />
+              )}
+            </Cell>
+            <Cell attention={finding.status === 'breach'}>
+              <StatusWords finding={finding} />
+            </Cell>
+          </tr>
+        ))}
+      </tbody>
+    </Ledger>
+  )
+}
+
+/** The bold part of the status stands in its place in the sentence. */
+function StatusWords({ finding: { statusWords, statusBold } }: { finding: FindingView }) {
+  const at = statusBold === '' ? -1 : statusWords.indexOf(statusBold)
+  if (at < 0) return statusWords
+  return (
+    <>
+      {statusWords.slice(0, at)}
+      <b>{statusBold}</b>
+      {statusWords.slice(at + statusBold.length)}
+    </>
+  )
+}

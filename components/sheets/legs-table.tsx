@@ -1,0 +1,90 @@
+import { Cell, Head, Ledger, Row, RowHead } from '@/components/ui/ledger'
+import { TemperatureChip } from '@/components/ui/temperature'
+import { PatternSwatch } from '@/components/charts/pattern-swatch'
+import { dayDate, hourMin, localTime } from '@/lib/views/format'
+import type { AnimalView, LegView } from '@/lib/views/sheet'
+import { LegCellFigures } from './margin-figures'
+
+/** Every leg with what it leaves each animal: minutes and outside air first, then the limit that decides, then body. */
+export function LegsTable({
+  legs,
+  animals,
+  outOfDate,
+  chosenLegId,
+  paper = false,
+}: {
+  legs: readonly LegView[]
+  animals: readonly AnimalView[]
+  outOfDate: boolean
+  chosenLegId?: string
+  /** Narrower: the sheet as it prints. */
+  paper?: boolean
+}) {
+  return (
+    <Ledger caption="Legs: in the frame minutes to spare, beside it outside air to spare; below the limit that decides, then body">
+      <thead>
+        <tr>
+          <Head>Leg</Head>
+          <Head>Surroundings</Head>
+          <Head>From, to</Head>
+          <Head numeric>h:min</Head>
+          {animals.map((animal) => (
+            <Head key={animal.animalId}>
+              <span className="crate mr-1.5 text-[1rem] text-ink">{animal.crateLetter}</span>
+              {animal.name}
+            </Head>
+          ))}
+          <Head>{paper ? 'Co.' : 'Conditions'}</Head>
+        </tr>
+      </thead>
+      <tbody>
+        {legs.map((leg) => (
+          <Row key={leg.legId} chosen={leg.legId === chosenLegId}>
+            <RowHead className="font-head text-sub font-bold">{leg.ordinal}</RowHead>
+            <Cell>
+              <span className="flex items-start gap-2.5">
+                <PatternSwatch pattern={leg.pattern} />
+                <span>
+                  {leg.title}
+                  <span className="block text-small text-mute">{leg.airWords}</span>
+                </span>
+                {!paper && leg.airTempC !== null && (
+                  <span className="fig ml-auto text-small">
+                    <TemperatureChip c={leg.airTempC} />
+                  </span>
+                )}
+              </span>
+            </Cell>
+            <Cell className="whitespace-nowrap text-small">
+              <LegTimes leg={leg} />
+            </Cell>
+            <Cell numeric>{hourMin(leg.durationMin)}</Cell>
+            {leg.cells.map((cell) => (
+              <Cell key={cell.animalId}>
+                <LegCellFigures cell={cell} outOfDate={outOfDate} />
+              </Cell>
+            ))}
+            <Cell className="fig text-small">{leg.conditionNumbers.join(', ')}</Cell>
+          </Row>
+        ))}
+      </tbody>
+    </Ledger>
+  )
+}
+
+/** Start and end on the clock of each place; the day where it is another than the start's. */
+function LegTimes({ leg: { start, end } }: { leg: LegView }) {
+  const day = dayDate(start.ms, start.zone)
+  const endDay = dayDate(end.ms, end.zone)
+  return (
+    <>
+      <span className="block">
+        {day} {localTime(start.ms, start.zone)}
+      </span>
+      <span className="block">
+        {endDay === day ? '' : `${endDay} `}
+        {localTime(end.ms, end.zone)}
+      </span>
+    </>
+  )
+}
