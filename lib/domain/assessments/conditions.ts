@@ -53,8 +53,8 @@ export async function writeConditions(
   )
 }
 
-function keyOf({ text, legRef, party }: Pick<Condition, 'text' | 'legRef' | 'party'>): string {
-  return JSON.stringify([text, legRef, party])
+function keyOf({ text, legRef, party }: { text: string; legRef?: string | null; party: string }): string {
+  return JSON.stringify([text, legRef ?? null, party])
 }
 
 /** A condition that counts for the working plan, with the crates it is about; null: all of them. */
@@ -75,7 +75,7 @@ export async function standingConditions(
     order: ['id'],
     transaction: tx ?? null,
   })
-  return rows.flatMap((condition) => {
+  return rows.flatMap((condition): StandingCondition[] => {
     if (condition.origin !== 'vet') return [{ row: condition, crateRefs: null }]
     const crateRefs = approvals
       .filter(({ conditions }) =>

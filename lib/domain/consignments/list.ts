@@ -12,7 +12,7 @@ import { models } from '@/models'
 import type { Consignment } from '@/models'
 import { authorize } from '../authorize'
 import { searchWords } from './board-figures'
-import { consignmentRow } from './consignment-row'
+import { SIGNED_AND_CRATES, consignmentRow } from './consignment-row'
 import { visibleConsignments } from './visible'
 
 /**
@@ -71,20 +71,6 @@ const SORTS: Record<BoardQuery['sort'], Sort> = {
   },
   mark: { column: '`Consignment`.`mark`', emptyLast: false, valueOf: (row) => row.mark },
 }
-
-const SIGNED_AND_CRATES = [
-  [
-    literal(
-      `(SELECT COUNT(DISTINCT signed.crate_ref) FROM approvals AS signed WHERE signed.consignment_id = \`Consignment\`.\`id\`
-        AND signed.plan_hash = \`Consignment\`.\`plan_hash\` AND signed.voided_at IS NULL AND signed.decision <> 'returned')`,
-    ),
-    'signedCount',
-  ],
-  [
-    literal('(SELECT COUNT(*) FROM crates AS boxed WHERE boxed.consignment_id = `Consignment`.`id`)'),
-    'crateCount',
-  ],
-] as const as readonly [ReturnType<typeof literal>, string][]
 
 function filters(query: BoardQuery): WhereOptions<Consignment>[] {
   return [
