@@ -1,4 +1,12 @@
-import { ENGINE_VERSION, type Leg, type ProfileRow, type Scenario, VARIANTS, gather } from '@/lib/thermal'
+import {
+  ENGINE_VERSION,
+  type Leg,
+  type ProfileRow,
+  type Run,
+  type Scenario,
+  VARIANTS,
+  gather,
+} from '@/lib/thermal'
 import { outsideAirMargin } from './air-margin'
 import { type BaseRuns, GO_MARGIN_C, type Side, makeBaseRuns } from './base-runs'
 import { bodyFinding, overrideRefusal } from './body-findings'
@@ -51,14 +59,14 @@ export function* assessSteps(
 ): Steps<Assessment> {
   const prepared = prepare(given, catalogue)
   const runner = createRunner(prepared, shouldStop)
-  const base = yield* makeBaseRuns(prepared, runner)
+  const base = yield* makeBaseRuns(prepared, runner, readsEnclosedAir(prepared.scenario))
   const bodies = yield* bodyFindings(prepared, base, runner)
   const findings = ordered([...bodies, ...planFindings(prepared, base, bodies)], prepared)
   const { stopLimits, endurance } = yield* legFigures(prepared, runner)
   const verdicts = decide(findings, passagesOf(prepared))
   return {
     schema: 'steadfold/result@1',
-    ...gather(reported(base, findings, verdicts.animalVerdicts)),
+    ...gather(yield* reported(base, findings, verdicts.animalVerdicts, runner)),
     schedules: base.schedules,
     rulesVersion: RULES_VERSION,
     inputHash: inputHash({
@@ -175,16 +183,22 @@ function passagesOf({ scenario, subjects }: Prepared): Passage[] {
   }))
 }
 
-/** Tracks kept: on time, and whichever other schedule decides for an animal. */
-function reported(base: BaseRuns, findings: readonly Finding[], decided: readonly { decidedBy?: number }[]) {
-  const scheduleIds = new Set([
-    'on-time',
-    ...decided.flatMap(({ decidedBy }) =>
-      decidedBy === undefined ? [] : [findings[decidedBy]?.scheduleId ?? 'on-time'],
-    ),
-  ])
-  const runs = base.planned.filter(({ scheduleId }) => scheduleIds.has(scheduleId))
-  return [...runs]
-    .sort((a, b) => VARIANTS.indexOf(a.variant) - VARIANTS.indexOf(b.variant))
-    .map(({ run }) => run)
+/** Tracks kept: all variants on time, and on whichever other schedule decides for an animal. */
+function* reported(
+  base: BaseRuns,
+  findings: readonly Finding[],
+  decided: readonly { decidedBy?: number }[],
+  runner: Runner,
+): Steps<Run[]> {
+  const deciding = decided.map(({ decidedBy = -1 }) => findings[decidedBy]?.scheduleId ?? 'on-time')
+  const wanted = new Set(['on-time', ...deciding])
+  const runs: Run[] = []
+  for (const { id: scheduleId } of base.schedules.filter(({ id }) => wanted.has(id)))
+    for (const variant of VARIANTS) runs.push(yield* runner.journey({ scheduleId, variant, tracks: true }))
+  return runs
+}
+
+/** Only the law reads the computed air of a vehicle or hold by the minute. */
+function readsEnclosedAir({ context, legs }: Scenario): boolean {
+  return context !== undefined && legs.some(({ surroundings }) => surroundings.type === 'enclosed')
 }

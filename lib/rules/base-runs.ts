@@ -31,15 +31,21 @@ export const GO_MARGIN_C = 3
 /** The variant that is prone to each side. */
 export const PRONE: Record<Side, Variant> = { high: 'heat-prone', low: 'cold-prone' }
 
-export function* makeBaseRuns(prepared: Prepared, runner: Runner): Steps<BaseRuns> {
+/**
+ * `readsAir`: somebody reads the computed air of enclosed spaces on every schedule, so the prone runs keep their tracks.
+ * On time tracks are always kept.
+ */
+export function* makeBaseRuns(prepared: Prepared, runner: Runner, readsAir: boolean): Steps<BaseRuns> {
   const schedules = schedulesOf(prepared.scenario)
   runner.stage('Typical and prone animals on every schedule', schedules.length * (VARIANTS.length + 2))
   const planned: NamedRun[] = []
   const warmer: NamedRun[] = []
   const colder: NamedRun[] = []
   for (const { id: scheduleId } of schedules) {
-    for (const variant of VARIANTS)
-      planned.push({ scheduleId, variant, run: yield* runner.journey({ scheduleId, variant }) })
+    for (const variant of VARIANTS) {
+      const tracks = scheduleId === 'on-time' || (readsAir && variant !== 'typical')
+      planned.push({ scheduleId, variant, run: yield* runner.journey({ scheduleId, variant, tracks }) })
+    }
     const heat = { scheduleId, variant: PRONE.high, airShiftC: GO_MARGIN_C }
     warmer.push({ scheduleId, variant: PRONE.high, run: yield* runner.journey(heat) })
     const cold = { scheduleId, variant: PRONE.low, airShiftC: -GO_MARGIN_C }

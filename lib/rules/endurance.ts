@@ -1,4 +1,4 @@
-import { type Endured, type Leg, endure, VARIANTS } from '@/lib/thermal'
+import { type EnclosedSpace, type Endured, type Leg, endure, VARIANTS } from '@/lib/thermal'
 import { SPARE_MIN, lengthening, worstScheduleOf } from './minutes-to-spare'
 import type { Endurance, EnduranceKind } from './result'
 import { type Runner, SNAPSHOT_EVERY_MIN, type Steps, extremesOf } from './runner'
@@ -11,12 +11,22 @@ export function* enduranceOf(prepared: Prepared, runner: Runner, legIndex: numbe
   const leg = prepared.scenario.legs[legIndex]
   if (leg === undefined) return []
   const aboard = prepared.subjects.filter((subject) => isAboard(subject, legIndex))
-  const climate = yield* afterFailure(prepared, runner, leg, aboard, 'climate')
-  const ventilation = yield* afterFailure(prepared, runner, leg, aboard, 'ventilation')
   const stays = yield* ifItStays(prepared, runner, leg, aboard)
+  const failures: Endurance[] = []
+  for (const kind of ['climate', 'ventilation'] as const) {
+    const nothingToLose = leg.surroundings.type === 'enclosed' && !hasMachine(leg.surroundings, kind)
+    if (nothingToLose) failures.push(...stays.map((one) => ({ ...one, kind })))
+    else failures.push(...(yield* afterFailure(prepared, runner, leg, aboard, kind)))
+  }
   return aboard.flatMap(({ animal }) =>
-    [climate, ventilation, stays].flatMap((found) => found.filter(({ animalId }) => animalId === animal.id)),
+    [...failures, ...stays].filter(({ animalId }) => animalId === animal.id),
   )
+}
+
+/** Where a space has no such machine, its failure is the leg going on as it is. */
+function hasMachine(space: EnclosedSpace, kind: 'climate' | 'ventilation'): boolean {
+  const own = kind === 'climate' ? space.conditioning !== undefined : (space.ventilationM3h ?? 0) > 0
+  return own || (space.outside.type === 'enclosed' && hasMachine(space.outside, kind))
 }
 
 /** The leg goes on as it is: from any moment on the animal meets its limit at the same minute, so the leg's end is the worst moment. */

@@ -17,6 +17,8 @@ export interface JourneyRun {
   scheduleId: string
   variant: Variant
   airShiftC?: number
+  /** Minute tracks cost as much again as the run itself: asked for only where they are drawn or read. */
+  tracks?: boolean
 }
 
 export interface Runner {
@@ -59,14 +61,16 @@ export function createRunner(prepared: Prepared, shouldStop: () => boolean = () 
   return {
     part,
     count,
-    *journey({ scheduleId, variant, airShiftC = 0 }) {
-      const plain = airShiftC === 0
-      return yield* part(`journey ${scheduleId} ${variant} ${airShiftC}`, prepared.scenario, {
+    *journey({ scheduleId, variant, airShiftC = 0, tracks = false }) {
+      const key = `journey ${scheduleId} ${variant} ${airShiftC}`
+      const tracked = kept.get(`${key} tracked`)
+      if (tracked) return tracked
+      return yield* part(tracks ? `${key} tracked` : key, prepared.scenario, {
         scheduleId,
         variant,
         airShiftC,
-        tracks: plain,
-        ...(plain && { snapshotEveryMin: SNAPSHOT_EVERY_MIN }),
+        tracks,
+        ...(airShiftC === 0 && { snapshotEveryMin: SNAPSHOT_EVERY_MIN }),
       })
     },
     stage(name, expectedRuns) {
