@@ -2,7 +2,6 @@ import { spawn } from 'node:child_process'
 import {
   closeSync,
   existsSync,
-  mkdirSync,
   openSync,
   readFileSync,
   readdirSync,
@@ -23,6 +22,7 @@ import {
   processExists,
   run,
   until,
+  writableFolder,
 } from './run.mjs'
 
 const USUAL_PORT = 33_306
@@ -39,7 +39,7 @@ const STOP_MS = 45_000
 export async function startMariadb(folder, { port } = {}) {
   const files = databaseFiles(folder)
   const programs = await findPrograms()
-  makeFolder(folder)
+  writableFolder(folder)
   if (await answers(files, programs)) return { ...(await describe(files)), files, programs, started: false }
   await clearStaleProcess(files, programs)
   await initialise(files, programs)
@@ -110,19 +110,6 @@ async function findPrograms() {
     )
   }
   return programs
-}
-
-function makeFolder(folder) {
-  try {
-    mkdirSync(folder, { recursive: true, mode: 0o750 })
-    const probe = path.join(folder, '.writable')
-    writeFileSync(probe, '')
-    rmSync(probe)
-  } catch (error) {
-    throw new SetupError(
-      `The data folder ${folder} cannot be written (${error.code}). Give this user the right to it, or set DATA_DIR to another folder.`,
-    )
-  }
 }
 
 /** The only sure sign of a running server: just after a crash its process id may still seem alive. */

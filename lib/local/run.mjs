@@ -1,5 +1,5 @@
 import { spawn } from 'node:child_process'
-import { accessSync, constants } from 'node:fs'
+import { accessSync, constants, mkdirSync, rmSync, writeFileSync } from 'node:fs'
 import { createServer } from 'node:net'
 import path from 'node:path'
 import { setTimeout as wait } from 'node:timers/promises'
@@ -28,6 +28,35 @@ export function endWithUs(child) {
   children.add(child)
   child.once('exit', () => children.delete(child))
   return () => children.delete(child)
+}
+
+/**
+ * Under npm a signal to npm ends npm and its shell, but not us: when the parent is gone, so is the wish that we run.
+ * Does nothing for a process that was started directly.
+ */
+export function whenNpmIsGone(act) {
+  if (!process.env.npm_lifecycle_event) return
+  const parent = process.ppid
+  const watch = setInterval(() => {
+    if (process.ppid === parent) return
+    clearInterval(watch)
+    act()
+  }, 500)
+  watch.unref()
+}
+
+/** Makes a folder if need be and proves that it can be written; says what to do where it cannot. */
+export function writableFolder(folder) {
+  try {
+    mkdirSync(folder, { recursive: true, mode: 0o750 })
+    const probe = path.join(folder, '.writable')
+    writeFileSync(probe, '')
+    rmSync(probe)
+  } catch (error) {
+    throw new SetupError(
+      `The data folder ${folder} cannot be written (${error.code}). Give this user the right to it, or set DATA_DIR to another folder.`,
+    )
+  }
 }
 
 /**

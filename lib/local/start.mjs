@@ -1,11 +1,11 @@
-import { existsSync, mkdirSync, readFileSync, rmSync, writeFileSync } from 'node:fs'
+import { existsSync, readFileSync, rmSync, writeFileSync } from 'node:fs'
 import path from 'node:path'
 import { startApplication } from './application.mjs'
 import { build } from './build.mjs'
 import { startMariadb, stopMariadb } from './mariadb.mjs'
 import { FOR_START, checkNode, ensureNodePackages, ensurePrograms } from './packages.mjs'
 import { dataDir, root } from './paths.mjs'
-import { SetupError, processExists } from './run.mjs'
+import { SetupError, freePort, processExists, whenNpmIsGone, writableFolder } from './run.mjs'
 import { migrateUp, prepareDatabase, runTypescript } from './schema.mjs'
 import { keepSecrets } from './secrets.mjs'
 import { applicationVariables, databaseVariables } from './variables.mjs'
@@ -25,6 +25,7 @@ let stopping
 process.on('SIGINT', () => stopAndExit(0))
 process.on('SIGTERM', () => stopAndExit(0))
 process.on('SIGHUP', () => stopAndExit(0))
+whenNpmIsGone(() => stopAndExit(0))
 
 start().catch(async (error) => {
   console.error(error?.name === 'SetupError' ? `\n${error.message}` : error)
@@ -34,7 +35,7 @@ start().catch(async (error) => {
 async function start() {
   checkNode()
   if (existsSync(path.join(root, '.env'))) process.loadEnvFile(path.join(root, '.env'))
-  mkdirSync(dataDir, { recursive: true })
+  writableFolder(dataDir)
   holdTheOnlyStart()
   const ownDatabase = !process.env.DATABASE_USER
   await ensurePrograms(ownDatabase ? FOR_START : {}, say)
@@ -80,7 +81,6 @@ async function reachGivenDatabase(rest) {
 
 async function startMail() {
   const { startMailFake } = await import('./smtp-fake.mjs')
-  const { freePort } = await import('./run.mjs')
   const mail = await startMailFake({
     folder: path.join(dataDir, 'mail'),
     httpPort: await freePort(MAIL_PAGE_PORT),

@@ -1,4 +1,5 @@
 import { checkNode, FOR_TESTS, ensureNodePackages, ensurePrograms } from './packages.mjs'
+import { whenNpmIsGone } from './run.mjs'
 import { STEPS } from './test-steps.mjs'
 
 /*
@@ -12,6 +13,7 @@ const lines = []
 /** Undoing of what a step has started, for an interrupt in its middle; steps undo their own work otherwise. */
 const undo = new Set()
 for (const signal of ['SIGINT', 'SIGTERM', 'SIGHUP']) process.on(signal, () => interrupted(signal))
+whenNpmIsGone(() => interrupted('npm is gone'))
 
 try {
   const unknown = wanted.find((name) => !STEPS.some((step) => step.name === name))
