@@ -30,8 +30,16 @@ export const cat: Profile = {
     alarmHighC: limitC(40, '1 °C under critical'),
     criticalHighC: limitC(41, 'median lethal 41.7–43.4 °C over six mammals (Adolph 1947)'),
   },
-  airFloorC: judged(0, '°C', 'house backstop: 60 % cold effort of a resting cold-prone cat'),
-  airCeilingC: judged(35, '°C', 'house backstop: the heat-prone cat meets critical within 45 min'),
+  airFloorC: judged(
+    4,
+    '°C',
+    'house backstop for crate air at 50 % relative humidity: the cold-prone cat of 3 kg stands at 60 % cold effort within 45 min',
+  ),
+  airCeilingC: judged(
+    36,
+    '°C',
+    'house backstop for crate air at 50 % relative humidity: the heat-prone cat of 3 kg meets critical within 45 min',
+  ),
   metabolicLine: KLEIBER,
   activityAtRest: judged(1.9, '× line', 'daily low of caged animals: 0.75 of a day mean of 2.57 Kleiber'),
   maxOverBasal: memory(5, '× line', 'summit metabolism 4–5 times basal'),

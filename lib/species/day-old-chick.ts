@@ -22,8 +22,16 @@ export const dayOldChick: Profile = {
     alarmHighC: limitC(41, '1 °C under critical'),
     criticalHighC: limitC(42, 'panting chicks dry out'),
   },
-  airFloorC: judged(16, '°C', 'house backstop for air outside the box; 30–32 °C is the air among the chicks'),
-  airCeilingC: judged(36, '°C', 'house backstop: the heat-prone chick meets critical within 45 min'),
+  airFloorC: judged(
+    25,
+    '°C',
+    'house backstop for crate air at 50 % relative humidity: the cold-prone chick stands at 60 % cold effort within 45 min; air in the box, vans run far cooler',
+  ),
+  airCeilingC: judged(
+    38,
+    '°C',
+    'house backstop for crate air at 50 % relative humidity: the heat-prone chick meets critical within 45 min',
+  ),
   metabolicLine: sourced('chick' as const, '', `fasting 77 kcal/d kg^0.75; ${BOXES}`),
   activityAtRest: sourced(1, '× line', BOXES),
   maxOverBasal: fitted(1.7, '× line', `20 °C against 35 °C; ${BOXES}`),

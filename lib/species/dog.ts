@@ -36,8 +36,16 @@ export const dog: Profile = {
     ),
     criticalHighC: limitC(40.5, 'fatal heat stroke is on record from 41.0 °C in working dogs'),
   },
-  airFloorC: judged(-5, '°C', 'house backstop: 60 % cold effort of a resting 11 kg cold-prone dog'),
-  airCeilingC: judged(34, '°C', 'house backstop: the heat-prone dog meets critical within 45 min'),
+  airFloorC: judged(
+    -3,
+    '°C',
+    'house backstop for crate air at 50 % relative humidity: the cold-prone dog of 11 kg stands at 60 % cold effort within 45 min',
+  ),
+  airCeilingC: judged(
+    37,
+    '°C',
+    'house backstop for crate air at 50 % relative humidity: the heat-prone dog of 11 kg meets critical within 45 min',
+  ),
   metabolicLine: KLEIBER,
   activityAtRest: fitted(2, '× line', TRIALS),
   maxOverBasal: memory(
@@ -81,11 +89,15 @@ export const snubNosedDog: Profile = {
     alarmHighC: limitC(39.4, '0.8 °C under critical'),
     criticalHighC: limitC(40.2, 'under the plain dog: the airway swells with the effort of panting'),
   },
-  airFloorC: judged(-5, '°C', 'as the dog'),
-  airCeilingC: judged(
-    29,
+  airFloorC: judged(
+    -1,
     '°C',
-    'house backstop: the heat-prone snub-nosed dog meets critical within 45 min, rounded down',
+    'house backstop for crate air at 50 % relative humidity: the cold-prone snub-nosed dog of 9 kg stands at 60 % cold effort within 45 min',
+  ),
+  airCeilingC: judged(
+    31,
+    '°C',
+    'house backstop for crate air at 50 % relative humidity: the heat-prone snub-nosed dog of 9 kg meets critical within 45 min',
   ),
   pantingMultiple: judged(3.5, '× breath at rest', 'p_max of snub-nosed dogs 3–5 (from memory)'),
   pantingCost: judged(0.4, '× basal', 'as large as the gain of panting at 30 °C and 50 % allows'),

@@ -30,11 +30,15 @@ export const guineaPig: Profile = {
     criticalHighC: limitC(41, 'median lethal 41.7–43.4 °C over six mammals (Adolph 1947)'),
   },
   airFloorC: judged(
-    15,
+    20,
     '°C',
-    'house backstop; a guinea pig alone and without a nest meets 60 % cold effort below 18 °C',
+    'house backstop for crate air at 50 % relative humidity: the cold-prone guinea pig of 0.8 kg, alone and without a nest, stands at 60 % cold effort within 45 min',
   ),
-  airCeilingC: judged(33, '°C', 'house backstop: the heat-prone guinea pig meets critical within 45 min'),
+  airCeilingC: judged(
+    33,
+    '°C',
+    'house backstop for crate air at 50 % relative humidity: the heat-prone guinea pig of 0.8 kg meets critical within 45 min',
+  ),
   metabolicLine: KLEIBER,
   activityAtRest: judged(1.9, '× line', 'daily low of caged animals: 0.75 of a day mean of 2.57 Kleiber'),
   maxOverBasal: memory(5, '× line', 'summit metabolism 5–7 times basal under 1 kg'),

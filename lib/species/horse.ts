@@ -17,18 +17,22 @@ export const horse: Profile = {
   limits: {
     criticalLowC: limitC(35.5, 'above shivering failure'),
     alarmLowC: limitC(36.8, '1.3 °C above critical'),
-    alarmHighC: limitC(39.2, '0.8 °C under critical'),
+    alarmHighC: limitC(39.5, '1 °C under critical'),
     criticalHighC: limitC(
       40,
       'hard-worked horses are stopped at 41 °C; fatal heat stroke is recorded from 41.5 °C',
     ),
   },
   airFloorC: judged(
-    -15,
+    -20,
     '°C',
-    'house backstop: acclimatised horses hold a thermoneutral zone down to −15 °C',
+    'house backstop for crate air: a clipped or unused horse needs shelter; an animal this large does not meet a limit within 45 min',
   ),
-  airCeilingC: judged(34, '°C', 'house backstop: the heat-prone horse meets critical'),
+  airCeilingC: judged(
+    38,
+    '°C',
+    'house backstop for crate air: under the hottest stable a resting horse is left in; an animal this large does not meet a limit within 45 min',
+  ),
   metabolicLine: memory('farm-horse' as const, '', 'total heat of a housed horse, 6.1 kg^0.75 W, CIGR 2002'),
   activityAtRest: fitted(1.1, '× line', '142 W/m² over 5–25 °C, five horses, Morgan 1997/98'),
   maxOverBasal: memory(2.5, '× line', 'severely cold horses +70 % (Cymbaluk 1994)'),

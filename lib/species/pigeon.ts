@@ -20,11 +20,15 @@ export const pigeon: Profile = {
     alarmHighC: limitC(43, '0.9 °C under critical'),
     criticalHighC: limitC(43.9, 'birds die from about 45.5 °C; at least 0.5 °C under it and well before'),
   },
-  airFloorC: judged(5, '°C', 'house backstop: 60 % cold effort of a resting cold-prone pigeon'),
-  airCeilingC: judged(
-    38,
+  airFloorC: judged(
+    6,
     '°C',
-    'house backstop: the row cools itself far beyond, but crated birds without water do not',
+    'house backstop for crate air at 50 % relative humidity: the cold-prone pigeon of 0.35 kg stands at 60 % cold effort within 45 min',
+  ),
+  airCeilingC: judged(
+    41,
+    '°C',
+    'house backstop for crate air at 50 % relative humidity: the heat-prone pigeon of 0.35 kg meets critical within 45 min',
   ),
   metabolicLine: sourced('bird' as const, '', 'all birds, McKechnie & Wolf 2004'),
   activityAtRest: judged(1.5, '× line', 'awake, crated'),

@@ -29,8 +29,16 @@ export const rabbit: Profile = {
     alarmHighC: limitC(40.2, '0.8 °C under critical'),
     criticalHighC: limitC(41, 'median lethal 41.7–43.4 °C over six mammals (Adolph 1947)'),
   },
-  airFloorC: judged(4, '°C', 'house backstop: 60 % cold effort of a resting cold-prone rabbit'),
-  airCeilingC: judged(33, '°C', 'house backstop: the heat-prone rabbit meets critical within 45 min'),
+  airFloorC: judged(
+    5,
+    '°C',
+    'house backstop for crate air at 50 % relative humidity: the cold-prone rabbit of 2.5 kg stands at 60 % cold effort within 45 min',
+  ),
+  airCeilingC: judged(
+    32,
+    '°C',
+    'house backstop for crate air at 50 % relative humidity: the heat-prone rabbit of 2.5 kg meets critical within 45 min',
+  ),
   metabolicLine: KLEIBER,
   activityAtRest: judged(
     1.9,

@@ -36,17 +36,16 @@ const CONTACT_M2KW = 0.02
 
 /**
  * The heat balance of one animal at one instant: two nodes (core, shell), coat surface solved without a state of its own in two passes
- * that always start from the same films, so that the result depends on the state alone. Writes `body.flux` and `body.drive`.
+ * that always start from the same films, so that the result depends on the state alone. Its states lie in `y` from `at`: core, shell, water
+ * lost, panting so far, water on the coat. Writes `body.flux` and `body.drive`.
  */
-export function evaluateAnimal(
-  body: Body,
-  air: AirAround,
-  coreC: number,
-  shellC: number,
-  lostKg: number,
-  pantingMin: number,
-  coatWaterKgM2: number,
-): void {
+export function evaluateAnimal(body: Body, air: AirAround, y: Float64Array, at: number): void {
+  // Read here rather than passed: numbers handed to a function that is not inlined are boxed, and this is the innermost loop.
+  const coreC = y[at] as number
+  const shellC = y[at + 1] as number
+  const lostKg = y[at + 2] as number
+  const pantingMin = y[at + 3] as number
+  const coatWaterKgM2 = body.coatMayBeWet ? (y[at + 4] as number) : 0
   const { drive, flux, insulation: wrap } = body
   const airC = air.airTempC
   let metabolismW: number
@@ -116,11 +115,11 @@ export function evaluateAnimal(
 
   // Skin.
   const wetted = body.wetBase + body.wetRange * drive.wet
-  const resistance =
-    boundaryResistanceSM(air.rhoCp, filmC) +
-    coatResistanceSM(wrap.coatDepthM * (1 - wrap.bareShare), air.diffusivityM2S)
+  const boundary = boundaryResistanceSM(air.rhoCp, filmC)
+  const throughCoat = boundary + coatResistanceSM(wrap.coatDepthM, air.diffusivityM2S)
+  const perResistance = (1 - wrap.bareShare) / throughCoat + wrap.bareShare / boundary
   const deficit = saturatedVapour(shellC) - air.vapourKgM3
-  const conductanceW = (latent * body.exposedM2 * wetted) / resistance
+  const conductanceW = latent * body.exposedM2 * wetted * perResistance
   const skinW =
     body.sweatCapW > 0 ? skinEvaporationW(conductanceW, deficit, body.sweatCapW) : conductanceW * deficit
 

@@ -93,15 +93,12 @@ const BED_FILM = 4
 /** Long-wave part of the outside film 8.3 + 2.2 u. */
 const OUTSIDE_RADIANT = 5.3
 
-/** Sets flow, films and vapour for the crate's present state; animals are evaluated after it. */
-export function prepareBox(
-  box: Box,
-  outer: Outer,
-  airC: number,
-  wallC: number,
-  bedC: number,
-  waterKgM3: number,
-): void {
+/** Sets flow, films and vapour for the crate's present state (in `y` from `at`); animals are evaluated after it. */
+export function prepareBox(box: Box, outer: Outer, y: Float64Array, at: number): void {
+  const airC = y[at] as number
+  const wallC = y[at + 1] as number
+  const bedC = y[at + 2] as number
+  const waterKgM3 = y[at + 3] as number
   const { air } = box
   box.rhoCp = airHeatJM3K(airC, box.pressureKPa)
   box.flowM3S = ventFlowM3S(box.vent, airC, outer.airTempC, outer.speedMs)
@@ -124,17 +121,13 @@ export function prepareBox(
 }
 
 /** Rates of the crate's own states and what it gives its surroundings; linear in the animals' sums. */
-export function rateBox(
-  box: Box,
-  outer: Outer,
-  sums: BoxSums,
-  airC: number,
-  wallC: number,
-  bedC: number,
-  waterKgM3: number,
-  co2Ppm: number,
-  bedWaterKg: number,
-): void {
+export function rateBox(box: Box, outer: Outer, sums: BoxSums, y: Float64Array, at: number): void {
+  const airC = y[at] as number
+  const wallC = y[at + 1] as number
+  const bedC = y[at + 2] as number
+  const waterKgM3 = y[at + 3] as number
+  const co2Ppm = y[at + 4] as number
+  const bedWaterKg = y[at + 5] as number
   const { rates, flowM3S, rhoCp } = box
   const vapour = vapourOf(waterKgM3, saturatedVapour(airC))
   const toAirW = box.outOfCrate ? 0 : sums.toAirW

@@ -259,6 +259,10 @@ function enterPast({ limits, extremes, memory }: Watch, start: Sample): void {
 function cross(watch: Watch, sample: Sample): void {
   const { limits, extremes, memory, lastCoreC, lastMin } = watch
   if (!limits) return
+  const low = limits.alarmLowC
+  const high = limits.alarmHighC
+  const inside = (coreC: number) => coreC >= low && coreC <= high
+  if (inside(lastCoreC) && inside(sample.coreC)) return
   const minutes = sample.minute - lastMin
   for (const [key, field, side, level] of MARKS) {
     const before = side * (lastCoreC - limits[field])

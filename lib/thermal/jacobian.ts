@@ -41,6 +41,8 @@ export interface JacobianWork {
   f1: Float64Array
   q1: Float64Array
   out0: Float64Array
+  /** A crate's sums without the animal that is moved, and with it moved. */
+  rest: BoxSums
   sums: BoxSums
 }
 
@@ -67,7 +69,8 @@ export function jacobianWork(layout: Layout): JacobianWork {
     f1: vector(),
     q1: integrals(),
     out0: new Float64Array(4 * layout.blocks.length),
-    sums: { toAirW: 0, toWallW: 0, toSurroundW: 0, toFloorW: 0, vapourKgS: 0, co2M3S: 0 },
+    rest: noSums(),
+    sums: noSums(),
   }
 }
 
@@ -79,6 +82,8 @@ const STEP_KG = 1e-6
 const STEP_MIN = 1e-3
 const BOX_STEPS = [STEP_K, STEP_K, STEP_K, STEP_WATER, STEP_PPM, STEP_KG] as const
 const ANIMAL_STEPS = [STEP_K, STEP_K, STEP_KG, STEP_MIN, STEP_KG] as const
+/** CO2 and bedding water first: they are taken with the animals as the unmoved state left them. */
+const BOX_ORDER = [4, 5, 0, 1, 2, 3] as const
 const SPACE_STEPS = [STEP_K, STEP_K, STEP_WATER, STEP_PPM] as const
 
 export function setJacobian(
@@ -114,10 +119,10 @@ function setAnimalColumns(
   rateAnimal(block, slot, work.y)
   const quiet = slot.body.endotherm && slot.body.drive.pant === 0
   const base = block.box.sums
-  const rest = work.sums
-  Object.assign(rest, base)
+  const rest = work.rest
+  const sums = work.sums
+  copySums(rest, base)
   addAnimal(rest, slot, -1)
-  const held = { ...rest }
   for (let v = 0; v < slot.size; v++) {
     const column = slot.at - block.at + v
     if (quiet && (v === 2 || v === 3)) {
@@ -129,11 +134,11 @@ function setAnimalColumns(
     const kept = work.y[slot.at + v] as number
     work.y[slot.at + v] = kept + step
     rateAnimal(block, slot, work.y)
-    Object.assign(rest, held)
-    addAnimal(rest, slot, 1)
+    copySums(sums, rest)
+    addAnimal(sums, slot, 1)
     copyRows(block, work)
     writeAnimal(slot, work.f1, work.q1)
-    rateOwn(model.outer, block, rest, work.y, work.f1, work.q1)
+    rateOwn(model.outer, block, sums, work.y, work.f1, work.q1)
     work.y[slot.at + v] = kept
     storeColumn(model, block, index, into, work, column, step)
   }
@@ -147,7 +152,7 @@ function setBoxColumns(
   work: JacobianWork,
 ): void {
   // CO2 and bedding water move nothing but the crate's own rows.
-  for (const v of [4, 5, 0, 1, 2, 3]) {
+  for (const v of BOX_ORDER) {
     const step = BOX_STEPS[v] as number
     const kept = work.y[block.at + v] as number
     work.y[block.at + v] = kept + step
@@ -161,6 +166,19 @@ function setBoxColumns(
     storeColumn(model, block, index, into, work, v, step)
   }
   clearSums(block.box.sums)
+}
+
+function noSums(): BoxSums {
+  return { toAirW: 0, toWallW: 0, toSurroundW: 0, toFloorW: 0, vapourKgS: 0, co2M3S: 0 }
+}
+
+function copySums(into: BoxSums, from: BoxSums): void {
+  into.toAirW = from.toAirW
+  into.toWallW = from.toWallW
+  into.toSurroundW = from.toSurroundW
+  into.toFloorW = from.toFloorW
+  into.vapourKgS = from.vapourKgS
+  into.co2M3S = from.co2M3S
 }
 
 /** Water and CO2 of the innermost space, and all of a space around it: animals do not feel them within a step's difference. */

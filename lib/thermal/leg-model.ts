@@ -20,8 +20,8 @@ export interface LegModel {
   boundary: Outer
   outer: Outer
   between: Outer
-  /** Moments, ascending, the integrator must stop at: switches and corners of the weather. */
-  stops: number[]
+  /** Moments, ascending, the integrator must stop at. `jump`: a switch, after which it starts small; else a corner of the weather. */
+  stops: { s: number; jump: boolean }[]
   /** True when nothing moves with time: weather steady, nobody excited. */
   steady: boolean
   setTime(s: number): void
@@ -114,15 +114,14 @@ function applySun(built: Built, a: SunRow, b: SunRow, share: number): void {
   if (built.sunlitSpace) built.sunlitSpace.space.sunW = a.spaceW + share * (b.spaceW - a.spaceW)
 }
 
-function stopsOf(built: Built): number[] {
+function stopsOf(built: Built): LegModel['stops'] {
   const { fromS, toS } = built
-  const moments = [
-    ...built.nodes.map((node) => node.s),
-    ...built.switches.flatMap((change) => [change.fromS, change.toS]),
-    ...built.drinks.flatMap((drink) => [drink.fromS, drink.toS]),
-    toS,
-  ]
-  return [...new Set(moments.filter((s) => s > fromS && s <= toS))].sort((a, b) => a - b)
+  const jumps = new Set([...built.switches, ...built.drinks].flatMap((change) => [change.fromS, change.toS]))
+  const moments = new Set([...built.nodes.map((node) => node.s), ...jumps, toS])
+  return [...moments]
+    .filter((s) => s > fromS && s <= toS)
+    .sort((a, b) => a - b)
+    .map((s) => ({ s, jump: jumps.has(s) }))
 }
 
 function setSwitches(built: Built, layout: Layout, s: number, y: Float64Array): void {

@@ -59,22 +59,11 @@ export function rateBlock(
 }
 
 export function prepareBlock(outer: Outer, block: Block, y: Float64Array): void {
-  const { at } = block
-  prepareBox(block.box, outer, y[at] as number, y[at + 1] as number, y[at + 2] as number, y[at + 3] as number)
+  prepareBox(block.box, outer, y, block.at)
 }
 
 export function rateAnimal(block: Block, slot: Slot, y: Float64Array): void {
-  const { at } = slot
-  const coatWater = slot.size > 4 ? (y[at + 4] as number) : 0
-  evaluateAnimal(
-    slot.body,
-    block.box.air,
-    y[at] as number,
-    y[at + 1] as number,
-    y[at + 2] as number,
-    y[at + 3] as number,
-    coatWater,
-  )
+  evaluateAnimal(slot.body, block.box.air, y, slot.at)
 }
 
 export function addAnimal(sums: BoxSums, slot: Slot, sign: number): void {
@@ -113,17 +102,7 @@ export function rateOwn(
   dq: Float64Array,
 ): void {
   const { at, sumsAt, box } = block
-  rateBox(
-    box,
-    outer,
-    sums,
-    y[at] as number,
-    y[at + 1] as number,
-    y[at + 2] as number,
-    y[at + 3] as number,
-    y[at + 4] as number,
-    y[at + 5] as number,
-  )
+  rateBox(box, outer, sums, y, at)
   const { rates } = box
   dy[at] = rates.air
   dy[at + 1] = rates.wall

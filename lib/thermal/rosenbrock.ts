@@ -5,7 +5,7 @@ import type { Block } from './layout'
 import type { LegModel } from './leg-model'
 import { rightHandSide } from './right-hand-side'
 import type { Numerics, StepCounts } from './run'
-import { TABLEAU } from './tableau'
+import { stepRoot, TABLEAU } from './tableau'
 
 /** Both ends of one accepted step, for dense output. Arrays are reused: read, never keep. */
 export interface Step {
@@ -53,9 +53,8 @@ export function integrate(
   const q = integrals()
   const ft = vector()
   const qt = integrals()
-  const fs = vector()
-  const qs = integrals()
   const stage = vector()
+  const qs = integrals()
   const tolerance = tolerances(model, numerics)
   const step: Step = {
     fromS: model.fromS,
@@ -72,11 +71,10 @@ export function integrate(
 
   let s = model.fromS
   let h = FIRST_STEP_S
-  for (const stop of model.stops) {
+  for (const { s: stop, jump } of model.stops) {
     model.setSwitches(s, y)
     rightHandSide(model, s, y, f, q)
     counts.rightHandSides++
-    h = Math.min(h, FIRST_STEP_S)
     while (s < stop) {
       setJacobian(model, s, y, jacobian, work)
       counts.jacobians++
@@ -91,19 +89,22 @@ export function integrate(
         const finite = error >= 0 && error < Infinity
         if (finite && error <= 1) {
           accept(last ? stop : s + tried)
-          const growth = SAFETY / Math.max(1e-3, TABLEAU.root(error))
-          h = tried * Math.min(rejected ? 1 : 6, Math.max(0.2, growth))
+          const growth = SAFETY / Math.max(1e-3, stepRoot(error))
+          const next = tried * Math.min(rejected ? 1 : 6, Math.max(0.2, growth))
+          // A step cut short by a stop says nothing against the longer one it was cut from.
+          h = last && tried < h ? Math.max(h, next) : next
           h = Math.min(h, numerics.maxStepS)
           break
         }
         rejected = true
         counts.rejected++
-        h = tried * (finite ? Math.max(0.1, SAFETY / TABLEAU.root(error)) : 0.1)
+        h = tried * (finite ? Math.max(0.1, SAFETY / stepRoot(error)) : 0.1)
         if (!(h > SHORTEST_STEP_S)) throw stuck(model, s)
       }
       if (!onStep(step)) return s
       if (counts.accepted + counts.rejected > numerics.maxSteps) throw stuck(model, s)
     }
+    if (jump) h = Math.min(h, FIRST_STEP_S)
   }
   return s
 
@@ -123,19 +124,14 @@ export function integrate(
     for (let n = 0; n < stages; n++) {
       const kn = k[n] as Float64Array
       const kqn = kq[n] as Float64Array
-      let rates = f
-      let integralRates = q
       if (n > 0) {
-        if (TABLEAU.evaluates[n]) {
-          combine(stage, y, TABLEAU.a[n] as readonly number[], k, n)
-          rightHandSide(model, s + (TABLEAU.alpha[n] as number) * tried, stage, fs, qs)
-          counts.rightHandSides++
-        }
-        rates = TABLEAU.reuses[n] ? f : fs
-        integralRates = TABLEAU.reuses[n] ? q : qs
+        combine(stage, y, TABLEAU.a[n] as readonly number[], k, n)
+        rightHandSide(model, s + (TABLEAU.alpha[n] as number) * tried, stage, kn, kqn)
+        counts.rightHandSides++
+      } else {
+        kn.set(f)
+        kqn.set(q)
       }
-      kn.set(rates)
-      kqn.set(integralRates)
       const c = TABLEAU.c[n] as readonly number[]
       for (let m = 0; m < n; m++) {
         addScaled(kn, k[m] as Float64Array, (c[m] as number) / tried)
@@ -174,9 +170,8 @@ export function integrate(
   function errorOf(): number {
     let worst = 0
     for (let i = 0; i < size; i++) {
-      let error = 0
-      for (let n = 0; n < stages; n++)
-        error += (TABLEAU.e[n] as number) * ((k[n] as Float64Array)[i] as number)
+      // The embedded solution differs by the last stage alone.
+      const error = (k[stages - 1] as Float64Array)[i] as number
       const scale =
         (tolerance[i] as number) +
         numerics.relTol * Math.max(Math.abs(y[i] as number), Math.abs(stage[i] as number))

@@ -26,9 +26,9 @@ import { writeTracks, type Tracks } from './tracks'
 /** Chosen so that core stays within 0.005 °C and crate air within 0.02 °C of a solution a thousand times tighter. */
 export const NUMERICS: Numerics = {
   relTol: 1e-4,
-  absTolK: 1e-3,
-  absTolKgM3: 1e-6,
-  absTolPpm: 1,
+  absTolK: 2e-3,
+  absTolKgM3: 1e-5,
+  absTolPpm: 5,
   maxStepS: 3600,
   maxSteps: 200_000,
 }

@@ -28,12 +28,15 @@ export function startAnimal(
   const coatKgM2 = coatWaterKgM2(animal?.coat)
   const housingC = Math.min(HOUSING_C[1], Math.max(HOUSING_C[0], inside.airC))
   const housing = { ...around, airTempC: housingC, surfaceTempC: housingC, deckTempC: housingC }
-  prepareBox(box, housing, housingC, housingC, housingC, 0.5 * saturatedVapour(housingC))
+  const crateState = [housingC, housingC, housingC, 0.5 * saturatedVapour(housingC), 420, 0]
+  prepareBox(box, housing, Float64Array.from(crateState), 0)
+  const y = Float64Array.from([coreC, coreC, 0, 0, coatKgM2])
   let low = Math.min(coreC, housingC) - 15
   let high = Math.max(coreC, housingC) + 15
   for (let i = 0; i < 40; i++) {
     const shellC = 0.5 * (low + high)
-    evaluateAnimal(body, box.air, coreC, shellC, 0, 0, coatKgM2)
+    y[1] = shellC
+    evaluateAnimal(body, box.air, y, 0)
     if (body.flux.shellRate > 0) low = shellC
     else high = shellC
   }

@@ -24,6 +24,7 @@ export function writeTracks(
   key: { variant: Variant; scheduleId: string; spacingS: number; flows0: Float64Array; force: boolean },
 ): void {
   const span = step.toS - step.fromS
+  if (step.fromS === model.fromS) meetAtBoundary(tracks, model, step)
   while (tracks.nextS <= step.toS + 1e-6) {
     const x = Math.min(1, Math.max(0, (tracks.nextS - step.fromS) / span))
     writeMoment(tracks, model, step, key, tracks.nextS / 60, x)
@@ -31,6 +32,38 @@ export function writeTracks(
   }
   const written = tracks.nextS - key.spacingS
   if (key.force && written < step.toS - 1e-6) writeMoment(tracks, model, step, key, step.toS / 60, 1)
+}
+
+/**
+ * Heat terms may jump where one leg meets the next (the animals are let out, the pressure falls). The moment in common then carries the
+ * mean of both sides, so that a quadrature over the track still adds up.
+ */
+function meetAtBoundary(tracks: Tracks, model: LegModel, step: Step): void {
+  for (const block of model.layout.blocks) {
+    for (const slot of block.animals) {
+      const track = tracks.animals.get(slot.body.id)
+      const last = track ? track.minutes.length - 1 : -1
+      if (!track || last < 0 || Math.abs((track.minutes[last] as number) * 60 - step.fromS) > 1e-6) continue
+      HEAT_TERMS.forEach((term, n) => {
+        const terms = track.heat[term]
+        const after = n < 5 ? rateIn(step, slot.sumsAt + n, 0) : storageIn(slot, step, 0)
+        terms[last] = 0.5 * ((terms[last] as number) + after)
+      })
+    }
+  }
+}
+
+const HEAT_TERMS = [
+  'metabolismW',
+  'conductionW',
+  'convectionW',
+  'radiationW',
+  'evaporationW',
+  'storageW',
+] as const
+
+function storageIn({ body, at }: Slot, step: Step, x: number): number {
+  return body.coreHeatJK * slopeIn(step, at, x) + body.shellHeatJK * slopeIn(step, at + 1, x)
 }
 
 function writeMoment(
@@ -91,22 +124,12 @@ function writeAnimalTrack(track: AnimalTrack, slot: Slot, step: Step, minute: nu
   const { body, at, sumsAt } = slot
   const coreC = stateIn(step, at, x)
   const errorK = coreC - body.setPointC
-  const metabolismW = rateIn(step, sumsAt, x)
-  const conductionW = rateIn(step, sumsAt + 1, x)
-  const convectionW = rateIn(step, sumsAt + 2, x)
-  const radiationW = rateIn(step, sumsAt + 3, x)
-  const evaporationW = rateIn(step, sumsAt + 4, x)
   track.minutes.push(minute)
   track.coreTempC.push(coreC)
   track.skinTempC.push(stateIn(step, at + 1, x))
-  track.heat.metabolismW.push(metabolismW)
-  track.heat.conductionW.push(conductionW)
-  track.heat.convectionW.push(convectionW)
-  track.heat.radiationW.push(radiationW)
-  track.heat.evaporationW.push(evaporationW)
-  track.heat.storageW.push(
-    body.coreHeatJK * slopeIn(step, at, x) + body.shellHeatJK * slopeIn(step, at + 1, x),
-  )
+  HEAT_TERMS.forEach((term, n) => {
+    track.heat[term].push(n < 5 ? rateIn(step, sumsAt + n, x) : storageIn(slot, step, x))
+  })
   track.waterLossPctMass.push((100 * stateIn(step, at + 2, x)) / body.massKg)
   const { bands } = body
   track.effort.coldPct.push(body.endotherm ? 100 * (1 - smoothstep(bands.cold[0], bands.cold[1], errorK)) : 0)
