@@ -1,8 +1,16 @@
+import type { ReactNode } from 'react'
 import { Cell, Head, Ledger, RowHead } from '@/components/ui/ledger'
 import type { ConditionView } from '@/lib/views/sheet'
 
 /** What must be so for the verdict to hold, of whom it was asked, and what they answered. */
-export function ConditionsTable({ conditions }: { conditions: readonly ConditionView[] }) {
+export function ConditionsTable({
+  conditions,
+  act,
+}: {
+  conditions: readonly ConditionView[]
+  /** What the reader may do with a condition that waits. */
+  act?: (condition: ConditionView) => ReactNode
+}) {
   if (conditions.length === 0) return <p className="text-mute">The verdict rests on no condition.</p>
   return (
     <Ledger caption="Conditions">
@@ -24,6 +32,7 @@ export function ConditionsTable({ conditions }: { conditions: readonly Condition
             <Cell>{condition.askedOf}</Cell>
             <Cell attention={condition.answer === 'refused' || condition.kept === 'broken'}>
               <Answer condition={condition} />
+              {condition.answer === 'waiting' && act && <span className="block">{act(condition)}</span>}
             </Cell>
           </tr>
         ))}

@@ -4,12 +4,13 @@ import { PlanEditor } from '@/components/plan/plan-editor'
 import { Empty } from '@/components/ui/notice'
 import { Page } from '@/components/ui/section'
 import { requireActor } from '@/lib/auth/actor'
-import { planCatalogues } from '@/lib/domain/catalogue/plan-catalogues'
+import { loadPlanEditor } from '@/lib/domain/consignments/load'
 import { FIRM_ZONE } from '@/lib/domain/firm'
 import { emptyPlan } from '@/lib/planning/new-plan'
 import { can } from '@/lib/policies/can'
 import { mayOpen } from '@/lib/policies/routes'
 import { assess, savePlan } from '../actions'
+import { cataloguesOf } from '../catalogues'
 
 export const metadata: Metadata = { title: 'New consignment' }
 export const dynamic = 'force-dynamic'
@@ -17,7 +18,7 @@ export const dynamic = 'force-dynamic'
 export default async function NewConsignmentPage() {
   const actor = await requireActor('/consignments/new')
   if (!mayOpen(actor, '/consignments/new') || !can(actor, 'consignment.create')) notFound()
-  const catalogues = await planCatalogues(actor)
+  const catalogues = cataloguesOf(await loadPlanEditor(actor, { consignmentId: null }))
   const shipper = catalogues.shippers[0]
   return (
     <Page>

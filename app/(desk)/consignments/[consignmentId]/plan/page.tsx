@@ -4,13 +4,13 @@ import { PlanEditor } from '@/components/plan/plan-editor'
 import { Page } from '@/components/ui/section'
 import { VERDICT_WORDS } from '@/components/ui/verdict'
 import { requireActor } from '@/lib/auth/actor'
-import { planCatalogues } from '@/lib/domain/catalogue/plan-catalogues'
-import { openPlan } from '@/lib/domain/consignments/open-plan'
-import type { OpenPlan } from '@/lib/domain/consignments/open-plan'
+import { loadPlanEditor } from '@/lib/domain/consignments/load'
 import { FIRM_ZONE } from '@/lib/domain/firm'
 import { mayOpen } from '@/lib/policies/routes'
 import { STATE_WORDS } from '@/lib/states/consignment'
+import type { ConsignmentRow } from '@/lib/views/consignment-row'
 import { assess, savePlan } from '../../actions'
+import { cataloguesOf } from '../../catalogues'
 import { orNotFound } from '../../or-not-found'
 import { rowId } from '../../row-id'
 
@@ -18,25 +18,29 @@ export const metadata: Metadata = { title: 'Plan' }
 export const dynamic = 'force-dynamic'
 
 export default async function PlanPage({ params }: { params: Promise<{ consignmentId: string }> }) {
-  const { consignmentId } = await params
-  const actor = await requireActor(`/consignments/${consignmentId}/plan`)
+  const id = rowId((await params).consignmentId)
+  const actor = await requireActor(`/consignments/${id}/plan`)
   if (!mayOpen(actor, '/consignments/[consignmentId]/plan')) notFound()
-  const opened = await orNotFound(openPlan(actor, rowId(consignmentId)))
-  if (!opened.editable) redirect(`/consignments/${opened.id}`)
+  const loaded = await orNotFound(loadPlanEditor(actor, { consignmentId: id }))
+  const { consignment, plan } = loaded
+  if (consignment === null || plan === null) notFound()
+  // Who may not save, or whose journey has begun, reads the plan on the consignment's own page.
+  if (!consignment.acts.includes('save')) redirect(`/consignments/${id}`)
+  const { row, version } = consignment
   return (
     <Page>
       <PlanEditor
         consignment={{
-          id: opened.id,
-          mark: opened.mark,
-          revision: opened.revision,
-          version: opened.version,
-          inForceRevision: opened.inForceRevision,
-          stateWords: STATE_WORDS[opened.state],
-          verdictWords: verdictWords(opened),
+          id,
+          mark: row.mark,
+          revision: row.revision,
+          version,
+          inForceRevision: row.inForceRevision,
+          stateWords: STATE_WORDS[row.state],
+          verdictWords: verdictWords(row),
         }}
-        plan={opened.plan}
-        catalogues={await planCatalogues(actor)}
+        plan={plan}
+        catalogues={cataloguesOf(loaded)}
         actions={{ save: savePlan, assess }}
         nowMs={new Date().getTime()}
         zone={FIRM_ZONE}
@@ -45,7 +49,7 @@ export default async function PlanPage({ params }: { params: Promise<{ consignme
   )
 }
 
-function verdictWords({ verdict, outOfDate }: OpenPlan): string {
+function verdictWords({ verdict, outOfDate }: ConsignmentRow): string {
   if (verdict === null) return 'Not assessed'
   return outOfDate ? `Out of date, was ${VERDICT_WORDS[verdict]}` : VERDICT_WORDS[verdict]
 }

@@ -1,0 +1,31 @@
+import type { ConsignmentState } from '@/lib/states/consignment'
+import type { DeskAct } from './status-view'
+
+/** The act that moves a consignment on from its state; null where the move is somebody else's. */
+export function mainAct(
+  state: ConsignmentState,
+  acts: readonly DeskAct[],
+  needsAssessment: boolean,
+): DeskAct | null {
+  const next = nextOf(state, needsAssessment)
+  return next !== null && acts.includes(next) ? next : null
+}
+
+function nextOf(state: ConsignmentState, needsAssessment: boolean): DeskAct | null {
+  switch (state) {
+    case 'draft':
+    case 'returned':
+      return 'assess'
+    case 'assessed':
+      return needsAssessment ? 'assess' : 'submit'
+    case 'approved':
+      return 'release'
+    case 'in_review':
+    case 'released':
+    case 'under_way':
+    case 'delivered':
+    case 'stopped':
+    case 'cancelled':
+      return null
+  }
+}
