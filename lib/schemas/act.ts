@@ -46,6 +46,11 @@ export const conditionAnswerSchema = z.object({
 export type ConditionAnswerInput = z.infer<typeof conditionAnswerSchema>
 
 export const askChangeSchema = consignmentActSchema.extend({
-  change: requiredText('What should change', 1_000),
+  subject: requiredText('What it is about', 120),
+  text: requiredText('What should change', 2_000),
 })
 export type AskChange = z.infer<typeof askChangeSchema>
+
+/** A shipper has read the manifest. */
+export const acknowledgeSchema = z.object({ documentId: rowId, requestId })
+export type AcknowledgeDocument = z.infer<typeof acknowledgeSchema>

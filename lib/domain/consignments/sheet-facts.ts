@@ -7,7 +7,6 @@ import type { Approval, Assessment as AssessmentRow, Consignment } from '@/model
 import type { StandingCondition } from '../assessments/conditions'
 import { standingConditions } from '../assessments/conditions'
 import { readResult } from '../assessments/read-result'
-import type { AssessmentResult } from '../assessments/read-result'
 import { readTracks } from '../assessments/tracks'
 import { planningKnowledge } from '../catalogue/knowledge'
 import type { ProfileInForce } from '@/lib/planning/reasons'

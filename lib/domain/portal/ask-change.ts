@@ -1,0 +1,62 @@
+import 'server-only'
+import { env } from '@/lib/env'
+import { SteadfoldError } from '@/lib/errors'
+import { enqueue } from '@/lib/mail/outbox'
+import type { Actor } from '@/lib/policies/actor'
+import type { AskChange } from '@/lib/schemas/act'
+import { models } from '@/models'
+import { act } from '../act'
+import type { Done } from '../act'
+import { authorize } from '../authorize'
+import { findConsignment } from '../consignments/visible'
+
+/** A shipper asks the desk for a change: kept with the consignment, and mailed to the desk. */
+export function askChange(actor: Actor, input: AskChange, now: Date): Promise<{ requestId: number }> {
+  const { consignmentId, requestId, subject, text } = input
+  const about = { type: 'consignment', id: consignmentId, consignmentId } as const
+  return act(
+    { actor, verb: 'consignment.ask-change', requestId, now, about },
+    async (tx): Promise<Done<{ requestId: number }>> => {
+      const { row, facts } = await findConsignment(actor, consignmentId, { tx, lock: true })
+      authorize(actor, 'consignment.ask-change', facts)
+      const state = row.inForceState ?? row.state
+      if (state === 'delivered' || state === 'stopped' || state === 'cancelled') {
+        throw new SteadfoldError('wrong_state', 'This consignment is closed: ring the desk.')
+      }
+      const revision = row.inForceRevision ?? row.revision
+      const asked = await models.ChangeRequest.create(
+        { consignmentId, revision, userId: actor.id, subject, text, at: now },
+        { transaction: tx },
+      )
+      const lines = [
+        `${actor.name} asks for a change of ${row.mark}, revision ${revision}.`,
+        subject,
+        text,
+        `${env().appUrl}/consignments/${row.id}`,
+      ]
+      await enqueue(
+        tx,
+        {
+          to: deskAddress(),
+          subject: `${row.mark}: change asked for, ${subject}`,
+          text: lines.join('\n\n'),
+          html: lines.map((line) => `<p>${escaped(line)}</p>`).join('\n'),
+          consignmentId,
+          dedupeKey: `change-request:${asked.id}`,
+        },
+        now,
+      )
+      return { result: { requestId: asked.id }, after: { subject, revision } }
+    },
+  )
+}
+
+/** The desk reads the address that mails come from. */
+function deskAddress(): string {
+  const { mailFrom } = env()
+  return /<([^>]+)>/.exec(mailFrom)?.[1] ?? mailFrom
+}
+
+function escaped(text: string): string {
+  return text.replace(/&/g, '&amp;').replace(/</g, '&lt;').replace(/>/g, '&gt;').replace(/\n/g, '<br>')
+}
