@@ -42,7 +42,7 @@ export function Section({
         <h2 id={id ? `${id}-title` : undefined} className="text-section">
           {title}
         </h2>
-        {words && <p className="text-small text-mute">{words}</p>}
+        {words && <p className="text-small text-mute max-desk:order-last max-desk:w-full">{words}</p>}
         {acts && <div className="ml-auto flex flex-wrap items-center gap-3 no-print">{acts}</div>}
       </div>
       {children}

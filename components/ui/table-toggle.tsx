@@ -22,7 +22,7 @@ export function TableToggle({
     <>
       <div className="mb-2.5 flex flex-wrap items-baseline gap-x-4 gap-y-1">
         <h2 className="text-section">{title}</h2>
-        {words && <p className="text-small text-mute">{words}</p>}
+        {words && <p className="text-small text-mute max-desk:order-last max-desk:w-full">{words}</p>}
         <div className="ml-auto flex items-center gap-4 no-print">
           {acts}
           <button

@@ -38,7 +38,7 @@ export function TemperatureChip({ c }: { c: number }) {
     <span className="whitespace-nowrap">
       <span
         aria-hidden="true"
-        className={`keep-ink mr-[5px] inline-block size-[11px] border border-rule align-[-1px] ${RAMP_CLASS[rampStep(c)]}`}
+        className={`keep-ink mr-[5px] inline-block size-[11px] border border-rule align-[-1px] ${RAMP_CLASS[rampStep(Math.round(c))]}`}
       />
       <Temperature c={c} kind="air" />
     </span>

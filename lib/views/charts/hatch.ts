@@ -60,8 +60,8 @@ const DRAW: Record<SurroundingsPattern, (box: Box, scale: number) => string> = {
   rest: straws,
 }
 
-/** x + y = k · step. */
-function falling(box: Box, step: number): string {
+/** Lines x + y = k · step, cut by the box: the van's pattern, and what is blocked in a crate. */
+export function falling(box: Box, step: number): string {
   const right = box.x + box.width
   const foot = box.y + box.height
   return multiples(box.x + box.y, right + foot, step)

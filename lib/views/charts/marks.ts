@@ -81,8 +81,8 @@ export function rect(box: Box, look: Look): RectMark {
     kind: 'rect',
     x: coord(box.x),
     y: coord(box.y),
-    width: coord(box.width),
-    height: coord(box.height),
+    width: coord(Math.max(0, box.width)),
+    height: coord(Math.max(0, box.height)),
     ...look,
   }
 }
