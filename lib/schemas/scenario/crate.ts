@@ -146,7 +146,7 @@ export const crateSchema = plainCrateSchema.superRefine((crate, context) => {
       path: ['wall'],
       message: 'Walls are missing: a crate in air needs them.',
     })
-  if (crate.form === 'crate' && crate.openings.length === 0)
+  if (crate.form === 'crate' && crate.openings.length === 0 && !isOpenWall(crate))
     context.addIssue({
       code: 'custom',
       path: ['openings'],
@@ -154,6 +154,11 @@ export const crateSchema = plainCrateSchema.superRefine((crate, context) => {
     })
   for (const face of FACES) checkFace(crate, face, context)
 })
+
+/** Mesh walls are open all over and need no opening besides. */
+function isOpenWall({ wall }: PlainCrate) {
+  return wall?.material === 'metal-mesh' || (wall?.openPct ?? 0) > 0
+}
 
 type PlainCrate = z.output<typeof plainCrateSchema>
 
