@@ -1,4 +1,3 @@
-import { mkdirSync } from 'node:fs'
 import path from 'node:path'
 import { bundleWorker } from './build.mjs'
 import { root } from './paths.mjs'
@@ -9,19 +8,25 @@ const HEALTHY_WITHIN_MS = 120_000
 /** Falling this often in a row before it was ever healthy means it cannot start at all. */
 const HOPELESS = 3
 
+/** Ends what a killed start has left over, then makes sure of the port, before anything slow is begun. */
+export async function clearTheWay({ folder, host, port }) {
+  await processesOf(folder).endLeftovers()
+  if (await portIsFree(port, host)) return
+  throw new SetupError(
+    `Port ${port} is in use by another program. Free it, or choose another: PORT=${port + 1} npm start`,
+  )
+}
+
+function processesOf(folder) {
+  return processNote(path.join(folder, 'processes.json'), `STEADFOLD_FOLDER=${folder}`)
+}
+
 /**
  * Starts the web server and the worker and keeps both alive. The application must be built, and its database ready.
  * `healthy` resolves once the web server answers; `stop` ends both.
  */
 export async function startApplication({ folder, host, port, variables, dev = false, say }) {
-  mkdirSync(folder, { recursive: true })
-  const note = processNote(path.join(folder, 'processes.json'), `STEADFOLD_FOLDER=${folder}`)
-  await note.endLeftovers()
-  if (!(await portIsFree(port, host))) {
-    throw new SetupError(
-      `Port ${port} is in use by another program. Free it, or choose another: PORT=${port + 1} npm start`,
-    )
-  }
+  const note = processesOf(folder)
   const env = {
     ...process.env,
     ...variables,

@@ -1,6 +1,6 @@
 import { existsSync, readFileSync, rmSync, writeFileSync } from 'node:fs'
 import path from 'node:path'
-import { startApplication } from './application.mjs'
+import { clearTheWay, startApplication } from './application.mjs'
 import { build } from './build.mjs'
 import { startMariadb, stopMariadb } from './mariadb.mjs'
 import { FOR_START, checkNode, ensureNodePackages, ensurePrograms } from './packages.mjs'
@@ -37,11 +37,13 @@ async function start() {
   if (existsSync(path.join(root, '.env'))) process.loadEnvFile(path.join(root, '.env'))
   writableFolder(dataDir)
   holdTheOnlyStart()
+  const host = process.env.HOST || '127.0.0.1'
+  const port = Number(process.env.PORT || 3000)
+  await clearTheWay({ folder: dataDir, host, port })
   const ownDatabase = !process.env.DATABASE_USER
   await ensurePrograms(ownDatabase ? FOR_START : {}, say)
   await ensureNodePackages(say)
   const secrets = keepSecrets(dataDir)
-  const port = Number(process.env.PORT || 3000)
   const mail = process.env.SMTP_URL ? undefined : await startMail()
   const rest = applicationVariables({ folder: dataDir, port, secrets, smtpUrl: mail?.smtpUrl })
   const { variables, signIns } = ownDatabase
@@ -49,7 +51,6 @@ async function start() {
     : await reachGivenDatabase(rest)
   if (!dev) await build(say)
   say(dev ? 'Starting in development …' : 'Starting …')
-  const host = process.env.HOST || '127.0.0.1'
   const application = await startApplication({ folder: dataDir, host, port, variables, dev, say: relay })
   started.push(application)
   await application.healthy()
