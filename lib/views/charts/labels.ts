@@ -180,7 +180,7 @@ export function clearOfTracks(
 }
 
 /** What a label would lie on: a limit's line costs a little, a track's line much, because that is the fact itself. */
-function hiding(
+export function hiding(
   time: TimeFrame,
   temp: TempFrame,
   box: Box,
