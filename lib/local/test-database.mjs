@@ -23,7 +23,7 @@ export async function makeTestDatabase(name = `steadfold_test_${process.pid}`, {
   const secrets = keepSecrets(testDataDir)
   // The server may be stopped by another run only while no run has a database: both happen under the lock.
   const server = await exclusively(async () => {
-    const running = await startMariadb(testDataDir)
+    const running = await startMariadb(testDataDir, { forTests: true })
     if (running.started) writeFileSync(borrowed, '')
     await dropLeftovers(running)
     await dropDatabase(running, name)
@@ -53,7 +53,7 @@ export async function makeTestDatabase(name = `steadfold_test_${process.pid}`, {
 /** Starts the tests' server for a whole `npm test`; the returned function stops it. */
 export async function holdTestServer() {
   const server = await exclusively(async () => {
-    const running = await startMariadb(testDataDir)
+    const running = await startMariadb(testDataDir, { forTests: true })
     rmSync(borrowed, { force: true })
     return running
   })

@@ -1,4 +1,5 @@
-import { beforeEach } from 'vitest'
+import type { Sequelize } from 'sequelize'
+import { afterAll, beforeEach } from 'vitest'
 import { createDatabase } from '@/lib/db/connection'
 import { env } from '@/lib/env'
 import { models } from '@/models'
@@ -35,16 +36,19 @@ export async function emptyTables(): Promise<void> {
   })
 }
 
+let owner: Sequelize | undefined
+
+afterAll(async () => {
+  await owner?.close()
+  owner = undefined
+})
+
 /** Runs SQL as the owner of the schema: to look behind the application's rights, or to break something on purpose. */
-export async function asOwner<T>(work: (owner: ReturnType<typeof createDatabase>) => Promise<T>): Promise<T> {
-  const owner = createDatabase(() => ({
+export async function asOwner<T>(work: (owner: Sequelize) => Promise<T>): Promise<T> {
+  owner ??= createDatabase(() => ({
     ...env().database,
     user: process.env.DATABASE_MIGRATE_USER ?? '',
     password: process.env.DATABASE_MIGRATE_PASSWORD ?? '',
   }))
-  try {
-    return await work(owner)
-  } finally {
-    await owner.close()
-  }
+  return work(owner)
 }
