@@ -1,0 +1,66 @@
+import { execFile } from 'node:child_process'
+import { mkdtempSync, writeFileSync } from 'node:fs'
+import { tmpdir } from 'node:os'
+import path from 'node:path'
+import { fileURLToPath } from 'node:url'
+import { describe, expect, it } from 'vitest'
+import type { Assessment } from '@/lib/rules/result'
+import { beagle, crateOf, legOf, roomAt, scenarioOf } from './support/worlds'
+
+const root = path.resolve(path.dirname(fileURLToPath(import.meta.url)), '../..')
+const folder = mkdtempSync(path.join(tmpdir(), 'steadfold-simulate-'))
+
+function file(name: string, content: unknown): string {
+  const target = path.join(folder, name)
+  writeFileSync(target, typeof content === 'string' ? content : JSON.stringify(content))
+  return target
+}
+
+/** The command as package.json declares it, with everything it wrote. */
+function simulate(...args: string[]): Promise<{ code: number; stdout: string }> {
+  return new Promise((resolve) => {
+    execFile(
+      'npm',
+      ['run', '--silent', 'simulate', '--', ...args],
+      { cwd: root, maxBuffer: 64 * 1024 * 1024 },
+      (error, stdout) => resolve({ code: error === null ? 0 : Number(error.code), stdout }),
+    )
+  })
+}
+
+const scenario = scenarioOf({
+  legs: [legOf('road', { durationMin: 30, surroundings: roomAt(18) })],
+  crates: [crateOf('a', [beagle('bess')])],
+})
+
+describe('npm run simulate', () => {
+  it('prints the assessment, and nothing else, and exits 0', async () => {
+    const { code, stdout } = await simulate(file('good.json', scenario))
+    const result = JSON.parse(stdout) as Assessment
+    expect(code).toBe(0)
+    expect(result.schema).toBe('steadfold/result@1')
+    expect(result.verdict.verdict).toBe('go')
+    expect(stdout.trimEnd().split('\n')).toHaveLength(1)
+  }, 60_000)
+
+  it.each<[string, string[], string]>([
+    ['a scenario with faults', [file('bad.json', { ...scenario, legs: [] })], 'legs'],
+    ['a file that is not JSON', [file('text.json', 'a text')], ''],
+    ['a file that is not there', [path.join(folder, 'none.json')], ''],
+    ['no file', [], ''],
+    ['an ensemble, which cannot be run yet', [file('again.json', scenario), '--members', '300'], '--members'],
+  ])(
+    '%s exits 2 and says where',
+    async (_, args, at) => {
+      const { code, stdout } = await simulate(...args)
+      const { error } = JSON.parse(stdout) as {
+        error: { code: string; issues: { path: string; message: string }[] }
+      }
+      expect(code).toBe(2)
+      expect(error.code).toBe('invalid_scenario')
+      expect(error.issues[0]?.path).toBe(at)
+      expect(error.issues[0]?.message.length).toBeGreaterThan(5)
+    },
+    60_000,
+  )
+})
