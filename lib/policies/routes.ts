@@ -39,10 +39,12 @@ export const ROUTE_POLICIES = {
   '/admin/places': ['admin'],
   '/admin/mail': ['admin'],
   '/admin/audit': ['admin'],
+  '/admin/certificate': ['admin'],
 
   '/api/auth/[...nextauth]': 'public',
   '/api/health': 'public',
   '/api/verify': 'public',
+  '/api/review': ['vet'],
   '/api/consignments': DESK,
   '/api/consignments/[consignmentId]/status': DESK,
   '/api/documents/[documentId]/pdf': 'signed-in',
