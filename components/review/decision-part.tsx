@@ -8,6 +8,7 @@ import { ErrorSummary } from '@/components/ui/error-summary'
 import { Notice } from '@/components/ui/notice'
 import type { ReviewView } from '@/lib/views/review'
 import type { FindingView } from '@/lib/views/sheet'
+import { isBreach } from './override-words'
 import { chosenOverrides } from './review-form-schema'
 import type { ReviewForm } from './review-form-schema'
 import type { ReviewFormState } from './review-desk'
@@ -39,7 +40,7 @@ export function DecisionPart({
     )
   const overridden = chosenOverrides(values, all).filter(({ finding }) => findings.includes(finding))
   const open = findings.filter(
-    (finding) => finding.status === 'breach' && !overridden.some((one) => one.finding === finding),
+    (finding) => isBreach(finding) && !overridden.some((one) => one.finding === finding),
   )
   const withConditions =
     overridden.length > 0 || values.conditions.length > 0 || view.sheet.conditions.length > 0

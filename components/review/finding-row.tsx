@@ -6,7 +6,7 @@ import { Tick } from '@/components/forms/ticks'
 import { Cell } from '@/components/ui/ledger'
 import { join } from '@/components/ui/join'
 import type { FindingView } from '@/lib/views/sheet'
-import { whyNotOverridable } from './override-words'
+import { isBreach, whyNotOverridable } from './override-words'
 import type { ReviewFormState } from './review-desk'
 
 /** One finding: with a violet box where a vet may override it, and in words why not where nobody may. */
@@ -22,7 +22,7 @@ export function FindingRow({
   closed: boolean
 }) {
   const on = useWatch({ control: form.form.control, name: `overrides.${index}.on` }) === true
-  const fixed = whyNotOverridable(finding)
+  const fixed = whyNotOverridable(finding, closed)
   const chosen = join(on && 'bg-handwash', on && '[&>td:first-child]:shadow-[inset_4px_0_0_var(--hand)]')
   return (
     <>
@@ -37,7 +37,9 @@ export function FindingRow({
               {...form.field(`overrides.${index}.on`)}
               label={
                 <>
-                  I override this finding
+                  {finding.status === 'overridden'
+                    ? 'I override this finding too'
+                    : 'I override this finding'}
                   <span className="sr-only">: {finding.asked}</span>
                 </>
               }
@@ -53,7 +55,7 @@ export function FindingRow({
           </span>
         </Cell>
         <Cell className="whitespace-nowrap align-top">{finding.givesWords}</Cell>
-        <Cell numeric className={join('align-top', finding.status === 'breach' && 'font-semibold')}>
+        <Cell numeric className={join('align-top', isBreach(finding) && 'font-semibold')}>
           {finding.spareWords.split(', ').map((part) => (
             <span key={part} className="block">
               {part}

@@ -38,7 +38,7 @@ export function ReviewDesk({
 }) {
   const { sheet, chosen, crates } = view
   const { findings } = sheet
-  const subject = { consignmentId: sheet.consignmentId, planHash: sheet.planHash, findings, crates }
+  const subject = { consignmentId: sheet.consignmentId, planHash: sheet.planHash, findings, coverage: view }
   // A refused attempt keeps its number: if the answer was lost on the way, the second press gets it.
   const [request] = useState(requestId)
   const state = useActionForm<ReviewForm, ReviewForm, unknown>({
@@ -59,7 +59,7 @@ export function ReviewDesk({
   })
 
   const crateIds = useWatch({ control: state.form.control, name: 'crateIds' })
-  const covered = coveredFindings(findings, crates, crateIds)
+  const covered = coveredFindings(findings, view, crateIds)
 
   return (
     <form

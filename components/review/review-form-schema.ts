@@ -2,9 +2,9 @@ import { z } from 'zod'
 import { overrideSchema, vetConditionSchema } from '@/lib/schemas/approval'
 import type { ApproveCrates, ReturnCrates } from '@/lib/schemas/approval'
 import { itemId } from '@/lib/schemas/act'
-import type { ReviewCrate } from '@/lib/views/review'
 import type { FindingView } from '@/lib/views/sheet'
-import { coveredFindings } from './override-words'
+import { concernedIndexes } from './override-words'
+import type { Coverage } from './override-words'
 
 export const DECISIONS = ['approve', 'return'] as const
 export type Decision = (typeof DECISIONS)[number]
@@ -48,12 +48,11 @@ export interface ReviewSubject {
   consignmentId: number
   planHash: string
   findings: readonly FindingView[]
-  crates: readonly ReviewCrate[]
+  coverage: Coverage
 }
 
 /** What the approve verb takes: a row that speaks of several findings overrides each of them for the same reason. */
 export function approvalOf(values: ReviewForm, subject: ReviewSubject, requestId: string): ApproveCrates {
-  const covered = coveredFindings(subject.findings, subject.crates, values.crateIds)
   return {
     consignmentId: subject.consignmentId,
     requestId,
@@ -62,9 +61,12 @@ export function approvalOf(values: ReviewForm, subject: ReviewSubject, requestId
     password: values.password,
     examined: values.examined === 'yes',
     conditions: values.conditions.map((row) => ({ ...row, legId: row.legId === '' ? null : row.legId })),
-    overrides: chosenOverrides(values, subject.findings)
-      .filter(({ finding }) => covered.includes(finding))
-      .flatMap(({ finding, reason }) => finding.indexes.map((findingIndex) => ({ findingIndex, reason }))),
+    overrides: chosenOverrides(values, subject.findings).flatMap(({ finding, reason }) =>
+      concernedIndexes(finding, subject.coverage, values.crateIds).map((findingIndex) => ({
+        findingIndex,
+        reason,
+      })),
+    ),
   }
 }
 

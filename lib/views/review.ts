@@ -21,6 +21,8 @@ export interface ReviewView {
   sheet: SheetView
   crates: ReviewCrate[]
   chosen: ReviewCrate
+  /** By a finding's index: what it is about. A signature overrides only what concerns the crates it covers. */
+  subjects: FindingSubject[]
   signer: SignerView
   /** Decisions in force on this plan, newest first. */
   signed: SignedApproval[]
@@ -28,6 +30,12 @@ export interface ReviewView {
   voided: SignedApproval[]
   /** Why no decision can be taken now; empty where it can. */
   closedWords: string
+}
+
+/** The crate or the animal a finding speaks of; both null: all. */
+export interface FindingSubject {
+  crateId: string | null
+  animalId: string | null
 }
 
 export interface ReviewCrate {

@@ -28,7 +28,7 @@ export interface DecisionFact {
 
 export interface ReviewFacts {
   sheet: SheetFacts
-  /** The crate to open; one that is not in the plan opens the first that waits. */
+  /** The crate to open, by id or letter; one that is not in the plan opens the first that waits. */
   chosenCrateId: string | null
   signer: SignerView
   decisions: readonly DecisionFact[]
@@ -52,7 +52,7 @@ export function buildReviewView(facts: ReviewFacts): ReviewView | null {
     }
   })
   const chosen =
-    crates.find(({ crateId }) => crateId === facts.chosenCrateId) ??
+    crates.find(({ crateId, letter }) => [crateId, letter].includes(facts.chosenCrateId ?? '')) ??
     crates.find(({ decision }) => decision === 'waiting') ??
     crates[0]
   if (chosen === undefined) return null
@@ -61,6 +61,10 @@ export function buildReviewView(facts: ReviewFacts): ReviewView | null {
     sheet,
     crates,
     chosen,
+    subjects: (facts.sheet.assessment?.result.findings ?? []).map(({ crateId, animalId }) => ({
+      crateId: crateId ?? null,
+      animalId: animalId ?? null,
+    })),
     signer: facts.signer,
     signed: newestFirst(approvals.filter(({ voidedAt }) => voidedAt === null)),
     voided: newestFirst(approvals.filter(({ voidedAt }) => voidedAt !== null)),

@@ -1,0 +1,47 @@
+import { BoxedFacts, Fact } from '@/components/ui/boxed-facts'
+import { Mark } from '@/components/ui/mark'
+import { Stamp } from '@/components/ui/stamp'
+import { dayTime, duration } from '@/lib/views/format'
+import type { ReviewView } from '@/lib/views/review'
+
+/** Which crate, which animals, which journey, and the verdict with this set-up. */
+export function ReviewHead({ view }: { view: ReviewView }) {
+  const { chosen, sheet } = view
+  return (
+    <BoxedFacts columns="auto minmax(9rem,1fr) minmax(9rem,1fr) minmax(15rem,1.6fr)">
+      <Fact caption="Crate" whole>
+        <Mark size="l">{chosen.mark}</Mark>
+      </Fact>
+      <Fact caption={chosen.animals.length === 1 ? 'Animal' : 'Animals'} whole>
+        {chosen.animals.length === 0 && 'none'}
+        {chosen.animals.map((animal) => (
+          <span key={animal.animalId} className="block">
+            <b>{animal.name}</b>, {animal.describes}
+            {animal.flagWords !== 'None' && (
+              <span className="block text-small text-mute">{animal.flagWords}</span>
+            )}
+          </span>
+        ))}
+      </Fact>
+      <Fact caption="Journey" whole>
+        {sheet.from} to {sheet.to}
+        <span className="block text-small text-mute">
+          leaves {dayTime(sheet.leaves.ms, sheet.leaves.zone)}, {duration(sheet.journeyMin)}
+        </span>
+      </Fact>
+      <Fact caption={`Verdict with this set-up, revision ${sheet.revision}`} whole>
+        <span className="mt-0.5 flex flex-wrap items-center gap-x-3 gap-y-1">
+          <Stamp {...chosen.stamp} size="m" />
+          <span className="min-w-[9rem] flex-1">
+            {chosen.animals.map((animal) => (
+              <span key={animal.animalId} className="block">
+                <b>{animal.decidedWords}</b>
+                <span className="block text-small text-mute">{animal.trackWords}</span>
+              </span>
+            ))}
+          </span>
+        </span>
+      </Fact>
+    </BoxedFacts>
+  )
+}
