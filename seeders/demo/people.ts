@@ -5,21 +5,21 @@ export const DEMO_PASSWORD = 'lichen-and-zinc-7'
 
 export const DEMO_SHIPPERS = [
   {
-    accountNumber: '0412',
+    accountNo: '0412',
     name: 'Strand-Ekdahl family',
     email: 'j.strand@example.org',
     telephone: '+44 7700 900562',
     address: '11 Quarry Loan, Balfron, Stirlingshire',
   },
   {
-    accountNumber: '0431',
+    accountNo: '0431',
     name: 'Ferrand-Ito Animal Moves',
     email: 'desk@ferrand-ito.example',
     telephone: '+44 7700 900633',
     address: '4 Weir Yard, Peebles',
   },
   {
-    accountNumber: '0457',
+    accountNo: '0457',
     name: 'Thornfield Hatchery',
     email: 'office@thornfield-hatchery.example',
     telephone: '+44 7700 900277',
@@ -58,7 +58,7 @@ export const DEMO_PEOPLE: readonly DemoPerson[] = [
     email: 'sunniva@corran.example',
     role: 'vet',
     telephone: '+44 7700 900418',
-    registration: { number: 'VR 40 817', country: 'United Kingdom' },
+    registration: { number: 'VR 40 817', country: 'GB' },
   },
   {
     key: 'driver',

@@ -1,5 +1,5 @@
 import 'server-only'
-import { Op } from 'sequelize'
+import { literal, Op } from 'sequelize'
 import type { Transaction } from 'sequelize'
 import { isDuplicate, transaction } from '@/lib/db/transaction'
 import { models } from '@/models'
@@ -70,6 +70,14 @@ export async function heartbeat(
     { where: { id: jobId, state: 'running', leasedBy: worker } },
   )
   return count === 1
+}
+
+/** Puts a job back untouched because its worker must go: it is due at once, and the attempt does not count. */
+export async function giveBack(jobId: number, worker: string, now: Date): Promise<void> {
+  await models.Job.update(
+    { state: 'queued', runAfter: now, leaseUntil: null, leasedBy: null, attempts: literal('attempts - 1') },
+    { where: { id: jobId, state: 'running', leasedBy: worker } },
+  )
 }
 
 /** Ends a job that is done. False: another worker had taken it over. */

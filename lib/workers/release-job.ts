@@ -1,0 +1,81 @@
+import 'server-only'
+import { seal } from '@/lib/documents/seal'
+import { renderManifest, renderSheet } from '@/lib/documents/render'
+import { firm } from '@/lib/domain/firm'
+import { prepareRelease } from '@/lib/domain/release/prepare'
+import type { PreparedRelease } from '@/lib/domain/release/prepare'
+import { recordRelease } from '@/lib/domain/release/record'
+import type { IssuedPaper } from '@/lib/domain/release/record'
+import { env } from '@/lib/env'
+import { manifestLetter } from '@/lib/mail/letters/manifest-letter'
+import type { Signer } from '@/lib/documents/seal'
+import { signer, signingIdentity } from '@/lib/signing'
+import { buildManifestView } from '@/lib/views/manifest-view/build-manifest-view'
+import { buildSheetView } from '@/lib/views/sheet-view/build-sheet-view'
+import { models } from '@/models'
+
+/**
+ * Makes the papers of one release and records them: rendering and sealing come before the transaction that records,
+ * which looks at everything again. Done twice, it is recorded once.
+ */
+export async function releaseJob(payload: unknown, clock: () => Date): Promise<void> {
+  const prepared = await prepareRelease(payload, clock())
+  if (prepared === null) return
+  const holder = await signer()
+  const sheet = await sheetPaper(prepared, holder)
+  const { paper: manifest, view } = await manifestPaper(prepared, holder, clock())
+  const letter = { to: prepared.shipperEmail, ...manifestLetter(view, { appUrl: env().appUrl }) }
+  await recordRelease(prepared.task, { papers: [sheet, manifest], letter }, clock())
+}
+
+async function sheetPaper({ sheet }: PreparedRelease, holder: Signer): Promise<IssuedPaper> {
+  const view = buildSheetView(sheet)
+  const { bytes, pages } = await renderSheet(view)
+  const sealed = await seal(bytes, holder, sealing('Go/no-go sheet as released', sheet.madeAtMs))
+  return { kind: 'go_no_go', code: sheet.documentCode ?? '', bytes: sealed, pages, view }
+}
+
+async function manifestPaper(
+  { manifest, releasedBy, shipperEmail }: PreparedRelease,
+  holder: Signer,
+  now: Date,
+) {
+  const code = manifest.documentCode ?? ''
+  const { subject, serial, validToMs, selfIssued } = await signingIdentity()
+  const view = buildManifestView({
+    ...manifest,
+    documentCode: code,
+    verifyUrl: `${env().appUrl}/verify/${code}`,
+    releasedBy: `${releasedBy.name}, ${releasedBy.role}`,
+    releasedAtMs: now.getTime(),
+    waybill: '',
+    shipperEmail,
+    vetOnCall: await vetOnCall(manifest.consignment.id, manifest.consignment.planHash),
+    crateModels: (await models.CrateModel.findAll({ attributes: ['id', 'name'] })).map(({ id, name }) => ({
+      id,
+      name,
+    })),
+    standingWords: '',
+    seal: { subject, serial, validToMs, selfIssued },
+  })
+  const { bytes, pages } = await renderManifest(view)
+  const sealed = await seal(bytes, holder, sealing('Manifest as released', manifest.madeAtMs))
+  const paper: IssuedPaper = { kind: 'manifest', code, bytes: sealed, pages, view }
+  return { paper, view }
+}
+
+function sealing(reason: string, atMs: number) {
+  const { name, town, deskTelephone } = firm()
+  return { reason: `${reason} by ${name}`, contact: deskTelephone, location: town, at: new Date(atMs) }
+}
+
+/** The vet who signed last is the one to ring. */
+async function vetOnCall(consignmentId: number, planHash: string) {
+  const approval = await models.Approval.findOne({
+    where: { consignmentId, planHash, voidedAt: null },
+    order: [['id', 'DESC']],
+  })
+  const vet =
+    approval && (await models.User.findByPk(approval.signerId, { attributes: ['name', 'telephone'] }))
+  return vet && { name: vet.name, telephone: vet.telephone }
+}
