@@ -36,6 +36,9 @@ const STOP_MS = 45_000
  * `port` undefined means: the one of last time, else the usual one, else any free one. `forTests` trades safety in a
  * power cut for speed.
  * Resolves with how to reach it and whether this call started it.
+ *
+ * @param {string} folder
+ * @param {{ port?: number | undefined, forTests?: boolean }} [options]
  */
 export async function startMariadb(folder, { port, forTests = false } = {}) {
   const files = databaseFiles(folder)
@@ -69,7 +72,11 @@ export async function stopMariadb(folder) {
   return true
 }
 
-/** Runs SQL as the account of the person who owns the data folder, over the socket. Returns rows as arrays of strings. */
+/**
+ * Runs SQL as the account of the person who owns the data folder, over the socket. Returns rows as arrays of strings.
+ *
+ * @returns {Promise<string[][]>}
+ */
 export async function query(server, sql) {
   const { code, stdout, stderr } = await run(
     server.programs.client,

@@ -17,6 +17,13 @@ export class Supervised {
   #falls = 0
   #note
 
+  /**
+   * @param {{
+   *   name: string, command: string, args: string[], cwd: string, env: Record<string, string | undefined>,
+   *   say: (name: string, text: string) => unknown, onFall?: (falls: number, reason: string) => unknown,
+   *   note?: { add: (pid: number) => unknown, remove: (pid: number) => unknown },
+   * }} options
+   */
   constructor({ name, command, args, cwd, env, say, onFall = () => undefined, note }) {
     Object.assign(this, { name, command, args, cwd, env, say, onFall })
     this.#note = note

@@ -64,7 +64,10 @@ describe('a supervised process', () => {
 
 test('processes left over by a kill are ended at the next start; one that is not ours is not', async () => {
   const file = path.join(folder, 'processes.json')
-  const ours = spawn(process.execPath, ['-e', LIVES], { detached: true, env: { STEADFOLD_FOLDER: folder } })
+  const ours = spawn(process.execPath, ['-e', LIVES], {
+    detached: true,
+    env: { ...process.env, STEADFOLD_FOLDER: folder },
+  })
   const foreign = spawn(process.execPath, ['-e', LIVES], { detached: true })
   await Promise.all(
     [ours, foreign].map((child) => new Promise((resolve) => child.stdout.once('data', resolve))),
