@@ -52,20 +52,24 @@ export async function startApplication({ folder, host, port, variables, dev = fa
     },
   })
   let worker
-  const endWatch = dev
-    ? await bundleWorker({
-        onRebuild: (errors) => (errors.length > 0 ? say('worker', `${errors[0].text}\n`) : worker?.restart()),
-      })
-    : undefined
-  worker = new Supervised({
-    ...common,
-    name: 'worker',
-    command: process.execPath,
-    args: ['--enable-source-maps', path.join(root, 'dist/worker/worker.mjs')],
-  })
+  const startWorker = () => {
+    worker = new Supervised({
+      ...common,
+      name: 'worker',
+      command: process.execPath,
+      args: ['--enable-source-maps', path.join(root, 'dist/worker/worker.mjs')],
+    })
+  }
+  // In development each good bundle, the first included, starts the worker anew.
+  const onRebuild = (errors) => {
+    if (errors.length > 0) say('worker', `${errors[0].text}\n`)
+    else if (worker) worker.restart()
+    else startWorker()
+  }
+  const endWatch = dev ? await bundleWorker({ onRebuild }) : startWorker()
   const stop = async () => {
     await endWatch?.()
-    await Promise.all([web.stop(), worker.stop()])
+    await Promise.all([web.stop(), worker?.stop()])
   }
   const address = `http://${host === '0.0.0.0' ? '127.0.0.1' : host}:${port}`
   const healthy = async () => {
@@ -78,7 +82,7 @@ export async function startApplication({ folder, host, port, variables, dev = fa
       `The web server does not answer at ${address}${lost === undefined ? '' : ` (${lost})`}; its own words are above.`,
     )
   }
-  return { address, web, worker, healthy, stop }
+  return { address, healthy, stop }
 }
 
 async function isHealthy(address) {

@@ -22,6 +22,8 @@ export async function build(say, { force = false } = {}) {
   const sources = hashOfSources()
   if (!force && isBuilt(sources)) return false
   say('Building the application …')
+  // An interrupted build must not pass for the one before it.
+  rmSync(STAMP, { force: true })
   await bundleWorker()
   const next = path.join(root, 'node_modules/next/dist/bin/next')
   const { code, stdout, stderr } = await run(process.execPath, [next, 'build'], {
