@@ -135,6 +135,8 @@ export interface ConditionView {
   legWords: string
   askedOf: string
   askedAt: Moment | null
+  /** The rule of the finding it answers; null for a vet's own. */
+  findingRule: string | null
   answer: ConditionAnswer
   /** "D. Aird, Wed 10 Jun 16:20 BST, in writing", "Ours is there", "Not yet. Asked Thu 11 Jun 08:50 BST". */
   answerWords: string

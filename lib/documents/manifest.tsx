@@ -1,0 +1,108 @@
+import { Document } from '@react-pdf/renderer'
+import { dayDate, dayDateYear, duration, localTimeWithOffset } from '@/lib/views/format'
+import type { ManifestView } from '@/lib/views/manifest'
+import { printedCode } from './code'
+import { type Block, flow } from './flow'
+import { factsHeight, Facts } from './parts/facts'
+import { madeWords } from './parts/made-words'
+import { CONTENT_WIDTH, Paper, roomOn } from './parts/paper'
+import { stampRow } from './parts/stamp-row'
+import { callTable, handlingList, handoverTable } from './manifest/acts'
+import { animalTable } from './manifest/animal-table'
+import { approvalBoxes } from './manifest/approval-box'
+import { checkPart } from './manifest/check-part'
+import { crateTable } from './manifest/crate-table'
+import { legTable } from './manifest/leg-table'
+import { conditionTable } from './sheet/condition-table'
+import { overrideNotes } from './sheet/override-notes'
+
+const TITLE = 'Manifest'
+
+/** The manifest as a document, and how many sheets were planned. Facts come first; the acts begin on a sheet of their own. */
+export function manifest(view: ManifestView, slack = 1) {
+  const sheets = flow(blocksOf(view), (sheet) => roomOn(sheet) * slack)
+  const code = printedCode(view.documentCode)
+  const document = (
+    <Document
+      title={`${view.mark} manifest, revision ${view.revision}`}
+      author={view.firm.name}
+      subject={TITLE}
+      keywords={`Document code ${code}`}
+      creator="Steadfold"
+      producer="Steadfold"
+      language="en-GB"
+    >
+      {sheets.map((children, index) => (
+        <Paper
+          key={index}
+          mark={view.mark}
+          title={TITLE}
+          revision={view.revision}
+          revisionWords={view.revisionWords}
+          edgeWords={view.edgeWords}
+          code={code}
+          madeWords={madeWords(view.made)}
+          sheet={index + 1}
+          sheets={sheets.length}
+        >
+          {children}
+        </Paper>
+      ))}
+    </Document>
+  )
+  return { document, sheets: sheets.length }
+}
+
+function blocksOf(view: ManifestView): Block[] {
+  return [
+    factsBlock(view),
+    stampRow(view),
+    ...overrideNotes(view.overrides),
+    animalTable(view.animals),
+    crateTable(view.crates),
+    legTable(view.legs),
+    ...approvalBoxes(view),
+    ...conditionTable(view.conditions, ''),
+    ...handlingList(view.handling),
+    callTable(view.calls),
+    handoverTable(view.handovers),
+    checkPart(view),
+  ]
+}
+
+const WIDTHS = [178, 186, 152, CONTENT_WIDTH - 3 - 178 - 186 - 152]
+
+function factsBlock(view: ManifestView): Block {
+  const { leaves, arrives, consignor, consignee, shipper, emergencyContact } = view
+  const crates = `${view.crateCount} ${view.crateCount === 1 ? 'crate' : 'crates'}`
+  const animals = `${view.animalCount} ${view.animalCount === 1 ? 'animal' : 'animals'}`
+  const rows = [
+    [
+      { caption: 'Consignor', value: consignor.name, bold: true, more: consignor.lines },
+      { caption: 'Consignee', value: consignee.name, bold: true, more: consignee.lines },
+      { caption: 'Shipper', value: shipper.name, bold: true, more: shipper.lines },
+      {
+        caption: 'Emergency contact, whole journey',
+        value: emergencyContact.name,
+        bold: true,
+        more: emergencyContact.lines,
+      },
+    ],
+    [
+      {
+        caption: 'Leaves',
+        value: `${dayDateYear(leaves.ms, leaves.zone)}, ${localTimeWithOffset(leaves.ms, leaves.zone)}`,
+      },
+      {
+        caption: 'Arrives',
+        value: `${dayDate(arrives.ms, arrives.zone)}, ${localTimeWithOffset(arrives.ms, arrives.zone)}`,
+      },
+      { caption: 'Animals, crates', value: `${animals} in ${crates}` },
+      {
+        caption: 'Time in crate, waybill',
+        value: `${duration(view.journeyMin)}, ${view.waybill === '' ? 'no waybill yet' : `no. ${view.waybill}`}`,
+      },
+    ],
+  ]
+  return { height: factsHeight(WIDTHS, rows), element: <Facts key="facts" widths={WIDTHS} rows={rows} /> }
+}

@@ -1,0 +1,46 @@
+import { renderToBuffer } from '@react-pdf/renderer'
+import type { ManifestView } from '@/lib/views/manifest'
+import type { SheetView } from '@/lib/views/sheet'
+import { registerFonts } from './fonts'
+import { manifest } from './manifest'
+import { assertPrintable } from './printable'
+import { goNoGoSheet } from './sheet'
+
+export interface RenderedDocument {
+  bytes: Buffer
+  pages: number
+}
+
+/** The go/no-go sheet as PDF. Throws "invalid" where a text cannot be shown on paper. */
+export function renderSheet(view: SheetView): Promise<RenderedDocument> {
+  return renderPlanned(view, goNoGoSheet)
+}
+
+/** The manifest as PDF, not sealed yet. Throws "invalid" where a text cannot be shown on paper. */
+export function renderManifest(view: ManifestView): Promise<RenderedDocument> {
+  return renderPlanned(view, manifest)
+}
+
+type Plan<View> = (
+  view: View,
+  slack: number,
+) => { document: Parameters<typeof renderToBuffer>[0]; sheets: number }
+
+/** Room given up on each sheet where the planned heights were too small for what was drawn. */
+const SLACKS = [1, 0.94, 0.88]
+
+async function renderPlanned<View extends object>(view: View, plan: Plan<View>): Promise<RenderedDocument> {
+  registerFonts()
+  assertPrintable(view)
+  for (const slack of SLACKS) {
+    const { document, sheets } = plan(view, slack)
+    const bytes = await renderToBuffer(document)
+    if (pagesOf(bytes) === sheets) return { bytes, pages: sheets }
+  }
+  throw new Error('The document does not fit the sheets planned for it.')
+}
+
+/** Pages as the file itself counts them; the renderer adds one where a sheet ran over. */
+function pagesOf(bytes: Buffer): number {
+  return (bytes.toString('latin1').match(/\/Type \/Page\b(?!s)/g) ?? []).length
+}

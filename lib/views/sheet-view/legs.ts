@@ -1,0 +1,77 @@
+import type { Finding } from '@/lib/rules/result'
+import type { AnimalView, ConditionView, LegCell, LegView } from '../sheet'
+import type { Assessed } from './assessed'
+import type { JourneyLeg } from './journey'
+import { limitWords, marginOf } from './words'
+
+/** Legs with a cell for each animal, in the order of the animals. */
+export function legViews(
+  journey: JourneyLeg[],
+  animals: Pick<AnimalView, 'animalId'>[],
+  assessed: Assessed | null,
+  conditions: ConditionView[],
+): LegView[] {
+  return journey.map(
+    ({ leg, ordinal, pattern, title, fromPlace, toPlace, start, end, durationMin, air }) => ({
+      legId: leg.id,
+      ordinal,
+      kind: leg.kind,
+      flightPhase: leg.flightPhase,
+      pattern,
+      title,
+      fromPlace,
+      toPlace,
+      start,
+      end,
+      durationMin,
+      delayTypicalMin: leg.delayTypicalMin,
+      delayWorstMin: leg.delayWorstMin,
+      airTempC: air.maxC,
+      airWords: air.words,
+      carrier: leg.carrier,
+      serviceNumber: leg.serviceNumber,
+      partyInCharge: leg.partyInCharge,
+      partyTelephone: leg.partyTelephone,
+      partyHours: leg.partyHours,
+      attended: leg.attended,
+      conditionNumbers: conditions.filter(({ legs }) => legs.includes(ordinal)).map(({ number }) => number),
+      cells: animals.map(({ animalId }) => legCell(animalId, leg.id, assessed)),
+    }),
+  )
+}
+
+/**
+ * What decides on one leg. Where that is no body limit (a law, a carrier's rule), the room shown is that of the narrowest
+ * body limit of the leg, and the words still name what decides.
+ */
+function legCell(animalId: string, legId: string, assessed: Assessed | null): LegCell {
+  const verdict = assessed?.effective.verdicts.find((one) => one.animalId === animalId && one.legId === legId)
+  const findings = assessed?.effective.findings ?? []
+  const decided = verdict?.decidedBy === undefined ? undefined : findings[verdict.decidedBy]
+  const shown = decided?.marginMin === undefined ? narrowest(findings, animalId, legId) : decided
+  const overridden = (assessed?.effective.overridden ?? []).some(({ findingIndex }) => {
+    const finding = assessed?.original[findingIndex]
+    return finding?.animalId === animalId && finding.legId === legId
+  })
+  return {
+    animalId,
+    verdict: verdict?.verdict ?? null,
+    margin: marginOf(shown),
+    limitWords: decided === undefined ? (shown === undefined ? '' : limitWords(shown)) : limitWords(decided),
+    overridden,
+  }
+}
+
+function narrowest(findings: readonly Finding[], animalId: string, legId: string): Finding | undefined {
+  const own = findings.filter(
+    (one) => one.animalId === animalId && one.legId === legId && one.marginMin !== undefined,
+  )
+  return own.reduce<Finding | undefined>(
+    (best, one) => (best === undefined || room(one) < room(best) ? one : best),
+    undefined,
+  )
+}
+
+function room({ marginOutsideAirC = 99, marginMin = 999 }: Finding): number {
+  return marginOutsideAirC * 1000 + marginMin
+}
