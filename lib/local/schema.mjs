@@ -59,9 +59,11 @@ async function seed({ server, database, variables, folder, demo, say }) {
   const [users, species] = counts.map(Number)
   const sources = hashOf(['seeders/01-reference.ts', 'lib/species'])
   const wantsReference = species === 0 || note.reference !== sources
-  const wantsDemo = demo && users === 0
+  // Into an empty installation only, or where an earlier attempt broke off: the demo may be put in again and again.
+  const wantsDemo = demo && (users === 0 || note.demoBegun === true)
   if (wantsReference || wantsDemo) {
     say(wantsDemo ? 'Filling in the catalogues and the demo …' : 'Filling in the catalogues …')
+    if (wantsDemo) writeFileSync(noteFile, JSON.stringify({ ...note, demoBegun: true }))
     const printed = await runTypescript(
       'lib/local/seed.ts',
       wantsDemo ? ['reference', 'demo'] : ['reference'],
