@@ -25,8 +25,7 @@ export function* enduranceOf(prepared: Prepared, runner: Runner, legIndex: numbe
 
 /** Where a space has no such machine, its failure is the leg going on as it is. */
 function hasMachine(space: EnclosedSpace, kind: 'climate' | 'ventilation'): boolean {
-  const own = kind === 'climate' ? space.conditioning !== undefined : (space.ventilationM3h ?? 0) > 0
-  return own || (space.outside.type === 'enclosed' && hasMachine(space.outside, kind))
+  return kind === 'climate' ? space.conditioning !== undefined : (space.ventilationM3h ?? 0) > 0
 }
 
 /** The leg goes on as it is: from any moment on the animal meets its limit at the same minute, so the leg's end is the worst moment. */

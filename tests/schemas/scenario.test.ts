@@ -186,6 +186,24 @@ describe('what a scenario may not say', () => {
       /before the leg ends/,
     ],
     [
+      'a door event in a room that has none',
+      (json) => (json.legs[0].events = [{ minute: 5, durationMin: 5, kind: 'door' }]),
+      'legs.0.events',
+      /only an enclosed space/,
+    ],
+    [
+      'a mesh width, which changes nothing yet',
+      (json) => (json.crates[0].openings[0].meshMm = 25),
+      'crates.0.openings.0.meshMm',
+      /cannot be used yet/,
+    ],
+    [
+      'an acclimation the engine cannot compute',
+      (json) => (json.crates[0].occupants[0].acclimatedToC = 2),
+      'crates.0.occupants.0.acclimatedToC',
+      /cannot be computed yet/,
+    ],
+    [
       'an initial state of one variant only',
       (json) => (json.initial = [{ variant: 'typical', crates: [], animals: [], compartments: [] }]),
       'initial',

@@ -2,10 +2,11 @@ import type { Finding } from '../result'
 import { isAboard } from '../subject'
 import { list } from '../wording'
 import { type LawView, type RulePack, legsUnder } from './pack'
+import { EU_PACK, GB_PACK } from './eu-1-2005'
 import { US_9CFR_3 } from './us-9cfr-3'
 
 /** All packs in this version. */
-export const PACKS: readonly RulePack[] = [US_9CFR_3]
+export const PACKS: readonly RulePack[] = [US_9CFR_3, EU_PACK, GB_PACK]
 
 /**
  * Findings of every pack, and one for each country or species that no pack speaks of: a law nobody has written down here

@@ -57,7 +57,9 @@ export const animalSchema = z.strictObject({
     'adult for the engine; rules on age answer unknown',
   ),
   lengthM: optionalFigure({ what: 'Body length', unit: 'm', min: 0.005, max: 10 }, 'from mass'),
-  sex: word('Sex', ['male', 'female']).optional().describe('Absent: unknown.'),
+  sex: word('Sex', ['male', 'female'])
+    .optional()
+    .describe('Identifies the animal; no figure depends on it. Absent: unknown.'),
   bodyTempC: optionalFigure(
     { what: 'Body temperature at loading', unit: '°C', min: 0, max: 45 },
     'the profile’s set-point, or the crate air for animals that do not regulate',

@@ -26,6 +26,7 @@ export function journeyIssues(
     ...profileIssues(scenario, rows),
     ...limitIssues(scenario, rows),
     ...initialIssues(scenario),
+    ...unusedIssues(scenario),
   ]
 }
 
@@ -227,4 +228,47 @@ function initialIssues(scenario: Scenario): ScenarioIssue[] {
           },
         ]
   })
+}
+
+/** Fields the engine holds a place for and cannot use yet, or not here: refused, since silence would look like an answer. */
+function unusedIssues({ legs, crates }: Scenario): ScenarioIssue[] {
+  const events = legs.flatMap((leg, i) =>
+    leg.events.length > 0 && leg.surroundings.type !== 'enclosed'
+      ? [
+          {
+            path: `legs.${i}.events`,
+            message: 'Events: only an enclosed space has doors, fans and machines that can be off.',
+            received: leg.events.length,
+          },
+        ]
+      : [],
+  )
+  const meshes = crates.flatMap((crate, i) =>
+    crate.openings.flatMap(({ meshMm }, j) =>
+      meshMm === undefined
+        ? []
+        : [
+            {
+              path: `crates.${i}.openings.${j}.meshMm`,
+              message: 'Mesh width cannot be used yet: give the free share of the mesh, meshOpenPct.',
+              received: meshMm,
+            },
+          ],
+    ),
+  )
+  const acclimated = crates.flatMap((crate, i) =>
+    crate.occupants.flatMap(({ acclimatedToC }, j) =>
+      acclimatedToC === undefined
+        ? []
+        : [
+            {
+              path: `crates.${i}.occupants.${j}.acclimatedToC`,
+              message:
+                'Acclimation cannot be computed yet: set the flag unacclimated, or attach an acclimation certificate.',
+              received: acclimatedToC,
+            },
+          ],
+    ),
+  )
+  return [...events, ...meshes, ...acclimated]
 }
