@@ -53,7 +53,7 @@ export function MarginCell({ row }: { row: ConsignmentRow }) {
   return (
     <span className="flex items-center gap-2.5">
       <VerdictCell verdict={row.verdict} outOfDate={row.outOfDate} wide>
-        {row.marginMin === null ? 'none' : minutesToSpare(row.marginMin)}
+        {row.marginMin === null ? (row.deciding.split(',')[0] ?? 'none') : minutesToSpare(row.marginMin)}
       </VerdictCell>
       <span className="min-w-0 text-small">
         {row.marginOutsideAirC !== null && (

@@ -42,6 +42,7 @@ export function ActsBar({
   main,
   actions,
   readiness,
+  absolute,
   working,
 }: {
   consignmentId: number
@@ -51,6 +52,8 @@ export function ActsBar({
   main: DeskAct | null
   actions: DeskActions
   readiness: ReleaseReadiness | null
+  /** A breach nobody may override, in words: such a plan does not go to the vet. */
+  absolute: string | null
   /** The worker has it in hand: asking again would change nothing. */
   working: boolean
 }) {
@@ -90,7 +93,11 @@ export function ActsBar({
           />
         )}
         <RoadActs consignmentId={consignmentId} mark={mark} acts={acts} actions={actions} />
-        {may('save') && <ButtonLink href={`/consignments/${consignmentId}/plan`}>Edit the plan</ButtonLink>}
+        {may('save') && (
+          <ButtonLink first={main === 'save'} href={`/consignments/${consignmentId}/plan`}>
+            {main === 'save' ? `Re-plan ${mark}` : 'Edit the plan'}
+          </ButtonLink>
+        )}
         <ButtonLink href={`/consignments/${consignmentId}/sheet`}>Go/no-go sheet</ButtonLink>
         {may('cancel') && (
           <ActDialog
@@ -116,6 +123,11 @@ export function ActsBar({
           </ActDialog>
         )}
       </div>
+      {may('submit') && absolute !== null && (
+        <p className="mt-2 text-small">
+          <b>No vet can approve this plan:</b> {absolute}
+        </p>
+      )}
       {refused !== null && (
         <div className="mt-3">
           <ErrorSummary title={refused.message} issues={refused.issues.map(({ message }) => ({ message }))}>

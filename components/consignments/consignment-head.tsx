@@ -16,8 +16,8 @@ export function ConsignmentHead({
   inForceRevision: number | null
 }) {
   return (
-    <div className="grid wide:grid-cols-[1fr_minmax(380px,auto)]">
-      <BoxedFacts columns="150px 1.4fr 1.1fr .9fr 1.15fr .95fr">
+    <div className="grid wide:grid-cols-[1fr_400px]">
+      <BoxedFacts columns="138px 1.5fr 1.3fr .8fr 1.05fr .85fr">
         <Fact caption="Consignment" tall whole>
           <h1 className="flex h-full items-end">
             <Mark size="l" label="Consignment">

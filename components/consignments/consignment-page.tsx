@@ -1,7 +1,7 @@
 import type { ReactNode } from 'react'
 import { ConditionsTable } from '@/components/sheets/conditions-table'
 import { EnduranceTable } from '@/components/sheets/endurance-table'
-import { FindingsTable } from '@/components/sheets/findings-table'
+import { FindingsInTwo } from '@/components/sheets/findings-table'
 import { LegsTable } from '@/components/sheets/legs-table'
 import { Cautions, Provenance } from '@/components/sheets/provenance'
 import { StopLimits } from '@/components/sheets/stop-limits'
@@ -48,7 +48,7 @@ export function ConsignmentPage({
           <AnimalPart view={sheet} animalId={animalId} dark={page.dark} />
         </>
       )}
-      {assessed && <AssessedParts page={page} answer={answer} />}
+      {assessed && <AssessedParts page={page} animalId={animalId} answer={answer} />}
       <div className="grid gap-x-6 wide:grid-cols-2">
         <Section id="approvals" title="Approvals" words="What was signed, and what became void and why">
           <ApprovalsPart approvals={page.approvals} />
@@ -72,10 +72,17 @@ export function ConsignmentPage({
   )
 }
 
-function AssessedParts({ page: { sheet }, answer }: { page: DeskPageView; answer?: AnswerCondition }) {
+function AssessedParts({
+  page: { sheet },
+  animalId,
+  answer,
+}: {
+  page: DeskPageView
+  animalId: string | null
+  answer?: AnswerCondition
+}) {
   const { outOfDate } = sheet.stamp
-  const nameOf = (animalId: string) =>
-    sheet.animals.find((animal) => animal.animalId === animalId)?.name ?? ''
+  const animal = sheet.animals.find((one) => one.animalId === animalId)
   return (
     <>
       <Section
@@ -86,7 +93,7 @@ function AssessedParts({ page: { sheet }, answer }: { page: DeskPageView; answer
         <LegsTable legs={sheet.legs} animals={sheet.animals} outOfDate={outOfDate} />
       </Section>
       <Section id="findings" title="Findings" words={`${sheet.findings.length}, the deciding ones first`}>
-        <FindingsTable findings={sheet.findings} />
+        <FindingsInTwo findings={sheet.findings} />
       </Section>
       <Section id="conditions" title="Conditions" words={sheet.conditionsWords}>
         <ConditionsTable
@@ -97,10 +104,12 @@ function AssessedParts({ page: { sheet }, answer }: { page: DeskPageView; answer
       <div className="grid gap-x-6 wide:grid-cols-[1fr_1fr]">
         <Section
           id="endurance"
-          title="Endurance"
+          title={animal ? `Endurance of ${animal.name}` : 'Endurance'}
           words="Minutes to a limit after a failure, at the worst moment of the leg"
         >
-          <EnduranceTable endurance={sheet.endurance} name={nameOf} />
+          {animal && (
+            <EnduranceTable endurance={sheet.endurance} animalId={animal.animalId} name={animal.name} />
+          )}
         </Section>
         <Section id="stop-limits" title="Stop limits" words="What the driver stops and rings for">
           <StopLimits

@@ -1,3 +1,4 @@
+import type { FindingView } from '@/lib/views/sheet'
 import type { ConsignmentState } from '@/lib/states/consignment'
 import type { DeskAct } from './status-view'
 
@@ -5,9 +6,10 @@ import type { DeskAct } from './status-view'
 export function mainAct(
   state: ConsignmentState,
   acts: readonly DeskAct[],
-  needsAssessment: boolean,
+  { needsAssessment, absolute }: { needsAssessment: boolean; absolute: boolean },
 ): DeskAct | null {
   const next = nextOf(state, needsAssessment)
+  if (next === 'submit' && absolute) return acts.includes('save') ? 'save' : null
   return next !== null && acts.includes(next) ? next : null
 }
 
@@ -28,4 +30,10 @@ function nextOf(state: ConsignmentState, needsAssessment: boolean): DeskAct | nu
     case 'cancelled':
       return null
   }
+}
+
+/** The first breach nobody may override, in words; null where there is none. */
+export function absoluteWords(findings: readonly FindingView[]): string | null {
+  const absolute = findings.find(({ status, overridable }) => status === 'breach' && !overridable)
+  return absolute === undefined ? null : `${absolute.whoLegWords}: ${absolute.asked}`
 }

@@ -2,50 +2,73 @@ import { Cell, Head, Ledger, RowHead } from '@/components/ui/ledger'
 import { enduranceMinutes, localTime } from '@/lib/views/format'
 import type { EnduranceView } from '@/lib/views/sheet'
 
+const KINDS = ['climate', 'ventilation', 'stays'] as const
 const KIND_WORDS: Record<EnduranceView['kind'], string> = {
   climate: 'Heating and cooling fail',
   ventilation: 'Fans and vents close',
   stays: 'The leg just goes on',
 }
 
-/** If something fails at the worst moment of a leg: minutes until the animal meets its alarm and its critical limit. */
+/** If something fails at the worst moment of a leg: minutes until this animal meets its alarm and its critical limit. */
 export function EnduranceTable({
   endurance,
+  animalId,
   name,
 }: {
   endurance: readonly EnduranceView[]
-  name: (animalId: string) => string
+  animalId: string
+  name: string
 }) {
-  if (endurance.length === 0) return <p className="text-mute">No endurance was run for this plan.</p>
+  const own = endurance.filter((row) => row.animalId === animalId)
+  if (own.length === 0) return <p className="text-mute">No endurance was run for {name}.</p>
+  const legs = [...new Map(own.map(({ legId, ordinal }) => [legId, ordinal]))]
   return (
-    <Ledger caption="Endurance: minutes to a limit after a failure at the worst moment of the leg">
+    <Ledger
+      caption={`Endurance of ${name}: minutes to alarm and to critical after a failure at the worst moment of the leg`}
+    >
       <thead>
         <tr>
-          <Head>Leg</Head>
-          <Head>Animal</Head>
-          <Head>What fails</Head>
-          <Head>Worst at</Head>
-          <Head numeric>To alarm</Head>
-          <Head numeric>To critical</Head>
+          <Head rowSpan={2}>Leg</Head>
+          {KINDS.map((kind) => (
+            <Head key={kind} colSpan={2} scope="colgroup" className="!border-b-0">
+              {KIND_WORDS[kind]}
+            </Head>
+          ))}
+        </tr>
+        <tr>
+          {KINDS.flatMap((kind) => [
+            <Head key={`${kind} alarm`} numeric className="!font-normal">
+              to alarm
+            </Head>,
+            <Head key={`${kind} critical`} numeric className="!font-normal">
+              to critical
+            </Head>,
+          ])}
         </tr>
       </thead>
       <tbody>
-        {endurance.map((row) => (
-          <tr key={`${row.legId} ${row.animalId} ${row.kind}`}>
-            <RowHead className="font-head text-sub font-bold">{row.ordinal}</RowHead>
-            <Cell>
-              <span className="crate mr-1.5">{row.crateLetter}</span>
-              {name(row.animalId)}
-            </Cell>
-            <Cell>{KIND_WORDS[row.kind]}</Cell>
-            <Cell className="whitespace-nowrap">
-              {row.worstAt === null ? 'not known' : localTime(row.worstAt.ms, row.worstAt.zone)}
-            </Cell>
-            <Cell numeric>{enduranceMinutes(row.toAlarmMin)}</Cell>
-            <Cell numeric>{enduranceMinutes(row.toCriticalMin)}</Cell>
+        {legs.map(([legId, ordinal]) => (
+          <tr key={legId}>
+            <RowHead className="font-head text-sub font-bold">{ordinal}</RowHead>
+            {KINDS.flatMap((kind) => {
+              const row = own.find((one) => one.legId === legId && one.kind === kind)
+              return [
+                <Cell key={`${kind} alarm`} numeric title={worstWords(row)}>
+                  {enduranceMinutes(row?.toAlarmMin ?? null)}
+                </Cell>,
+                <Cell key={`${kind} critical`} numeric title={worstWords(row)}>
+                  {enduranceMinutes(row?.toCriticalMin ?? null)}
+                </Cell>,
+              ]
+            })}
           </tr>
         ))}
       </tbody>
     </Ledger>
   )
+}
+
+function worstWords(row: EnduranceView | undefined): string | undefined {
+  if (row === undefined || row.worstAt === null) return undefined
+  return `Worst at ${localTime(row.worstAt.ms, row.worstAt.zone)}`
 }

@@ -2,6 +2,29 @@ import { Cell, Head, Ledger, RowHead } from '@/components/ui/ledger'
 import type { FindingView } from '@/lib/views/sheet'
 import { MarginLine } from './margin-figures'
 
+/** Findings that decide, hold release or were overridden; what is met and what is merely noted folds away. */
+export function FindingsInTwo({ findings }: { findings: readonly FindingView[] }) {
+  const quiet = findings.filter(({ status, decides }) => !decides && (status === 'met' || status === 'note'))
+  const loud = findings.filter((finding) => !quiet.includes(finding))
+  return (
+    <>
+      <FindingsTable findings={loud} />
+      {quiet.length > 0 && (
+        <details className="mt-2">
+          <summary className="link inline-block max-desk:min-h-11">
+            {quiet.length === 1
+              ? '1 more that is met or noted'
+              : `${quiet.length} more that are met or noted`}
+          </summary>
+          <div className="mt-2">
+            <FindingsTable findings={quiet} />
+          </div>
+        </details>
+      )}
+    </>
+  )
+}
+
 /** What was asked, by whom, what the plan gives, and whether anybody may override it. */
 export function FindingsTable({
   findings,

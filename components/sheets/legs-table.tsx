@@ -10,15 +10,10 @@ export function LegsTable({
   legs,
   animals,
   outOfDate,
-  chosenLegId,
-  paper = false,
 }: {
   legs: readonly LegView[]
   animals: readonly AnimalView[]
   outOfDate: boolean
-  chosenLegId?: string
-  /** Narrower: the sheet as it prints. */
-  paper?: boolean
 }) {
   return (
     <Ledger caption="Legs: in the frame minutes to spare, beside it outside air to spare; below the limit that decides, then body">
@@ -28,18 +23,13 @@ export function LegsTable({
           <Head>Surroundings</Head>
           <Head>From, to</Head>
           <Head numeric>h:min</Head>
-          {animals.map((animal) => (
-            <Head key={animal.animalId}>
-              <span className="crate mr-1.5 text-[1rem] text-ink">{animal.crateLetter}</span>
-              {animal.name}
-            </Head>
-          ))}
-          <Head>{paper ? 'Co.' : 'Conditions'}</Head>
+          <AnimalHeads animals={animals} />
+          <Head>Conditions</Head>
         </tr>
       </thead>
       <tbody>
         {legs.map((leg) => (
-          <Row key={leg.legId} chosen={leg.legId === chosenLegId}>
+          <Row key={leg.legId}>
             <RowHead className="font-head text-sub font-bold">{leg.ordinal}</RowHead>
             <Cell>
               <span className="flex items-start gap-2.5">
@@ -48,7 +38,7 @@ export function LegsTable({
                   {leg.title}
                   <span className="block text-small text-mute">{leg.airWords}</span>
                 </span>
-                {!paper && leg.airTempC !== null && (
+                {leg.airTempC !== null && (
                   <span className="fig ml-auto text-small">
                     <TemperatureChip c={leg.airTempC} />
                   </span>
@@ -70,6 +60,69 @@ export function LegsTable({
       </tbody>
     </Ledger>
   )
+}
+
+/** The same for a sheet of paper: three animals beside one another on A4; further ones in tables of their own. */
+export function PaperLegs({
+  legs,
+  animals,
+  outOfDate,
+}: {
+  legs: readonly LegView[]
+  animals: readonly AnimalView[]
+  outOfDate: boolean
+}) {
+  const groups = Array.from({ length: Math.ceil(animals.length / 3) }, (_, index) => index * 3)
+  return groups.map((from) => (
+    <div key={from} className="mb-2 text-small [&_td]:!px-1.5 [&_td]:!py-1 [&_th]:!px-1.5">
+      <Ledger caption="Legs">
+        <thead>
+          <tr>
+            <Head>Leg</Head>
+            <Head className="min-w-[11.5rem]">Surroundings</Head>
+            <Head>Starts, h:min</Head>
+            <AnimalHeads animals={animals.slice(from, from + 3)} />
+            <Head>Co.</Head>
+          </tr>
+        </thead>
+        <tbody>
+          {legs.map((leg) => (
+            <tr key={leg.legId}>
+              <RowHead className="font-head text-sub font-bold">{leg.ordinal}</RowHead>
+              <Cell>
+                <span className="flex items-start gap-1.5">
+                  <PatternSwatch pattern={leg.pattern} width={26} height={14} />
+                  <span className="leading-4">
+                    {leg.title}
+                    <span className="block text-caption">{leg.airWords}</span>
+                  </span>
+                </span>
+              </Cell>
+              <Cell className="whitespace-nowrap">
+                {localTime(leg.start.ms, leg.start.zone)}
+                <span className="block">{hourMin(leg.durationMin)}</span>
+              </Cell>
+              {leg.cells.slice(from, from + 3).map((cell) => (
+                <Cell key={cell.animalId}>
+                  <LegCellFigures cell={cell} outOfDate={outOfDate} />
+                </Cell>
+              ))}
+              <Cell className="fig max-w-10">{leg.conditionNumbers.join(' ')}</Cell>
+            </tr>
+          ))}
+        </tbody>
+      </Ledger>
+    </div>
+  ))
+}
+
+function AnimalHeads({ animals }: { animals: readonly AnimalView[] }) {
+  return animals.map((animal) => (
+    <Head key={animal.animalId}>
+      <span className="crate mr-1.5 text-[1rem] text-ink">{animal.crateLetter}</span>
+      {animal.name}
+    </Head>
+  ))
 }
 
 /** Start and end on the clock of each place; the day where it is another than the start's. */

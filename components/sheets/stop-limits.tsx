@@ -53,12 +53,16 @@ function StopFigure({ words, c, f }: { words: string; c: number | null; f: numbe
 /** Legs with a limit of their own, because their planned air already lies outside the strictest one. */
 function OtherLegs({ limit: { byLeg, strictest } }: { limit: StopLimitView }) {
   const other = byLeg.filter((leg) => !leg.plannedInside && !sameStop(leg, strictest))
-  if (other.length === 0) return null
-  return (
-    <p className="text-small text-mute">
-      {other.map((leg) => `Leg ${leg.ordinal}: ${airWords(leg)}`).join('. ')}
+  const words = [...new Set(other.map(airWords))]
+  return words.map((air) => (
+    <p key={air} className="text-small text-mute">
+      {legsWords(other.filter((leg) => airWords(leg) === air).map(({ ordinal }) => ordinal))}: {air}
     </p>
-  )
+  ))
+}
+
+function legsWords(ordinals: readonly number[]): string {
+  return `${ordinals.length === 1 ? 'Leg' : 'Legs'} ${ordinals.join(', ')}`
 }
 
 function sameStop(a: AirStop, b: AirStop): boolean {

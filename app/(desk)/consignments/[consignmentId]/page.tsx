@@ -3,7 +3,7 @@ import { notFound } from 'next/navigation'
 import { ActsBar } from '@/components/consignments/acts-bar'
 import { AssessAgain } from '@/components/consignments/assess-again'
 import { ConsignmentPage } from '@/components/consignments/consignment-page'
-import { mainAct } from '@/components/consignments/main-act'
+import { absoluteWords, mainAct } from '@/components/consignments/main-act'
 import { Page } from '@/components/ui/section'
 import { requireActor } from '@/lib/auth/actor'
 import { loadDeskPage } from '@/lib/domain/consignments/desk-page'
@@ -34,6 +34,7 @@ export default async function ConsignmentRoute({
   const { animal } = await searchParams
   const animals = page.sheet.animals
   const chosen = animals.find(({ animalId }) => animalId === animal) ?? worst(animals)
+  const absolute = row.outOfDate ? null : absoluteWords(page.sheet.findings)
   return (
     <Page>
       <ConsignmentPage
@@ -45,7 +46,11 @@ export default async function ConsignmentRoute({
             consignmentId={id}
             mark={row.mark}
             acts={acts}
-            main={mainAct(row.state, acts, row.outOfDate || row.verdict === null)}
+            main={mainAct(row.state, acts, {
+              needsAssessment: row.outOfDate || row.verdict === null,
+              absolute: absolute !== null,
+            })}
+            absolute={absolute}
             actions={{ assess, submit, release, confirmAir: confirmAirOf, cancel, depart, deliver, stop }}
             readiness={page.readiness}
             working={working}
