@@ -8,8 +8,8 @@ const share = (what: string) => figure({ what, unit: '', min: 0, max: 1 })
 const multiple = (what: string) => figure({ what, unit: '', min: 0, max: 50 })
 const band = z
   .tuple([
-    figure({ what: 'Band start', unit: 'K', min: -20, max: 20 }),
-    figure({ what: 'Band end', unit: 'K', min: -20, max: 20 }),
+    figure({ what: 'Band start', unit: 'K', min: -100, max: 100 }),
+    figure({ what: 'Band end', unit: 'K', min: -100, max: 100 }),
   ])
   .readonly()
 
