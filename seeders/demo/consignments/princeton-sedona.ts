@@ -91,7 +91,8 @@ export const princetonSedona: DemoConsignment = {
           minutes: 150,
           surroundings: held(20, 50, 0.15, jersey),
           inCharge: TALUS,
-          stops: [{ minute: 30, kind: 'water' }],
+          delay: [15, 45],
+          stops: [{ minute: 120, kind: 'water' }],
         },
         {
           kind: 'ramp',
@@ -153,6 +154,7 @@ export const princetonSedona: DemoConsignment = {
           minutes: 130,
           surroundings: van(outside(24, 25, 3, 500), 19),
           inCharge: DESK,
+          stops: [{ minute: 10, kind: 'water' }],
         },
       ]),
     }
