@@ -43,7 +43,8 @@ export async function act<T>(deed: Deed, work: (tx: Transaction) => Promise<Done
       return done.result
     })
   } catch (error) {
-    if (isDuplicate(error)) {
+    // Of two presses at one moment the second waits, and then finds the deed done: it gets the answer of the first.
+    if (isDuplicate(error) || isSteadfoldError(error)) {
       const first = await earlierAnswer<T>(deed)
       if (first) return first.result
     }

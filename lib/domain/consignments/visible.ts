@@ -65,10 +65,11 @@ export async function factsOf(row: Consignment, tx?: Transaction): Promise<Consi
 async function driversInForce(row: Consignment, tx?: Transaction): Promise<number[]> {
   if (row.inForceSnapshotHash === null) return []
   const kept = await models.Snapshot.findByPk(row.inForceSnapshotHash, {
-    attributes: [[literal("JSON_EXTRACT(body, '$.plan.legs[*].driverId')"), 'body']],
+    attributes: [[literal("JSON_EXTRACT(body, '$.plan.legs[*].driverId')"), 'driverIds']],
     transaction: tx ?? null,
   })
-  const ids: unknown = kept === null ? [] : JSON.parse(kept.body)
+  // The driver hands JSON over parsed; null drivers stand among the numbers.
+  const ids: unknown = kept?.get('driverIds')
   return Array.isArray(ids) ? ids.filter((id): id is number => typeof id === 'number') : []
 }
 
