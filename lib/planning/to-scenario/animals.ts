@@ -53,22 +53,25 @@ function isStirring({ kind, flightPhase }: Pick<PlanLeg, 'kind' | 'flightPhase'>
   return kind === 'ramp' || kind === 'border' || (kind === 'flight' && flightPhase !== 'airborne')
 }
 
-/** Meals and water before departure are told on the clock of the first place, water on the way by the planned stops. */
+/** Meals and water before departure are told on the clock of the first place, those on the way by the planned stops. */
 function fedAndWatered(plan: Plan, animal: PlanAnimal, timeline: Timeline, departureMs: number) {
   const fedMs = instantAtStart(animal.lastFedLocal, timeline)
   const wateredMs = instantAtStart(animal.lastWateredLocal, timeline)
   const hoursSinceFed = fedMs === null ? null : (departureMs - fedMs) / 3_600_000
   const wateredMin = wateredMs === null ? null : (wateredMs - departureMs) / 60_000
-  const onTheWay = plan.legs.flatMap((leg, index) => {
-    const startMs = timeline.legs[index]?.startMs
-    if (startMs == null) return []
-    const startMin = (startMs - departureMs) / 60_000
-    return leg.stops.filter(({ kind }) => kind === 'water').map(({ minute }) => startMin + minute)
-  })
-  const water = [...(wateredMin !== null && isBefore(wateredMin) ? [wateredMin] : []), ...onTheWay]
+  const onTheWay = (wanted: 'water' | 'food') =>
+    plan.legs.flatMap((leg, index) => {
+      const startMs = timeline.legs[index]?.startMs
+      if (startMs == null) return []
+      const startMin = (startMs - departureMs) / 60_000
+      return leg.stops.filter(({ kind }) => kind === wanted).map(({ minute }) => startMin + minute)
+    })
+  const water = [...(wateredMin !== null && isBefore(wateredMin) ? [wateredMin] : []), ...onTheWay('water')]
+  const food = onTheWay('food')
   return {
     ...(hoursSinceFed !== null && hoursSinceFed >= 0 && hoursSinceFed <= 240 ? { hoursSinceFed } : {}),
     ...(water.length === 0 ? {} : { waterOfferedMin: water.sort((a, b) => a - b) }),
+    ...(food.length === 0 ? {} : { foodOfferedMin: food.sort((a, b) => a - b) }),
   }
 }
 
