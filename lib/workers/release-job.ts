@@ -29,7 +29,8 @@ export async function releaseJob(payload: unknown, clock: () => Date): Promise<v
 }
 
 async function sheetPaper({ sheet }: PreparedRelease, holder: Signer): Promise<IssuedPaper> {
-  const view = buildSheetView(sheet)
+  // The sheet speaks of the release it is part of: its edge would say that nothing is released.
+  const view = buildSheetView({ ...sheet, consignment: { ...sheet.consignment, state: 'released' } })
   const { bytes, pages } = await renderSheet(view)
   const sealed = await seal(bytes, holder, sealing('Go/no-go sheet as released', sheet.madeAtMs))
   return { kind: 'go_no_go', code: sheet.documentCode ?? '', bytes: sealed, pages, view }
