@@ -67,7 +67,7 @@ export const dog: Profile = {
   coatConductivityWmK: memory(0.045, 'W/mK', 'fur 0.036–0.055'),
   windPenalty: WIND_SHORT,
   oxygenExtraction: EXTRACTION_MAMMAL,
-  pantingMultiple: fitted(6.1, '× breath at rest', TRIALS),
+  pantingMultiple: fitted(6.2, '× breath at rest', TRIALS),
   pantingCost: fitted(0.5, '× basal', TRIALS),
   exhaled: NOSE_MAMMAL,
   wettednessBase: memory(0.02, '', 'skin, dry'),

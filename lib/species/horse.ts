@@ -18,10 +18,7 @@ export const horse: Profile = {
     criticalLowC: limitC(35.5, 'above shivering failure'),
     alarmLowC: limitC(36.8, '1.3 °C above critical'),
     alarmHighC: limitC(39.5, '1 °C under critical'),
-    criticalHighC: limitC(
-      40,
-      'hard-worked horses are stopped at 41 °C; fatal heat stroke is recorded from 41.5 °C',
-    ),
+    criticalHighC: limitC(40.5, '0.5 °C under the 41 °C at which worked horses are stopped'),
   },
   airFloorC: judged(
     -20,

@@ -134,9 +134,10 @@ function floorFigures(crate: Crate, bodies: readonly Body[]) {
     bedHeatJK: Math.max(500, bedKg * bed.heatJkgK + boardJK + beddingWaterKg(crate) * 4186),
     bedAirWK: BED_AIR_FILM * (areaM2 - coveredM2),
     bedWallWK: BED_RADIANT_FILM * (areaM2 - coveredM2),
-    bedDeckWK: areaM2 / (bedM2KW / 2 + boardM2KW + gapM2KW),
+    // The node lies half-way through bedding and board together.
+    bedDeckWK: areaM2 / ((bedM2KW + boardM2KW) / 2 + gapM2KW),
     bedM2: areaM2 - coveredM2,
     bedHalfKg: HALF_WET_KGM2 * areaM2,
-    floorM2KW: bedM2KW / 2,
+    floorM2KW: (bedM2KW + boardM2KW) / 2,
   }
 }

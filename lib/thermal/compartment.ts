@@ -7,14 +7,17 @@ import { cbrt } from './elementary'
 import { GRAVITY, KELVIN } from './constants'
 import type { Outer } from './crate'
 
-/** An enclosed space on one leg: air with vapour and CO2, and an inner mass (walls, lining, load) that holds most of the heat. */
+/**
+ * An enclosed space on one leg: air with vapour and CO2, and an inner mass (lining, seats, load) that holds most of the heat and takes
+ * most of the sun. The stated UA runs from the air: sun of Q watts raises it by Q/UA in the end.
+ */
 export interface Compartment {
   id: string
   pressureKPa: number
   volumeM3: number
   airHeatJK: number
   massHeatJK: number
-  /** Air to mass, mass to outside, W/K; in series they give the stated UA. */
+  /** Air to inner mass, and the stated UA from air to outside, W/K. */
   insideWK: number
   outsideWK: number
   condensingM2: number
@@ -56,10 +59,14 @@ export interface CompartmentRates {
   outCo2M3S: number
 }
 
+/** Film inside the shell with its long-wave part, W/m²K. */
+const SHELL_FILM = 8
 /** Film between air and inner surfaces of a vehicle or hold, W/m²K, convective. */
 const INNER_FILM = 4
 /** Sun through the glass falls on the inside; a share warms the air within minutes (judgement). */
 const SUN_TO_AIR = 0.3
+/** How much colder the air leaves a cooling coil (judgement); the stated capacity is the sensible part. */
+const COIL_K = 10
 /** A thermostat goes from idle to full over half a kelvin. */
 const THERMOSTAT_K = 0.5
 
@@ -71,15 +78,14 @@ export function compartmentOf(
 ): Compartment {
   const side = cbrt(space.volumeM3)
   const innerM2 = 6 * side * side
-  const insideWK = Math.max(INNER_FILM * innerM2, 2 * space.heatTransferWK)
   return {
     id,
     pressureKPa,
     volumeM3: space.volumeM3,
     airHeatJK: 2 * airHeatJM3K(20, pressureKPa) * space.volumeM3,
     massHeatJK: Math.max(1000, space.interiorMassKJK * 1000),
-    insideWK,
-    outsideWK: 1 / (1 / Math.max(space.heatTransferWK, 1e-6) - 1 / insideWK),
+    insideWK: INNER_FILM * innerM2,
+    outsideWK: space.heatTransferWK,
     condensingM2: innerM2,
     ventilationM3S: (space.ventilationM3h ?? 0) / 3600,
     leakageM3S: (space.leakageM3h * leakFactor) / 3600,
@@ -113,19 +119,30 @@ export function rateCompartment(
   const flow = flowM3S(space, airC, outer)
   const ventedW = rhoCp * flow * (airC - outer.airTempC)
   const insideW = space.insideWK * (airC - massC)
-  const outsideW = space.outsideWK * (massC - outer.airTempC)
+  const outsideW = space.outsideWK * (airC - outer.airTempC)
+  // Inside of the shell, where water condenses first: the share of the drop that its film takes.
+  const shellC = airC - outsideW / (SHELL_FILM * space.condensingM2)
   const vapour = vapourOf(waterKgM3, saturatedVapour(airC))
   const beta = INNER_FILM / (0.93 * rhoCp)
-  const condensed = beta * space.condensingM2 * positivePart(vapour - saturatedVapour(massC), 1e-6)
+  const condensed = beta * space.condensingM2 * positivePart(vapour - saturatedVapour(shellC), 1e-6)
+  const cooledW = coolingW(space, airC)
+  // Air leaves the coil 10 K colder and no wetter than saturated there; the rest drips off.
+  const wrungOut = (cooledW / (rhoCp * COIL_K)) * positivePart(vapour - saturatedVapour(airC - COIL_K), 1e-5)
   const vented = flow * (waterKgM3 - outer.waterKgM3)
   const ventedCo2 = flow * (co2Ppm - outer.co2Ppm)
   rates.air =
-    (load.airW + space.otherW + SUN_TO_AIR * space.sunW + conditioningW(space, airC) - insideW - ventedW) /
+    (load.airW +
+      space.otherW +
+      SUN_TO_AIR * space.sunW +
+      heatingW(space, airC) -
+      cooledW -
+      insideW -
+      outsideW -
+      ventedW +
+      latentHeatJKg(airC) * condensed) /
     space.airHeatJK
-  rates.mass =
-    (load.massW + (1 - SUN_TO_AIR) * space.sunW + insideW - outsideW + latentHeatJKg(massC) * condensed) /
-    space.massHeatJK
-  rates.water = (load.waterKgS + space.otherKgS - vented - condensed) / space.volumeM3
+  rates.mass = (load.massW + (1 - SUN_TO_AIR) * space.sunW + insideW) / space.massHeatJK
+  rates.water = (load.waterKgS + space.otherKgS - vented - condensed - wrungOut) / space.volumeM3
   rates.co2 = ((load.co2M3S + space.otherCo2M3S) * 1e6 - ventedCo2) / space.volumeM3
   rates.outAirW = ventedW
   rates.outMassW = outsideW
@@ -145,10 +162,10 @@ function flowM3S(space: Compartment, airC: number, outer: Outer): number {
   return steady + Math.sqrt(door * door + wind * wind)
 }
 
-function conditioningW(space: Compartment, airC: number): number {
-  if (!space.conditioningOn) return 0
-  const excess = airC - space.setPointC
-  const cooling = space.coolingW * smoothstep(0, THERMOSTAT_K, excess)
-  const heating = space.heatingW * smoothstep(0, THERMOSTAT_K, -excess)
-  return heating - cooling
+function coolingW(space: Compartment, airC: number): number {
+  return space.conditioningOn ? space.coolingW * smoothstep(0, THERMOSTAT_K, airC - space.setPointC) : 0
+}
+
+function heatingW(space: Compartment, airC: number): number {
+  return space.conditioningOn ? space.heatingW * smoothstep(0, THERMOSTAT_K, space.setPointC - airC) : 0
 }

@@ -99,7 +99,8 @@ function effectiveOpenings(crate: Crate, onLeg: CrateOnLeg | undefined): FreeOpe
 }
 
 function seenOpenings(crate: Crate, onLeg: CrateOnLeg | undefined): (FreeOpening & { freeShare: number })[] {
-  return allOpenings(crate).map((opening) => {
+  const open = allOpenings(crate).filter((opening) => opening.areaM2 > 1e-6)
+  return open.map((opening) => {
     const heightM = opening.heightM ?? Math.min(0.6 * crate.heightM, Math.sqrt(opening.areaM2))
     const sillM = opening.sillHeightM ?? (crate.heightM - heightM) / 2
     const free = Math.max(0.01, opening.meshOpenPct / 100)
