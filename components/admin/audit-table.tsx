@@ -11,11 +11,14 @@ export function AuditTable({
   rows,
   chosenId,
   hrefOf,
+  hrefOfConsignment,
   zoneWords,
 }: {
   rows: readonly AuditRow[]
   chosenId: number | null
   hrefOf: (row: AuditRow | null) => string
+  /** All rows of the same consignment. */
+  hrefOfConsignment: (row: AuditRow) => string
   zoneWords: string
 }) {
   return (
@@ -34,7 +37,13 @@ export function AuditTable({
         </thead>
         <tbody>
           {rows.map((row) => (
-            <Row key={row.id} row={row} chosen={row.id === chosenId} hrefOf={hrefOf} />
+            <Row
+              key={row.id}
+              row={row}
+              chosen={row.id === chosenId}
+              hrefOf={hrefOf}
+              hrefOfConsignment={hrefOfConsignment}
+            />
           ))}
         </tbody>
       </Ledger>
@@ -47,10 +56,12 @@ function Row({
   row,
   chosen,
   hrefOf,
+  hrefOfConsignment,
 }: {
   row: AuditRow
   chosen: boolean
   hrefOf: (row: AuditRow | null) => string
+  hrefOfConsignment: (row: AuditRow) => string
 }) {
   const opens = row.before !== null || row.after !== null
   return (
@@ -73,7 +84,13 @@ function Row({
           <span className="text-mute"> {row.subject}</span>
           {row.note && <span className="block text-small text-mute">{row.note}</span>}
         </Cell>
-        <Cell>{row.mark && <Mark size="s">{row.mark}</Mark>}</Cell>
+        <Cell>
+          {row.mark && (
+            <Link href={hrefOfConsignment(row)} className="text-ink">
+              <Mark size="s">{row.mark}</Mark>
+            </Link>
+          )}
+        </Cell>
         <Cell className="fig text-small">{row.from}</Cell>
         <Cell>
           {opens ? (

@@ -13,7 +13,7 @@ export function CertificateFacts({ view }: { view: CertificateView }) {
           {view.subject}
         </Fact>
         <Fact caption="Issued by" whole>
-          {view.selfIssued ? 'itself' : view.issuer}
+          {view.issuer}
         </Fact>
         <Fact caption="State">
           {view.state === 'in-force' && 'In force'}
@@ -25,13 +25,10 @@ export function CertificateFacts({ view }: { view: CertificateView }) {
         <Fact caption="Serial" whole>
           <span className="fig break-all">{view.serial}</span>
         </Fact>
-        <Fact caption="SHA-256 of the certificate" whole className="desk:col-span-3">
-          <span className="fig break-all">{inGroups(view.fingerprint)}</span>
-        </Fact>
       </BoxedFacts>
       <p className="mt-3 max-w-[70ch] text-long">
         {view.selfIssued
-          ? 'The firm issued this certificate to itself. A PDF reader says that the file is unaltered, and that it does not know who signed it until the certificate is added to its trusted ones. Compare the hash above by telephone before trusting it.'
+          ? 'This installation issued its certificate to itself, from a root it made at its first start. A PDF reader says that the file is unaltered, and that it does not know who signed it until that root is added to its trusted ones. Compare the serial by telephone before trusting it.'
           : 'Somebody else vouches for this certificate. A PDF reader that trusts the issuer says so by itself.'}
       </p>
       <p className="mt-2 max-w-[70ch] text-mute">
@@ -44,8 +41,4 @@ export function CertificateFacts({ view }: { view: CertificateView }) {
 
 function time({ ms, zone }: Moment): string {
   return `${dayDateYear(ms, zone)}, ${localTimeWithOffset(ms, zone)}`
-}
-
-function inGroups(hex: string): string {
-  return hex.match(/.{1,8}/g)?.join(' ') ?? hex
 }

@@ -26,14 +26,6 @@ export interface RegistrationView {
   checked: Moment | null
 }
 
-export interface UserPage {
-  rows: UserRow[]
-  total: number
-  /** Address of the neighbouring pages; null where there is none. */
-  before: string | null
-  after: string | null
-}
-
 export type MailState = 'waiting' | 'sending' | 'sent' | 'uncertain' | 'failed'
 
 export interface MailRow {
@@ -56,13 +48,6 @@ export interface MailDetail extends MailRow {
   attachments: { documentId: number; words: string }[]
 }
 
-export interface MailPage {
-  rows: MailRow[]
-  counts: Record<MailState, number>
-  newer: string | null
-  older: string | null
-}
-
 export interface AuditRow {
   id: number
   at: Moment
@@ -80,12 +65,6 @@ export interface AuditRow {
   refused: boolean
 }
 
-export interface AuditPage {
-  rows: AuditRow[]
-  newer: string | null
-  older: string | null
-}
-
 /** What the certificate that seals papers says of itself. */
 export interface CertificateView {
   subject: string
@@ -94,7 +73,5 @@ export interface CertificateView {
   validFrom: Moment
   validTo: Moment
   selfIssued: boolean
-  /** SHA-256 of its DER form, lower-case hexadecimal. */
-  fingerprint: string
   state: 'in-force' | 'not-yet' | 'ended'
 }
