@@ -27,8 +27,10 @@ function processesOf(folder) {
  */
 export async function startApplication({ folder, host, port, variables, dev = false, say }) {
   const note = processesOf(folder)
+  // The account that may change the schema stays out of reach of what faces the network.
+  const { DATABASE_MIGRATE_USER: _user, DATABASE_MIGRATE_PASSWORD: _password, ...inherited } = process.env
   const env = {
-    ...process.env,
+    ...inherited,
     ...variables,
     STEADFOLD_FOLDER: folder,
     NODE_ENV: dev ? 'development' : 'production',

@@ -25,8 +25,8 @@ export function migrateUp(variables) {
 
 /**
  * Makes a database of this machine ready: accounts, schema, rights, reference rows, and the demo where nobody has an
- * account yet. What is ready already is told by a glance and skipped. Resolves with what the demo printed, if it ran now
- * or earlier (its sign-ins).
+ * account yet. What is ready already is told by a glance and skipped. `signIns` is what the demo printed, if it ran now or
+ * earlier; `empty` says that nobody has an account.
  */
 export async function prepareDatabase({ server, database, secrets, variables, folder, demo, say }) {
   await createDatabaseAndUsers(server, database, secrets)
@@ -71,9 +71,9 @@ async function seed({ server, database, variables, folder, demo, say }) {
     )
     const fresh = { reference: sources, demo: wantsDemo ? JSON.parse(printed.split('\n').at(-1)) : note.demo }
     writeFileSync(noteFile, JSON.stringify(fresh))
-    return fresh.demo ?? null
+    return { signIns: fresh.demo ?? null, empty: users === 0 && !wantsDemo }
   }
-  return users === 0 ? null : (note.demo ?? null)
+  return { signIns: users === 0 ? null : (note.demo ?? null), empty: users === 0 }
 }
 
 function hashOf(places) {

@@ -46,7 +46,7 @@ async function start() {
   const secrets = keepSecrets(dataDir)
   const mail = process.env.SMTP_URL ? undefined : await startMail()
   const rest = applicationVariables({ folder: dataDir, port, secrets, smtpUrl: mail?.smtpUrl })
-  const { variables, signIns } = ownDatabase
+  const { variables, signIns, empty } = ownDatabase
     ? await startOwnDatabase(secrets, rest)
     : await reachGivenDatabase(rest)
   if (!dev) await build(say)
@@ -54,7 +54,7 @@ async function start() {
   const application = await startApplication({ folder: dataDir, host, port, variables, dev, say: relay })
   started.push(application)
   await application.healthy()
-  welcome(rest.APP_URL, mail, signIns)
+  welcome(rest.APP_URL, mail, signIns, empty)
 }
 
 async function startOwnDatabase(secrets, rest) {
@@ -66,10 +66,8 @@ async function startOwnDatabase(secrets, rest) {
   const database = process.env.DATABASE_NAME || DATABASE
   const variables = { ...rest, ...databaseVariables(server, database, secrets) }
   const demo = process.env.DEMO !== 'no'
-  return {
-    variables,
-    signIns: await prepareDatabase({ server, database, secrets, variables, folder: dataDir, demo, say }),
-  }
+  const ready = await prepareDatabase({ server, database, secrets, variables, folder: dataDir, demo, say })
+  return { variables, ...ready }
 }
 
 /** A database run by somebody else: its accounts and rights are theirs to give (README), its schema is ours. */
@@ -77,7 +75,7 @@ async function reachGivenDatabase(rest) {
   say(`Using the database at ${process.env.DATABASE_SOCKET || process.env.DATABASE_HOST || '127.0.0.1'} …`)
   await migrateUp(rest)
   await runTypescript('lib/local/seed.ts', ['reference'], rest)
-  return { variables: rest, signIns: null }
+  return { variables: rest, signIns: null, empty: false }
 }
 
 async function startMail() {
@@ -126,7 +124,7 @@ function stopAndExit(code) {
   return stopping
 }
 
-function welcome(address, mail, signIns) {
+function welcome(address, mail, signIns, empty) {
   console.log(`\nSteadfold is ready: ${address}`)
   if (mail) console.log(`Mails are kept on this machine, and delivered nowhere: ${mail.webUrl}`)
   if (signIns?.people?.length > 0) {
@@ -134,6 +132,7 @@ function welcome(address, mail, signIns) {
     for (const { role, name, email } of signIns.people)
       console.log(`  ${role.padEnd(11)} ${email.padEnd(30)} ${name}`)
   }
+  if (empty) console.log('\nNobody has an account yet: npm run first-admin -- "Name" name@example.org')
   console.log('\nCtrl-C stops everything.')
 }
 
