@@ -1,6 +1,8 @@
 import type { ReactNode } from 'react'
 import { SlatMark } from './brand'
 
+const CAUTION =
+  'A decision aid. It takes the place of no veterinarian, no acceptance rule of a carrier and no law of the countries crossed.'
 const SLATS = [28, 188, 348, 508] as const
 const POSTS = [96, 700, 1316] as const
 
@@ -10,28 +12,12 @@ const POSTS = [96, 700, 1316] as const
  */
 export function CrateSide({ firm, line, children }: { firm: string; line: string; children: ReactNode }) {
   return (
-    <div className="relative desk:h-[700px] desk:overflow-hidden">
+    <div className="relative overflow-x-clip min-[900px]:min-h-[700px]">
       <Slats />
-      <div className="relative mx-auto max-w-[1440px] desk:h-full">
-        <div className="hidden desk:block">
-          <p className="absolute left-[182px] top-[54px] font-head text-section font-bold">{firm}</p>
-          <p className="absolute left-[182px] top-[84px] text-long">{line}</p>
-          <p
-            aria-hidden="true"
-            className="crate absolute left-[180px] top-[216px] text-[86px] leading-[72px] max-board:text-[56px]"
-          >
-            STEADFOLD
-          </p>
-          <p className="absolute left-[182px] top-[542px] max-w-[440px]">
-            A decision aid. It takes the place of no veterinarian, no acceptance rule of a carrier and no law
-            of the countries crossed.
-          </p>
-        </div>
-        <div className="flex items-center gap-2 px-4 pb-3 pt-4 desk:hidden">
-          <SlatMark width={34} />
-          <span className="crate text-mark-phone">STEADFOLD</span>
-        </div>
-        <div className="border-2 border-ink bg-sheet max-desk:relative max-desk:border-x-0 desk:absolute desk:right-6 desk:top-[92px] desk:w-[440px] min-[1290px]:right-[184px]">
+      <div className="relative mx-auto max-w-[1440px] min-[900px]:min-h-[700px] min-[900px]:pb-8 min-[900px]:pt-[92px]">
+        <SideWords firm={firm} line={line} />
+        <NarrowSide />
+        <div className="relative border-2 border-ink bg-sheet max-[899px]:border-x-0 min-[900px]:ml-auto min-[900px]:mr-6 min-[900px]:w-[440px] min-[1290px]:mr-[184px]">
           {children}
         </div>
       </div>
@@ -39,10 +25,42 @@ export function CrateSide({ firm, line, children }: { firm: string; line: string
   )
 }
 
+/** What is painted on the slats. */
+function SideWords({ firm, line }: { firm: string; line: string }) {
+  return (
+    <div className="hidden min-[900px]:block">
+      <p className="absolute left-[182px] top-[54px] font-head text-section font-bold">{firm}</p>
+      <p className="absolute left-[182px] top-[84px] text-long max-board:hidden">{line}</p>
+      <p
+        aria-hidden="true"
+        className="crate absolute left-[180px] top-[216px] text-[86px] leading-[72px] max-board:text-[56px] max-[1020px]:text-[40px]"
+      >
+        STEADFOLD
+      </p>
+      <p className="absolute left-[182px] top-[542px] max-w-[440px] max-board:max-w-[320px]">{CAUTION}</p>
+    </div>
+  )
+}
+
+/** Two slats above the label on a narrow screen. */
+function NarrowSide() {
+  return (
+    <div className="min-[900px]:hidden">
+      <div className="mt-3 flex items-center gap-2 border-y-2 border-ink bg-band px-4 py-4">
+        <SlatMark width={34} />
+        <span className="crate text-mark-phone">STEADFOLD</span>
+      </div>
+      <div aria-hidden="true" className="mt-3 h-7 border-t-2 border-ink bg-band" />
+    </div>
+  )
+}
+
 /** A ruled part of the label. */
 export function LabelPart({ children }: { children: ReactNode }) {
   return (
-    <div className="px-[22px] pb-[18px] pt-4 max-desk:px-4 [&+&]:border-t [&+&]:border-rule">{children}</div>
+    <div className="px-[22px] pb-[18px] pt-4 max-[899px]:px-4 [&+&]:border-t [&+&]:border-rule">
+      {children}
+    </div>
   )
 }
 
@@ -51,7 +69,7 @@ function Slats() {
     <>
       <svg
         aria-hidden="true"
-        className="absolute inset-0 hidden h-[700px] w-full desk:block"
+        className="absolute inset-0 hidden h-[700px] w-full min-[900px]:block"
         preserveAspectRatio="none"
       >
         {SLATS.map((y) => (
@@ -67,7 +85,7 @@ function Slats() {
         ))}
         <line x1="0" x2="100%" y1="667" y2="667" strokeWidth="2" className="stroke-ink" />
       </svg>
-      <div className="absolute inset-x-0 top-0 mx-auto hidden max-w-[1440px] desk:block">
+      <div className="absolute inset-x-0 top-0 mx-auto hidden max-w-[1440px] min-[900px]:block">
         <svg aria-hidden="true" width="1440" height="668" className="block max-w-none">
           {POSTS.map((x) => (
             <Post key={x} x={x} />

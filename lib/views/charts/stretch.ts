@@ -102,12 +102,9 @@ function legName(
   const room = xAt(time, toMin) - x - 8
   const number = String(leg.ordinal)
   const numberWidth = textWidth(number, 'head', 15, 700) + 6
-  const text = shortened(
-    `${leg.name}, ${hourMin(leg.endMin - leg.startMin)}`,
-    room - numberWidth - 16,
-    12,
-    400,
-  )
+  const space = room - numberWidth - 16
+  const whole = `${leg.name}, ${hourMin(leg.endMin - leg.startMin)}`
+  const text = textWidth(whole, 'text', 12) <= space ? whole : shortened(leg.name, space, 12, 400)
   const width = numberWidth + textWidth(text, 'text', 12) + 16
   if (room < numberWidth + 12) return []
   return [
