@@ -69,5 +69,7 @@ export const cat: Profile = {
   bands: MAMMAL_BANDS,
   shellShare: SHELL,
   snubNosedFactor: judged(0.7, '', 'flat-faced breeds lose 30 % of the extra breath'),
-  remarks: [],
+  remarks: [
+    'Some sources put a cat’s ease at 30–36 °C. That is where it rests cheapest; awake and fed in a crate the row pants from 26 °C and meets alarm at 31 °C.',
+  ],
 }

@@ -102,5 +102,8 @@ export const snubNosedDog: Profile = {
   pantingMultiple: judged(3.5, '× breath at rest', 'p_max of snub-nosed dogs 3–5 (from memory)'),
   pantingCost: judged(0.4, '× basal', 'as large as the gain of panting at 30 °C and 50 % allows'),
   snubNosedFactor: judged(1, '', 'the row holds it already'),
-  remarks: ['A snub-nosed row may never come out better than the plain row.'],
+  remarks: [
+    'A snub-nosed row may never come out better than the plain row.',
+    'No calorimetry of snub-nosed dogs was found: the row is the dog’s with less panting, and rests on judgement.',
+  ],
 }

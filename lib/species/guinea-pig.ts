@@ -64,6 +64,8 @@ export const guineaPig: Profile = {
   bands: RODENT_BANDS,
   shellShare: SHELL,
   remarks: [
+    'Alone and without a nest its cold breach lies at 19–21 °C, inside the range it is housed in; group and bed it.',
+
     '28–31 °C is where a lone guinea pig rests cheapest, not a comfort band; housed in groups and bedded it lives far cooler.',
   ],
 }

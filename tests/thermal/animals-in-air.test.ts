@@ -1,9 +1,11 @@
-import { describe, expect, it } from 'vitest'
+import { describe, expect, it, vi } from 'vitest'
 import type { ProfileValues } from '@/lib/thermal'
 import { catalogueValues } from '@/lib/species'
 import { readTable } from '../truth/read-table'
 import { saturationPressurePa } from '@/lib/thermal/psychrometrics'
 import { lastHolding, rowLike, standing } from './pen'
+
+vi.setConfig({ testTimeout: 60_000 })
 
 describe('animals in steady air against published trials', () => {
   it.each(

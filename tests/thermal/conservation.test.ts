@@ -1,8 +1,11 @@
-import { describe, expect, it } from 'vitest'
+import { describe, expect, it, vi } from 'vitest'
 import { catalogueValues } from '@/lib/species'
 import { simulate, VARIANTS, type Run } from '@/lib/thermal'
 import { first, pen, run, standing } from './pen'
 import { readScenario, scenarioNames } from './scenarios'
+
+// Whole journeys, several times over.
+vi.setConfig({ testTimeout: 60_000 })
 
 describe('heat and water add up', () => {
   it.each(scenarioNames)('%s: integrals to 1e-9, the reported track to 0.1 %%, terms to storage', (name) => {

@@ -1,7 +1,9 @@
-import { describe, expect, it } from 'vitest'
+import { describe, expect, it, vi } from 'vitest'
 import type { Variant } from '@/lib/thermal'
 import { readTable } from '../truth/read-table'
 import { first, lastHolding, peakCore, pen, run } from './pen'
+
+vi.setConfig({ testTimeout: 60_000 })
 
 const beagle = { profile: 'dog', massKg: 11 }
 const ENDPOINT_C = 42.2

@@ -1,4 +1,4 @@
-import { describe, expect, it } from 'vitest'
+import { describe, expect, it, vi } from 'vitest'
 import { catalogueValues } from '@/lib/species'
 import {
   endure,
@@ -13,6 +13,8 @@ import {
 } from '@/lib/thermal'
 import { first, pen, run } from './pen'
 import { readScenario } from './scenarios'
+
+vi.setConfig({ testTimeout: 60_000 })
 
 const reference = readScenario('reference-two-days')
 const short = readScenario('van-that-loses-its-cooling')

@@ -1,7 +1,9 @@
-import { describe, expect, it } from 'vitest'
+import { describe, expect, it, vi } from 'vitest'
 import type { EnclosedSpace, OpenAir, Scenario } from '@/lib/thermal'
 import { readTable } from '../truth/read-table'
 import { first, pen, run } from './pen'
+
+vi.setConfig({ testTimeout: 60_000 })
 
 const outside = (airTempC: number, solarWm2: number): OpenAir => ({
   type: 'open-air',
