@@ -1,8 +1,9 @@
-import { existsSync, mkdirSync, readFileSync, rmSync } from 'node:fs'
+import { mkdirSync, rmSync } from 'node:fs'
 import path from 'node:path'
 import { build, bundleWorker } from './build.mjs'
 import { root, testDataDir } from './paths.mjs'
 import { run } from './run.mjs'
+import { countTests, playwrightCounts, vitestCounts } from './test-counts.mjs'
 import { holdTestServer } from './test-database.mjs'
 import { startTestApplication } from './test-application.mjs'
 
@@ -54,17 +55,7 @@ async function vitest(project) {
       show: true,
     },
   )
-  return counts(report, code, (told) => {
-    // A file that cannot even be read has no tests to fail: it counts as one.
-    const unreadable = told.testResults.filter(
-      ({ status, assertionResults }) => status === 'failed' && assertionResults.length === 0,
-    )
-    return {
-      passed: told.numPassedTests,
-      failed: told.numFailedTests + unreadable.length,
-      skipped: told.numPendingTests + told.numTodoTests,
-    }
-  })
+  return countTests(report, code, vitestCounts)
 }
 
 async function onDatabase(undo) {
@@ -95,11 +86,7 @@ async function browser(undo) {
           show: true,
         },
       )
-      return counts(report, code, ({ stats }) => ({
-        passed: stats.expected,
-        failed: stats.unexpected + stats.flaky,
-        skipped: stats.skipped,
-      }))
+      return countTests(report, code, playwrightCounts)
     } finally {
       await application.stop()
     }
@@ -122,11 +109,4 @@ function reportFile(name) {
   const file = path.join(testDataDir, name)
   rmSync(file, { force: true })
   return file
-}
-
-/** Never better than the exit code: a run that failed without saying which test still counts as one failure. */
-function counts(report, code, read) {
-  const told = existsSync(report) ? read(JSON.parse(readFileSync(report, 'utf8'))) : { passed: 0, failed: 0 }
-  const nothing = told.passed + told.failed === 0
-  return { ...told, failed: told.failed === 0 && (code !== 0 || nothing) ? 1 : told.failed }
 }
