@@ -1,7 +1,10 @@
+'use client'
+
 import { Button } from '@/components/ui/button'
+import { useUnit } from '@/components/ui/preferences'
 import { Stamp } from '@/components/ui/stamp'
 import { Temperature } from '@/components/ui/temperature'
-import { dayDate, hourMin, localTime, minutesToSpare, zoneWithOffset } from '@/lib/views/format'
+import { airMargin, dayDate, hourMin, localTime, minutesToSpare, zoneWithOffset } from '@/lib/views/format'
 import type { LegCell, LegView, SheetView } from '@/lib/views/sheet'
 
 /** On a phone: the leg under the reading line, its verdict, and the two figures large; then the way to its neighbours. */
@@ -18,6 +21,7 @@ export function PhoneLeg({
   startOf: (index: number) => number | undefined
   onMinute: (minute: number) => void
 }) {
+  const unit = useUnit()
   const index = leg.ordinal - 1
   const step = (to: number) => {
     const minute = startOf(to)
@@ -46,16 +50,14 @@ export function PhoneLeg({
             <b>{cell.limitWords === '' ? '' : `${capital(cell.limitWords)} decides.`}</b>
           </div>
           <div className="-mx-4 grid grid-cols-2 divide-x divide-rule border-y-2 border-ink bg-sheet">
-            <Large words="Minutes to spare">
-              {cell.margin.minutes === null ? 'none' : minutesToSpare(cell.margin.minutes)}
-            </Large>
-            <Large words="Outside air to spare">
-              {cell.margin.outsideAirC === null ? (
-                'none'
-              ) : (
-                <Temperature c={cell.margin.outsideAirC} kind="air-margin" />
-              )}
-            </Large>
+            <Large
+              words="Minutes to spare"
+              figure={cell.margin.minutes === null ? 'none' : minutesToSpare(cell.margin.minutes)}
+            />
+            <Large
+              words="Outside air to spare"
+              figure={cell.margin.outsideAirC === null ? 'none' : airMargin(cell.margin.outsideAirC, unit)}
+            />
           </div>
           {cell.margin.bodyC !== null && (
             <p className="-mx-4 border-b border-rule bg-sheet px-4 py-2">
@@ -75,12 +77,15 @@ export function PhoneLeg({
   )
 }
 
-function Large({ words, children }: { words: string; children: React.ReactNode }) {
+/** A figure at 44 px with its unit small beside it. */
+function Large({ words, figure }: { words: string; figure: string }) {
+  const [value, unit] = figure.split('\u00a0')
   return (
-    <p className="px-4 py-2">
+    <p className="min-w-0 px-4 py-2">
       <span className="block text-note text-mute">{words}</span>
-      <span className="fig whitespace-nowrap text-deadline font-semibold tracking-tight [word-spacing:-.42em]">
-        {children}
+      <span className="whitespace-nowrap">
+        <span className="fig text-deadline font-semibold tracking-tight">{value}</span>
+        {unit && <span className="ml-2 text-phone">{unit}</span>}
       </span>
     </p>
   )

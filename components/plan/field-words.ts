@@ -134,6 +134,11 @@ function labelOf(keys: readonly string[]): string {
   return FIELDS[named.slice(-2).join('.')]?.[0] ?? FIELDS[named.at(-1) ?? '']?.[0] ?? ''
 }
 
+/** Whose field it is: "Crate B", "Leg 6", "Consignor"; empty for the plan's own. */
+export function ownerWords(plan: Plan, path: string): string {
+  return ownerOf(plan, path.split('.'))
+}
+
 function ownerOf(plan: Plan, keys: readonly string[]): string {
   const [head = '', position] = keys
   const index = Number(position)

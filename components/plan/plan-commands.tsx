@@ -115,7 +115,9 @@ function Failure({ saving }: { saving: PlanSaving }) {
       <ErrorSummary
         title={failure.message}
         issues={failure.issues.map(({ path, message }) => ({ fieldId: planPathId(path), message }))}
-      />
+      >
+        <p>Nothing was saved. Everything typed is still here.</p>
+      </ErrorSummary>
     </div>
   )
 }

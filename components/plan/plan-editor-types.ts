@@ -3,11 +3,11 @@ import type { Plan, SavePlan } from '@/lib/schemas/plan'
 
 /** What a refused save brings along: what somebody else saved meanwhile. */
 export interface SavedMeanwhile {
-  theirs: Plan
+  plan: Plan
   /** To be sent with the next save. */
   version: number
-  savedBy: string
-  savedAt: string
+  by: string
+  atMs: number
 }
 
 export interface SavedPlan {
@@ -37,10 +37,9 @@ export interface EditedConsignment {
 }
 
 /** The details of a `conflict`, read with care: they crossed a wire. */
-export function savedMeanwhile(details: Record<string, unknown>): SavedMeanwhile | null {
-  const { theirs, version, savedBy, savedAt } = details
-  if (typeof version !== 'number' || typeof savedBy !== 'string' || typeof savedAt !== 'string') return null
-  return typeof theirs === 'object' && theirs !== null
-    ? { theirs: theirs as Plan, version, savedBy, savedAt }
-    : null
+export function savedMeanwhile({ meanwhile }: Record<string, unknown>): SavedMeanwhile | null {
+  if (typeof meanwhile !== 'object' || meanwhile === null) return null
+  const { plan, version, by, atMs } = meanwhile as Record<string, unknown>
+  if (typeof version !== 'number' || typeof by !== 'string' || typeof atMs !== 'number') return null
+  return typeof plan === 'object' && plan !== null ? { plan: plan as Plan, version, by, atMs } : null
 }

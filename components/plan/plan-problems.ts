@@ -33,19 +33,31 @@ export function problemsOf(values: Plan, knowledge: PlanningKnowledge): Problem[
   return [...form, ...assess]
 }
 
-function withoutUnreadable(values: Plan, issues: readonly { code: string; path: PropertyKey[] }[]): Plan {
+/** The same plan with what cannot be read left empty, or at nothing where the plan cannot hold an empty figure. */
+function withoutUnreadable(values: Plan, issues: readonly Issue[]): Plan {
   const copy = structuredClone(values)
+  put(copy, issues, null)
+  const still = planSchema.safeParse(copy)
+  if (!still.success) put(copy, still.error.issues, 0)
+  return copy
+}
+
+interface Issue {
+  code?: string
+  path: PropertyKey[]
+}
+
+function put(plan: Plan, issues: readonly Issue[], value: null | 0): void {
   for (const { code, path } of issues) {
     if (code !== 'invalid_type' && code !== 'invalid_union') continue
     const holder = path
       .slice(0, -1)
-      .reduce<unknown>((value, key) => (value as Record<PropertyKey, unknown>)?.[key], copy)
+      .reduce<unknown>((inner, key) => (inner as Record<PropertyKey, unknown> | null)?.[key], plan)
     const key = path.at(-1)
     if (typeof holder === 'object' && holder !== null && key !== undefined) {
-      ;(holder as Record<PropertyKey, unknown>)[key] = null
+      ;(holder as Record<PropertyKey, unknown>)[key] = value
     }
   }
-  return copy
 }
 
 function isEmpty(value: unknown): boolean {

@@ -3,7 +3,7 @@
 import { useFormContext } from 'react-hook-form'
 import { Notice } from '@/components/ui/notice'
 import type { Plan } from '@/lib/schemas/plan'
-import { fieldWords } from './field-words'
+import { fieldWords, ownerWords } from './field-words'
 import { usePlanPage, useProblems } from './plan-context'
 
 /** Every reason why the plan cannot be assessed, all at once, each with a way to its field. */
@@ -41,7 +41,7 @@ export function PlanReasons() {
                   <button type="button" className="link text-left" onClick={() => goTo(path)}>
                     {words === '' ? 'The plan' : words}
                   </button>
-                  : {message}
+                  : {withoutOwner(message, ownerWords(getValues(), path))}
                 </span>
               </li>
             )
@@ -50,4 +50,11 @@ export function PlanReasons() {
       </Notice>
     </div>
   )
+}
+
+/** The link says whose it is already: "Leg 6, telephone" needs no second "Leg 6 (flight):". */
+function withoutOwner(message: string, owner: string): string {
+  if (owner === '' || !message.startsWith(owner)) return message
+  const rest = message.slice(owner.length).replace(/^(?: \([^)]*\))?[,:]? ?/, '')
+  return rest === '' ? message : rest
 }

@@ -103,11 +103,8 @@ export function usePlanSaving({
       }
       const meanwhile = result.code === 'conflict' ? savedMeanwhile(result.details) : null
       if (meanwhile !== null) {
-        takeIn(saved.plan, plan, meanwhile.theirs, {
-          by: meanwhile.savedBy,
-          atMs: Date.parse(meanwhile.savedAt),
-        })
-        setSaved({ plan: meanwhile.theirs, version: meanwhile.version, atMs: null })
+        takeIn(saved.plan, plan, meanwhile.plan, meanwhile)
+        setSaved({ plan: meanwhile.plan, version: meanwhile.version, atMs: null })
         return null
       }
       for (const issue of result.issues) {
