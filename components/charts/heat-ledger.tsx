@@ -6,7 +6,7 @@ import { useWidth } from '@/components/hooks/use-width'
 import { Cell, Head, Ledger, Row, RowHead } from '@/components/ui/ledger'
 import { TableToggle } from '@/components/ui/table-toggle'
 import { SCREENS } from '@/lib/tokens'
-import { localTime, withUnit } from '@/lib/views/format'
+import { localTime } from '@/lib/views/format'
 import { LEFT, READING_COLUMN } from '@/lib/views/charts/corridor'
 import { xAt } from '@/lib/views/charts/frame'
 import { ledger, ledgerAt } from '@/lib/views/charts/ledger'
@@ -101,7 +101,10 @@ function ReadingColumn({
 
 /** The accounts of one minute as a small ledger: bars, figures, double rule, sum. */
 export function LedgerNow({ reading, time }: { reading: ReturnType<typeof ledgerAt>; time: string }) {
-  const largest = Math.max(...[...reading.accounts, reading.storage].map(({ watts }) => Math.abs(watts)), 0.1)
+  const largest = Math.max(
+    ...[...reading.accounts, reading.storage].map(({ watts }) => Math.abs(watts)),
+    1e-6,
+  )
   return (
     <Ledger caption={`Heat balance at ${time}, watts`}>
       <thead className="sr-only">
@@ -147,6 +150,6 @@ function LedgerRow({ row, largest, sum = false }: { row: LedgerReading; largest:
 }
 
 function summaryOf(reading: ReturnType<typeof ledgerAt>, time: string): string {
-  const parts = reading.accounts.map((row) => `${row.name.toLowerCase()} ${withUnit(row.watts, 'W', 1)}`)
-  return `Heat balance at ${time}: ${parts.join(', ')}; stored ${withUnit(reading.storage.watts, 'W', 1)}.`
+  const parts = reading.accounts.map((row) => `${row.name.toLowerCase()} ${row.value}\u00a0W`)
+  return `Heat balance at ${time}: ${parts.join(', ')}; stored ${reading.storage.value}\u00a0W.`
 }

@@ -69,7 +69,7 @@ export function corridor(input: CorridorInput, options: CorridorOptions): Corrid
     ...headCaptions(time.x0 - 10, heads, input.unit),
     ...channel(time, temp, input, { hatchScale: options.hatchScale, strongLegs: strong }),
     ...bodyAxis(time, temp, input.unit),
-    words(time.x0 - 10, top - 3, input.unit === 'c' ? 'Body °C' : 'Body °F', { anchor: 'end', ink: 'mute' }),
+    words(time.x0 - 10, top - 9, input.unit === 'c' ? 'Body °C' : 'Body °F', { anchor: 'end', ink: 'mute' }),
     ...wordsInChannel(time, temp, input),
     ...air.marks,
     ...(hasAir(input) ? airCaptions(time, input, air) : []),
@@ -114,6 +114,7 @@ function wordsInChannel(time: TimeFrame, temp: TempFrame, input: CorridorInput):
     lineYs,
   )
   const taken = [...limits.taken, ...narrow.taken, ...callouts.taken]
+  const deciders = input.deciding ? [input.deciding] : []
   const deciding = input.deciding
     ? trackLabel(time, temp, input.deciding, input.deciding.words, taken, { lineYs })
     : { marks: [], taken: [] }
@@ -122,6 +123,7 @@ function wordsInChannel(time: TimeFrame, temp: TempFrame, input: CorridorInput):
         weight: 400,
         beside: true,
         lineYs,
+        others: deciders,
       })
     : { marks: [], taken: [] }
   return [...limits.marks, ...typical.marks, ...deciding.marks, ...narrow.marks, ...callouts.marks]

@@ -119,6 +119,8 @@ function byRoom(legs: readonly ChartLeg[], verdict: Verdict): ChartLeg[] {
 function callout(charts: SheetCharts, chart: AnimalChart, leg: ChartLeg, unit: TempUnit): Callout | null {
   const { deciding, limits } = chart
   if (!deciding || !leg.head || leg.head.minutes === null) return null
+  // Effort, law and carrier's rules decide legs too, but have no place on a scale of body temperature.
+  if (!/alarm|critical/.test(leg.head.limitWords)) return null
   const samples = stretchOf(deciding.minutes, deciding.bodyC, leg.startMin, leg.endMin)
   const sign = leg.head.limitWords.includes('low') ? -1 : 1
   const worst = extreme(samples, sign)

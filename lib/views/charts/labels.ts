@@ -130,7 +130,15 @@ export function trackLabel(
     weight = 600,
     beside = false,
     lineYs = [],
-  }: { size?: number; weight?: 400 | 600; beside?: boolean; lineYs?: readonly number[] } = {},
+    others = [],
+  }: {
+    size?: number
+    weight?: 400 | 600
+    beside?: boolean
+    lineYs?: readonly number[]
+    /** Other tracks, which the words must not hide. */
+    others?: readonly Track[]
+  } = {},
 ): Placed {
   const width = textWidth(text, 'text', size, weight) + 2 * PAD
   const height = size + 6
@@ -152,6 +160,7 @@ export function trackLabel(
       const box = { x, y, width, height }
       if (y < temp.top || y + height > temp.foot || taken.some((other) => overlap(box, other))) continue
       if (lineYs.some((lineY) => lineY > y - 3 && lineY < y + height + 3)) continue
+      if (hiding(time, temp, box, others, []) > 0) continue
       if (!best || cost < best.cost - 0.5) best = { box, cost }
     }
   }
@@ -200,11 +209,14 @@ export function hiding(
 }
 
 /** A mark of the room between track and limit, where it is narrow: an upright with feet and the distance. */
-export function dimension(x: number, fromY: number, toY: number, text: string): Placed {
-  const top = Math.min(fromY, toY)
-  const foot = Math.max(fromY, toY)
+export function dimension(x: number, trackY: number, limitY: number, text: string): Placed {
+  const top = Math.min(trackY, limitY)
+  const foot = Math.max(trackY, limitY)
   const width = textWidth(text, 'fig', 12) + 8
-  const box = { x: x + 5, y: (top + foot) / 2 - 9, width, height: 18 }
+  // Too short for its own figure: that stands on the track's far side, on bare paper.
+  const short = foot - top < 22
+  const y = short ? (trackY < limitY ? top - 22 : foot + 4) : (top + foot) / 2 - 9
+  const box = { x: short ? x - width / 2 : x + 5, y, width, height: 18 }
   return {
     marks: [
       line({ x, y: top }, { x, y: foot }, { stroke: 'ink', strokeWidth: 1.25 }),

@@ -17,9 +17,12 @@ export const ACCOUNTS = [
 export type AccountKey = (typeof ACCOUNTS)[number][0]
 
 const MEANS_MIN = [5, 10, 15, 30, 60, 120] as const
-const MOST_PX_PER_W = 1.7
-/** All five accounts together never take more height than this. */
+/** What a dog of some 8 kg gets; a horse gets less and a chick more, and the mark beside the bars says how much. */
+const USUAL_PX_PER_W = 1.7
+/** All accounts and storage together never take more height than this, and never less than a third of it. */
 const ROOM_PX = 150
+
+const MARKS_W = [0.01, 0.02, 0.05, 0.1, 0.2, 0.5, 1, 2, 5, 10, 20, 50, 100, 200, 500, 1000] as const
 
 export interface LedgerInput {
   heat: HeatTrack
@@ -58,10 +61,11 @@ export function ledger(
   const baselines: number[] = []
   const top = 24
   let y = top
-  for (const { name, means } of accounts) {
+  for (const [index, { name, means }] of accounts.entries()) {
     const up = Math.max(0, ...means) * pxPerW
     const down = Math.max(0, ...means.map((watts) => -watts)) * pxPerW
-    const base = y + Math.max(up, 7) + 4
+    // The first account leaves room for the mark of the scale and its words.
+    const base = y + Math.max(up, index === 0 ? 36 : 7) + 4
     baselines.push(base)
     marks.push(
       rect(
@@ -106,17 +110,35 @@ export interface LedgerReading {
   value: string
 }
 
-/** The accounts at a minute, rounded to a tenth, and their sum: the printed storage is the sum of the printed terms. */
+/** The accounts at a minute, rounded as they print, and their sum: the printed storage is the sum of the printed terms. */
 export function ledgerAt(
   heat: HeatTrack,
   minute: number,
 ): { accounts: LedgerReading[]; storage: LedgerReading } {
-  const accounts = ACCOUNTS.map(([key, name]) => {
-    const watts = Math.round(valueAt(heat.minutes, heat[key], minute) * 10) / 10
-    return { name, watts, value: signed(watts, 1) }
+  const decimals = decimalsOf(heat)
+  const scale = 10 ** decimals
+  const units = ACCOUNTS.map(([key, name]) => ({
+    name,
+    units: Math.round(valueAt(heat.minutes, heat[key], minute) * scale),
+  }))
+  const read = (name: string, whole: number) => ({
+    name,
+    watts: whole / scale,
+    value: signed(whole / scale, decimals),
   })
-  const sum = Math.round(accounts.reduce((total, { watts }) => total + watts, 0) * 10) / 10
-  return { accounts, storage: { name: 'Storage', watts: sum, value: signed(sum, 1) } }
+  return {
+    accounts: units.map((each) => read(each.name, each.units)),
+    storage: read(
+      'Storage',
+      units.reduce((sum, each) => sum + each.units, 0),
+    ),
+  }
+}
+
+/** A chick turns over half a watt: three figures that count, whatever the animal. */
+function decimalsOf(heat: HeatTrack): 1 | 2 | 3 {
+  const most = Math.max(...heat.metabolismW.map(Math.abs))
+  return most >= 10 ? 1 : most >= 1 ? 2 : 3
 }
 
 interface Slot {
@@ -139,13 +161,14 @@ function meanOf(heat: HeatTrack, key: AccountKey, { fromMin, toMin }: Slot): num
   return inside.reduce((sum, watts) => sum + watts, 0) / inside.length
 }
 
-/** One scale for all, 1.7 px to a watt at most: an animal of a tonne gets a smaller one, and the mark says how long 20 W is. */
+/** One scale for all accounts: the usual one, unless the bars would outgrow the page or vanish. */
 function scaleOf(rows: readonly (readonly number[])[]): number {
-  const tall = rows.reduce(
-    (sum, row) => sum + Math.max(0, ...row) + Math.max(0, ...row.map((watts) => -watts)),
+  const watts = rows.reduce(
+    (sum, row) => sum + Math.max(0, ...row) + Math.max(0, ...row.map((each) => -each)),
     0,
   )
-  return tall > 0 ? Math.min(MOST_PX_PER_W, ROOM_PX / tall) : MOST_PX_PER_W
+  if (watts <= 0) return USUAL_PX_PER_W
+  return Math.min(ROOM_PX / watts, Math.max(USUAL_PX_PER_W, ROOM_PX / 3 / watts))
 }
 
 function bars(
@@ -181,7 +204,7 @@ function doubleRule(time: TimeFrame, y: number): Mark[] {
 
 /** An upright as long as a round number of watts, with the number. */
 function scaleMark(left: number, top: number, pxPerW: number, size: number): Mark[] {
-  const watts = [1, 2, 5, 10, 20, 50, 100, 200, 500, 1000].find((each) => each * pxPerW >= 22) ?? 1000
+  const watts = MARKS_W.find((each) => each * pxPerW >= 16) ?? 1000
   const long = watts * pxPerW
   const x = left - 5
   const foot = top + 4 + long
@@ -194,7 +217,11 @@ function scaleMark(left: number, top: number, pxPerW: number, size: number): Mar
         fill: 'none',
       },
     ),
-    words(left - 12, top + size, `mark: ${figure(watts)}\u00a0W`, { size, ink: 'mute', anchor: 'end' }),
+    words(left - 12, top + size, `mark: ${figure(watts, watts < 0.1 ? 2 : watts < 1 ? 1 : 0)}\u00a0W`, {
+      size,
+      ink: 'mute',
+      anchor: 'end',
+    }),
   ]
 }
 

@@ -23,8 +23,8 @@ describe('heat ledger', () => {
           storageW: [a + b + c + d + e],
         }
         const { accounts, storage } = ledgerAt(track, 0)
-        const tenths = accounts.reduce((sum, row) => sum + Math.round(written(row.value) * 10), 0)
-        expect(Math.round(written(storage.value) * 10)).toBe(tenths)
+        const thousandths = accounts.reduce((sum, row) => sum + Math.round(written(row.value) * 1000), 0)
+        expect(Math.round(written(storage.value) * 1000)).toBe(thousandths)
       }),
     )
   })
@@ -35,6 +35,31 @@ describe('heat ledger', () => {
     expect(new Set(inks.map((mark) => mark.kind === 'path' && mark.fill))).toEqual(new Set(['ink', 'rule']))
     expect(JSON.stringify(picture)).not.toContain('NaN')
     expect(picture.baselines).toHaveLength(6)
+  })
+
+  it('shows three figures that count for a chick of half a watt, and bars one can see', () => {
+    const tiny = (values: readonly number[]) => values.map((value) => value / 60)
+    const chick: HeatTrack = {
+      minutes: heat.minutes,
+      metabolismW: tiny(heat.metabolismW),
+      conductionW: tiny(heat.conductionW),
+      convectionW: tiny(heat.convectionW),
+      radiationW: tiny(heat.radiationW),
+      evaporationW: tiny(heat.evaporationW),
+      storageW: tiny(heat.storageW),
+    }
+    expect(ledgerAt(chick, 0).accounts[0]?.value).toBe('+0.400')
+    const bars = (track: HeatTrack) => {
+      const { marks } = ledger({ heat: track, legs, endMin }, { width: 1392, left: 72, right: 170 })
+      const [gain] = marks.filter(
+        (mark) => mark.kind === 'path' && mark.fill === 'ink' && mark.stroke === undefined,
+      )
+      const [, base, top] =
+        /^M[\d.]+ ([\d.]+)V([\d.]+)/.exec(gain?.kind === 'path' ? gain.d : '')?.map(Number) ?? []
+      return (base ?? 0) - (top ?? 0)
+    }
+    expect(bars(chick)).toBeGreaterThan(10)
+    expect(bars(heat)).toBeCloseTo(24 * 1.7, 0)
   })
 
   it('stays on the page for an animal a hundred times as heavy', () => {
