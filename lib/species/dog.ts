@@ -95,7 +95,7 @@ export const snubNosedDog: Profile = {
     'house backstop for crate air at 50 % relative humidity: the cold-prone snub-nosed dog of 9 kg stands at 60 % cold effort within 45 min',
   ),
   airCeilingC: judged(
-    31,
+    30,
     '°C',
     'house backstop for crate air at 50 % relative humidity: the heat-prone snub-nosed dog of 9 kg meets critical within 45 min',
   ),

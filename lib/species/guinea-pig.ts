@@ -35,7 +35,7 @@ export const guineaPig: Profile = {
     'house backstop for crate air at 50 % relative humidity: the cold-prone guinea pig of 0.8 kg, alone and without a nest, stands at 60 % cold effort within 45 min',
   ),
   airCeilingC: judged(
-    33,
+    32,
     '°C',
     'house backstop for crate air at 50 % relative humidity: the heat-prone guinea pig of 0.8 kg meets critical within 45 min',
   ),

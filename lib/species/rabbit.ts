@@ -35,7 +35,7 @@ export const rabbit: Profile = {
     'house backstop for crate air at 50 % relative humidity: the cold-prone rabbit of 2.5 kg stands at 60 % cold effort within 45 min',
   ),
   airCeilingC: judged(
-    32,
+    31,
     '°C',
     'house backstop for crate air at 50 % relative humidity: the heat-prone rabbit of 2.5 kg meets critical within 45 min',
   ),
