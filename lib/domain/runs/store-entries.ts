@@ -54,7 +54,7 @@ async function store(
   try {
     const leg = released.plan.legs.find(({ id }) => id === entry.legId)
     if (entry.legId !== null && leg === undefined) return 'This leg is not in the revision in force.'
-    const driverId = leg?.driverId ?? (drivesAny(released, actor) ? actor.id : null)
+    const driverId = leg === undefined ? (drivesAny(released, actor) ? actor.id : null) : leg.driverId
     authorize(actor, entry.kind === 'handover' ? 'run.hand-over' : 'run.enter', { driverId })
     await insert(actor, consignmentId, released.revision, entry, now)
     return null
