@@ -1,5 +1,5 @@
 import 'server-only'
-import path from 'node:path'
+import { fileURLToPath } from 'node:url'
 import { MessageChannel } from 'node:worker_threads'
 import { Piscina } from 'piscina'
 import { assess } from '@/lib/rules/assess'
@@ -21,7 +21,8 @@ export interface Assessor {
 /** Assessments in threads of their own, so that the worker can keep its leases alive meanwhile. */
 export function threadedAssessor({ threads }: { threads: number }): Assessor {
   const pool = new Piscina<AssessOrder, AssessReply>({
-    filename: path.join(process.cwd(), 'dist/worker/assess-thread.mjs'),
+    // Beside the worker's own bundle, wherever that was started from.
+    filename: fileURLToPath(new URL('assess-thread.mjs', import.meta.url)),
     minThreads: 0,
     maxThreads: threads,
     idleTimeout: 30_000,

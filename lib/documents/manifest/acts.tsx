@@ -44,7 +44,7 @@ export function handlingList(items: string[]): Block[] {
                 }}
               >
                 {column.map((item, index) => (
-                  <View key={item} style={{ flexDirection: 'row', marginVertical: px(2) }}>
+                  <View key={index} style={{ flexDirection: 'row', marginVertical: px(2) }}>
                     <Words face="head" weight={700} size={13} line={15} style={{ width: px(18) }}>
                       {String(index + 1 + (at === 0 ? 0 : split))}
                     </Words>

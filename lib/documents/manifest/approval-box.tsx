@@ -128,8 +128,8 @@ function Record({ approval }: { approval: ApprovalView }) {
       <Words size={12} line={15} weight={600}>
         {vetName}
       </Words>
-      {lines.filter(Boolean).map((line) => (
-        <Words key={line} size={11} line={14}>
+      {lines.filter(Boolean).map((line, index) => (
+        <Words key={index} size={11} line={14}>
           {line}
         </Words>
       ))}

@@ -39,8 +39,8 @@ export function Facts({ widths, rows }: { widths: number[]; rows: Fact[][] }) {
               <Words size={12} line={15} weight={fact.bold ? 600 : 400}>
                 {fact.value}
               </Words>
-              {(fact.more ?? []).map((line) => (
-                <Words key={line} size={11} line={14}>
+              {(fact.more ?? []).map((line, number) => (
+                <Words key={number} size={11} line={14}>
                   {line}
                 </Words>
               ))}

@@ -34,8 +34,8 @@ export function stampRow({
           <Words size={13} line={16.5} weight={600}>
             {headline}
           </Words>
-          {headlineMore.map((text) => (
-            <Words key={text} size={13} line={16.5}>
+          {headlineMore.map((text, index) => (
+            <Words key={index} size={13} line={16.5}>
               {text}
             </Words>
           ))}

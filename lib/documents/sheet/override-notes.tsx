@@ -31,8 +31,8 @@ export function overrideNotes(overrides: OverrideView[]): FixedBlock[] {
             marginBottom: px(6),
           }}
         >
-          {texts.map(({ bold, text }) => (
-            <Words key={bold} size={12} line={15}>
+          {texts.map(({ bold, text }, index) => (
+            <Words key={index} size={12} line={15}>
               <Bold>{bold}</Bold> {text}
             </Words>
           ))}

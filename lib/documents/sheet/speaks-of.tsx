@@ -73,7 +73,7 @@ export function speaksOf(view: SheetView): FixedBlock[] {
           >
             {view.cautions.map(({ bold, text }, index) => (
               <Words
-                key={text}
+                key={index}
                 size={10.5}
                 line={13}
                 style={{ width: px(THIRD), marginRight: px(index < 2 ? 18 : 0) }}
@@ -113,8 +113,8 @@ export function HashLine({
         {label}
       </Words>
       <View>
-        {(lines.length === 0 ? ['none'] : lines).map((line) => (
-          <Figure key={line} size={size} line={13} tight={0.1}>
+        {(lines.length === 0 ? ['none'] : lines).map((line, index) => (
+          <Figure key={index} size={size} line={13} tight={0.1}>
             {line}
           </Figure>
         ))}
