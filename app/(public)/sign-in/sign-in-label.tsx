@@ -41,7 +41,7 @@ function DemoAccounts({ demo, onFill }: { demo: DemoAccountsView; onFill: (email
         Demo installation, invented animals only. Password for all {demo.people.length}:{' '}
         <b className="fig whitespace-nowrap">{demo.password}</b>
       </p>
-      <ul className="mt-1.5 max-h-40 list-none overflow-y-auto">
+      <ul className="mt-1.5 list-none desk:max-h-40 desk:overflow-y-auto">
         {demo.people.map(({ email, role, name }) => (
           <li key={email} className="flex items-center justify-between gap-3 border-t border-hair py-[3px]">
             <span>
