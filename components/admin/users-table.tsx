@@ -1,6 +1,8 @@
 import { Cell, Head, Ledger, RowHead } from '@/components/ui/ledger'
 import { Attention } from '@/components/ui/notice'
 import { ROLE_WORDS } from '@/lib/policies/actor'
+import { calendarDay } from '@/lib/views/calendar-day'
+import { countryName } from '@/lib/views/country-name'
 import { dayDateYear } from '@/lib/views/format'
 import type { RegistrationView, UserRow } from '@/lib/views/administration'
 import { registrationTrouble } from './registration-trouble'
@@ -58,9 +60,9 @@ function Registration({ registration, today }: { registration: RegistrationView 
     <>
       {registration && (
         <>
-          {registration.number}, {registration.country}
+          {registration.number}, {countryName(registration.country)}
           <span className="block text-small text-mute">
-            to {registration.expiresOn}
+            to {calendarDay(registration.expiresOn)}
             {registration.checked &&
               `, checked ${dayDateYear(registration.checked.ms, registration.checked.zone)}`}
           </span>

@@ -2,6 +2,7 @@ import type { ReactNode } from 'react'
 import { Mark } from '@/components/ui/mark'
 import { Sheet } from '@/components/ui/section'
 import { Stamp } from '@/components/ui/stamp'
+import { countryName } from '@/lib/views/country-name'
 import { dayTime, duration, localTimeWithOffset } from '@/lib/views/format'
 import type { PortalAnimal, PortalApproval, PortalCondition, PortalView } from '@/lib/views/portal'
 
@@ -108,7 +109,9 @@ function Conditions({ conditions }: { conditions: readonly PortalCondition[] }) 
             <span className="font-head font-bold">{condition.number}</span>
             <span>
               {condition.text}
-              {condition.legWords && <span className="text-mute"> {condition.legWords}</span>}
+              {/^\d/.test(condition.legWords) && (
+                <span className="text-mute"> Leg {condition.legWords}.</span>
+              )}
             </span>
             <span className="text-mute max-desk:col-start-2">{answerWords(condition)}</span>
           </li>
@@ -148,24 +151,35 @@ function Approvals({ approvals }: { approvals: readonly PortalApproval[] }) {
         Vet’s approval
       </h3>
       {approvals.length === 0 && <p className="mt-1">Not signed yet.</p>}
-      {approvals.map((approval) => (
-        <div key={`${approval.signedAt.ms}-${approval.crateMarks.join()}`} className="mt-1.5">
+      {bySignature(approvals).map(({ approval, marks }) => (
+        <div key={`${approval.signedAt.ms}-${marks.join()}`} className="mt-1.5">
           <p>
-            <span className="font-head text-section font-semibold italic text-hand">{approval.vetName}</span>,{' '}
-            registration {approval.registration}, {approval.registrationCountry},{' '}
-            {dayTime(approval.signedAt.ms, approval.signedAt.zone)}, crates {approval.crateMarks.join(', ')}.
+            <span className="font-head text-section font-semibold italic text-hand">{approval.vetName}</span>,
+            registration {approval.registration}, {countryName(approval.registrationCountry)},{' '}
+            {dayTime(approval.signedAt.ms, approval.signedAt.zone)}, {marks.length === 1 ? 'crate' : 'crates'}{' '}
+            {marks.join(', ')}.
           </p>
           <p className="mt-0.5">{approval.statement}</p>
-          <p>
-            {approval.examined
-              ? 'The vet has examined the animals.'
-              : 'The vet has not examined the animals.'}{' '}
-            <b>This is not a certificate of fitness to travel.</b>
-          </p>
         </div>
       ))}
     </section>
   )
+}
+
+/** One signature may cover several crates. */
+function bySignature(approvals: readonly PortalApproval[]): { approval: PortalApproval; marks: string[] }[] {
+  const groups: { approval: PortalApproval; marks: string[] }[] = []
+  for (const approval of approvals) {
+    const group = groups.find(
+      (one) =>
+        one.approval.vetName === approval.vetName &&
+        one.approval.signedAt.ms === approval.signedAt.ms &&
+        one.approval.statement === approval.statement,
+    )
+    if (group) group.marks.push(...approval.crateMarks)
+    else groups.push({ approval, marks: [...approval.crateMarks] })
+  }
+  return groups
 }
 
 function names(animals: readonly PortalAnimal[]): string {

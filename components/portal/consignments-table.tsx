@@ -1,9 +1,9 @@
 import Link from 'next/link'
 import { Cell, Head, Ledger, RowHead } from '@/components/ui/ledger'
 import { Mark } from '@/components/ui/mark'
-import { STATE_WORDS } from '@/lib/states/consignment'
 import { dayTime } from '@/lib/views/format'
 import type { PortalRow } from '@/lib/views/portal'
+import { portalStateWords } from './state-words'
 
 /** A shipper's own consignments, the one that leaves next first. Double rule: something is asked of the shipper. */
 export function ConsignmentsTable({ rows }: { rows: readonly PortalRow[] }) {
@@ -33,7 +33,7 @@ export function ConsignmentsTable({ rows }: { rows: readonly PortalRow[] }) {
               </span>
             </Cell>
             <Cell attention={row.asked !== ''}>
-              {STATE_WORDS[row.state]}
+              {portalStateWords(row.state)}
               {row.asked && <span className="block text-small font-semibold">{row.asked}</span>}
             </Cell>
             <Cell>

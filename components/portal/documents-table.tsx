@@ -1,6 +1,7 @@
 import { DocumentDrawing } from '@/components/ui/document-state'
 import { Cell, Head, Ledger, RowHead } from '@/components/ui/ledger'
 import { Empty } from '@/components/ui/notice'
+import { printedCode } from '@/lib/documents/code'
 import { counted, dayTime } from '@/lib/views/format'
 import type { PortalDocument } from '@/lib/views/portal'
 import { PAPER_KIND_WORDS } from '@/lib/views/verification'
@@ -71,7 +72,7 @@ function MadeAndCode({ document }: { document: PortalDocument }) {
   return (
     <>
       <span className="block font-normal">{dayTime(document.made.ms, document.made.zone)}</span>
-      <span className="fig block text-small font-normal text-mute">{document.code}</span>
+      <span className="fig block text-small font-normal text-mute">{printedCode(document.code)}</span>
     </>
   )
 }

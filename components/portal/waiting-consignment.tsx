@@ -1,8 +1,8 @@
 import { Mark } from '@/components/ui/mark'
 import { Sheet } from '@/components/ui/section'
-import { STATE_WORDS } from '@/lib/states/consignment'
 import { dayTime } from '@/lib/views/format'
 import type { PortalRow } from '@/lib/views/portal'
+import { portalStateWords } from './state-words'
 
 /** Before a release there is nothing to rely on: what is planned, and that it may still change. */
 export function WaitingConsignment({ row }: { row: PortalRow }) {
@@ -22,7 +22,7 @@ export function WaitingConsignment({ row }: { row: PortalRow }) {
       </header>
       <section>
         <p>
-          <b>{STATE_WORDS[row.state]}.</b>{' '}
+          <b>{portalStateWords(row.state)}.</b>{' '}
           {row.state === 'cancelled'
             ? 'This journey does not take place.'
             : 'Nothing is released yet: times, route and verdict may still change. The manifest comes by mail with the release.'}

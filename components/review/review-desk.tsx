@@ -65,7 +65,7 @@ export function ReviewDesk({
     <form
       onSubmit={state.submit}
       noValidate
-      className="grid items-start gap-6 board:grid-cols-[minmax(0,1fr)_324px] wide:grid-cols-[minmax(0,1fr)_346px]"
+      className="mt-4 grid items-start gap-6 board:grid-cols-[minmax(0,1fr)_324px] wide:grid-cols-[minmax(0,1fr)_346px]"
     >
       <div className="min-w-0">
         {pictures}

@@ -24,7 +24,7 @@ export function ReviewHead({ view }: { view: ReviewView }) {
         ))}
       </Fact>
       <Fact caption="Journey" whole>
-        {sheet.from} to {sheet.to}
+        {sheet.legs[0]?.fromPlace} to {sheet.legs.at(-1)?.toPlace}
         <span className="block text-small text-mute">
           leaves {dayTime(sheet.leaves.ms, sheet.leaves.zone)}, {duration(sheet.journeyMin)}
         </span>

@@ -21,10 +21,10 @@ export function ReviewPictures({
   const shape = useMemo(() => crateShape(crate.plan, crate.mark), [crate])
   const notes = useMemo(() => crateNotes(crate.plan), [crate])
   return (
-    <div className="mt-4 grid gap-4 wide:grid-cols-[364px_minmax(0,1fr)]">
+    <div className="grid gap-4 wide:grid-cols-[364px_minmax(0,1fr)]">
       <section aria-labelledby="crate-title">
         <div className="mb-2 flex flex-wrap items-baseline gap-x-3">
-          <h2 id="crate-title" className="text-sub">
+          <h2 id="crate-title" className="text-section">
             Crate {crate.mark}
           </h2>
           <p className="text-caption text-mute">to scale, drawn from the figures typed</p>

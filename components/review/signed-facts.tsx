@@ -1,14 +1,10 @@
 import type { ReactNode } from 'react'
 import { BoxedFacts, Fact } from '@/components/ui/boxed-facts'
 import { Attention } from '@/components/ui/notice'
+import { calendarDay } from '@/lib/views/calendar-day'
+import { countryName } from '@/lib/views/country-name'
 import { dayDateYear, localTimeWithOffset } from '@/lib/views/format'
 import type { SignedApproval } from '@/lib/views/review'
-
-const DECISION_WORDS: Record<SignedApproval['decision'], string> = {
-  approved: 'Approved',
-  approved_with_conditions: 'Approved with conditions',
-  returned: 'Returned with reasons',
-}
 
 /** A signature as it stands for good: who, what it means, when; and, where it was ended, by what. */
 export function SignedFacts({ approval, act }: { approval: SignedApproval; act?: ReactNode }) {
@@ -22,11 +18,11 @@ export function SignedFacts({ approval, act }: { approval: SignedApproval; act?:
           </span>
         </Fact>
         <Fact caption="Registration" whole>
-          {approval.registration}, {approval.country}, to {approval.expiresOn}
+          {approval.registration}, {countryName(approval.country)}, to {calendarDay(approval.expiresOn)}
         </Fact>
         <Fact caption="What it means" whole>
-          <b>{DECISION_WORDS[approval.decision]}</b>, crates {approval.crateMarks.join(', ')}, revision{' '}
-          {approval.revision}
+          <b>{approval.meaning}</b>, {approval.crateMarks.length === 1 ? 'crate' : 'crates'}{' '}
+          {approval.crateMarks.join(', ')}, revision {approval.revision}
         </Fact>
         <Fact caption="When" whole>
           {dayDateYear(signedAt.ms, signedAt.zone)}, {localTimeWithOffset(signedAt.ms, signedAt.zone)}
@@ -49,7 +45,7 @@ export function SignedFacts({ approval, act }: { approval: SignedApproval; act?:
           </Attention>
         </div>
       )}
-      {act && <div className="mt-2">{act}</div>}
+      {act && <div className="mt-2 flex flex-wrap gap-2">{act}</div>}
     </div>
   )
 }

@@ -45,19 +45,20 @@ export function SignedPart({
   return (
     <Section id="signed" title="Signed" words="as it was signed, for good">
       <div className="grid gap-4 wide:grid-cols-2">
-        {[...view.signed, ...view.voided].map((approval) => (
+        {bySignature([...view.signed, ...view.voided]).map((approvals) => (
           <SignedFacts
-            key={approval.approvalId}
-            approval={approval}
-            act={
-              approval.withdrawable && (
+            key={approvals[0].approvalId}
+            approval={{ ...approvals[0], crateMarks: approvals.flatMap((one) => one.crateMarks).sort() }}
+            act={approvals
+              .filter((one) => one.withdrawable)
+              .map((one) => (
                 <Withdraw
-                  approval={approval}
+                  key={one.approvalId}
+                  approval={one}
                   action={withdraw}
-                  requestId={requestIds[approval.approvalId] ?? ''}
+                  requestId={requestIds[one.approvalId] ?? ''}
                 />
-              )
-            }
+              ))}
           />
         ))}
       </div>
@@ -67,4 +68,17 @@ export function SignedPart({
 
 function sameCrates(a: SignedApproval, b: SignedApproval): boolean {
   return a.crateMarks.join() === b.crateMarks.join()
+}
+
+/** One signature may cover several crates; each crate's approval is ended by itself. */
+function bySignature(approvals: readonly SignedApproval[]): [SignedApproval, ...SignedApproval[]][] {
+  const groups = new Map<string, [SignedApproval, ...SignedApproval[]]>()
+  for (const approval of approvals) {
+    const { signerName, signedAt, decision, reasons, voidedAt, withdrawn } = approval
+    const key = JSON.stringify([signerName, signedAt.ms, decision, reasons, voidedAt?.ms, withdrawn])
+    const group = groups.get(key)
+    if (group) group.push(approval)
+    else groups.set(key, [approval])
+  }
+  return [...groups.values()]
 }

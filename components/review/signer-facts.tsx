@@ -1,4 +1,6 @@
 import type { ReactNode } from 'react'
+import { calendarDay } from '@/lib/views/calendar-day'
+import { countryName } from '@/lib/views/country-name'
 import type { SignerView } from '@/lib/views/review'
 
 /** Who signs, from the record an admin checked; nothing of it can be typed. */
@@ -9,9 +11,9 @@ export function SignerFacts({ signer }: { signer: SignerView }) {
         <span className="font-head text-signature font-semibold italic text-hand">{signer.name}</span>
       </Row>
       <Row name="Registration">
-        {signer.registration ? `${signer.registration}, ${signer.country}` : 'none kept'}
+        {signer.registration ? `${signer.registration}, ${countryName(signer.country)}` : 'none kept'}
       </Row>
-      <Row name="Valid to">{signer.expiresOn || 'unknown'}</Row>
+      <Row name="Valid to">{calendarDay(signer.expiresOn) || 'unknown'}</Row>
       <Row name="Record">{signer.checkedWords || 'not checked by an admin'}</Row>
       <Row name="Time">set by the server when you sign</Row>
     </dl>

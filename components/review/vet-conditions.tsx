@@ -28,8 +28,10 @@ export function VetConditions({
             <span className="font-head font-bold">{condition.number}</span>
             <span>
               {condition.text}
-              {condition.legWords && `, ${condition.legWords}`}
-              <span className="block text-caption text-mute">{condition.answerWords}</span>
+              <span className="block text-caption text-mute">
+                {legsWords(condition.legs)}
+                {condition.answerWords}
+              </span>
             </span>
           </li>
         ))}
@@ -70,4 +72,9 @@ export function VetConditions({
       </p>
     </section>
   )
+}
+
+/** "Leg 3. " before the answer; nothing where a condition holds for the whole journey. */
+function legsWords(legs: readonly number[]): string {
+  return legs.length === 0 ? '' : `${legs.length === 1 ? 'Leg' : 'Legs'} ${legs.join(', ')}. `
 }

@@ -1,8 +1,12 @@
 import { zoneName } from '@/lib/views/format'
 import type { ChecklistItem, ChecklistLeg, ChecklistView } from '@/lib/views/checklist'
 
+const MOST_LARGE = 8
+
 /** The items as a form: a box, a time and a reason for each. What was entered by phone is not printed: paper is written on. */
 export function LegFormItems({ leg, crates }: { leg: ChecklistLeg; crates: ChecklistView['crates'] }) {
+  // The list stays on one sheet: a long one is set a little smaller.
+  const row = leg.items.length > MOST_LARGE ? 'h-7 text-[10.5pt]/[12pt]' : 'h-8 text-[12pt]/[14pt]'
   return (
     <section className="mt-1.5">
       <h2 className="flex items-baseline gap-2.5 text-[11.5pt]/[14pt]">
@@ -23,17 +27,17 @@ export function LegFormItems({ leg, crates }: { leg: ChecklistLeg; crates: Check
             <th scope="col" className="px-1.5 text-center">
               Done
             </th>
-            <th scope="col" className="w-[62px] px-1.5">
+            <th scope="col" className="w-[54px] px-1.5">
               Time, {zoneName(leg.end.ms, leg.end.zone)}
             </th>
-            <th scope="col" className="w-[150px] px-1.5">
+            <th scope="col" className="w-[128px] px-1.5">
               Not done, because
             </th>
           </tr>
         </thead>
         <tbody>
           {leg.items.map((item) => (
-            <tr key={item.key} className="h-8 break-inside-avoid border-t border-hair text-[12pt]/[14pt]">
+            <tr key={item.key} className={`break-inside-avoid border-t border-hair ${row}`}>
               <td className="w-7 px-1.5 font-head font-bold">{item.number}</td>
               <td className="px-1.5 py-0.5">
                 {item.text}

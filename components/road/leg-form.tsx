@@ -11,7 +11,9 @@ import {
   localTimeWithOffset,
   zoneName,
 } from '@/lib/views/format'
+import { printedCode } from '@/lib/documents/code'
 import type { ChecklistLeg, ChecklistView } from '@/lib/views/checklist'
+import { longKinds } from './long-endurance'
 import { LegFormItems } from './leg-form-items'
 
 const STOPS_IN_A_ROW = 4
@@ -44,7 +46,7 @@ function LegForm({ view, leg, sheet }: { view: ChecklistView; leg: ChecklistLeg;
           </span>
           {view.documentCode && (
             <p>
-              Manifest <b className="fig">{view.documentCode}</b>
+              Manifest <b className="fig">{printedCode(view.documentCode)}</b>
             </p>
           )}
           <p>
@@ -105,8 +107,9 @@ function Box({ caption, children }: { caption: ReactNode; children?: ReactNode }
 }
 
 function Stops({ leg, mark }: { leg: ChecklistLeg; mark: string }) {
+  const long = longKinds(leg.endurance)
   const worst = leg.endurance
-    .filter((row) => row.toAlarmMin !== null)
+    .filter((row) => row.toAlarmMin !== null && !long.includes(row.kindWords))
     .sort((a, b) => (a.toAlarmMin ?? 0) - (b.toAlarmMin ?? 0))
     .slice(0, 3)
   return (
@@ -136,9 +139,12 @@ function Stops({ leg, mark }: { leg: ChecklistLeg; mark: string }) {
       </div>
       <p className="border-t border-rule px-2.5 py-1">
         <b>Endurance, least first, to alarm:</b>{' '}
-        {worst.length === 0
-          ? 'nobody can say for this leg.'
-          : `${worst.map((row) => `${row.crateLetter} ${enduranceMinutes(row.toAlarmMin)} ${row.kindWords}`).join('; ')}.`}
+        {leg.endurance.length === 0 && 'nobody can say for this leg.'}
+        {worst
+          .map((row) => `${row.crateLetter} ${enduranceMinutes(row.toAlarmMin)} ${row.kindWords}`)
+          .join('; ')}
+        {worst.length > 0 && long.length > 0 && '; '}
+        {long.length > 0 && `240+ min, every animal, ${long.join(', ')}.`}
       </p>
     </section>
   )

@@ -16,10 +16,8 @@ export function LegHead({ leg }: { leg: ChecklistLeg }) {
         {leg.conditionWords && <p className="mt-1 text-small text-mute">{leg.conditionWords}</p>}
       </div>
       <div className="grid grid-cols-[1fr_auto] items-end gap-x-3 border-t-2 border-ink bg-sheet px-4 py-3">
-        <div>
-          <p className="text-small">{leg.deadlineWords}</p>
-          <p className="fig text-deadline font-semibold tracking-[-.02em]">{clock(end.ms, end.zone)}</p>
-        </div>
+        <p className="col-span-2 text-small">{leg.deadlineWords}</p>
+        <p className="fig text-deadline font-semibold tracking-[-.02em]">{clock(end.ms, end.zone)}</p>
         <p className="text-right text-small">
           <b>{zoneName(end.ms, end.zone)}</b> ({utcOffset(end.ms, end.zone)})
           {leg.endElsewhere && (
