@@ -2,7 +2,7 @@ import { mkdirSync, rmSync } from 'node:fs'
 import path from 'node:path'
 import { build, bundleWorker } from './build.mjs'
 import { root, testDataDir } from './paths.mjs'
-import { run } from './run.mjs'
+import { SetupError, run } from './run.mjs'
 import { countTests, playwrightCounts, vitestCounts } from './test-counts.mjs'
 import { holdTestServer } from './test-database.mjs'
 import { startTestApplication } from './test-application.mjs'
@@ -63,15 +63,20 @@ async function onDatabase(undo) {
   return withServer(undo, () => vitest('db'))
 }
 
+/** One build for all steps of a run: what has failed once is not tried again. */
+let built
+const buildOnce = () => (built ??= build((words) => console.log(words)))
+
 async function production() {
-  const done = await build((words) => console.log(words))
-  console.log(done ? 'Built.' : 'Already built from these sources.')
+  console.log((await buildOnce()) ? 'Built.' : 'Already built from these sources.')
   return { passed: 1, failed: 0 }
 }
 
 /** The application as people run it: built, on its own database with the demo in it, mailing to a server that keeps all. */
 async function browser(undo) {
-  await build((words) => console.log(words))
+  await buildOnce().catch(() => {
+    throw new SetupError('Not run: the application cannot be built.')
+  })
   return withServer(undo, async (server) => {
     const application = await startTestApplication(server, undo)
     const report = reportFile('e2e.json')
