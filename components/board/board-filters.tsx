@@ -4,6 +4,7 @@ import { useEffect, useRef, useState } from 'react'
 import { SelectField } from '@/components/forms/select-field'
 import { TextInput } from '@/components/forms/text-input'
 import { Tick } from '@/components/forms/ticks'
+import { join } from '@/components/ui/join'
 import { CONSIGNMENT_STATES, STATE_WORDS } from '@/lib/states/consignment'
 import type { BoardQuery, Holder } from '@/lib/schemas/board'
 import { HOLDER_OPTIONS, SORT_OPTIONS, VERDICT_FILTERS } from './board-words'
@@ -20,6 +21,8 @@ export function BoardFilters({
   counts: Partial<Record<BoardQuery['state'][number], number>>
   onAsk: (change: Partial<BoardQuery>, how?: 'push' | 'replace') => void
 }) {
+  const [open, setOpen] = useState(false)
+  const narrow = open ? '' : 'max-desk:hidden'
   const toggled = <V extends string>(list: readonly V[], value: V, on: boolean) =>
     on ? [...list, value] : list.filter((known) => known !== value)
   return (
@@ -31,8 +34,17 @@ export function BoardFilters({
     >
       <div className="grid grid-cols-2 items-end gap-x-4 gap-y-2 desk:grid-cols-[minmax(180px,260px)_160px_190px_170px_170px_auto]">
         <FindField find={query.find} onFind={(find) => onAsk({ find }, 'replace')} />
+        <button
+          type="button"
+          aria-expanded={open}
+          className="link col-span-2 min-h-11 text-left desk:hidden"
+          onClick={() => setOpen((before) => !before)}
+        >
+          {open ? 'Fold the filters' : 'Narrow and order'}
+        </button>
         <TextInput
           id="board-leaves-from"
+          className={narrow}
           label="Leaves from"
           type="date"
           value={query.leavesFrom ?? ''}
@@ -40,6 +52,7 @@ export function BoardFilters({
         />
         <SelectField
           id="board-sort"
+          className={narrow}
           label="Order"
           choices={SORT_OPTIONS}
           value={query.sort}
@@ -47,6 +60,7 @@ export function BoardFilters({
         />
         <SelectField
           id="board-holder"
+          className={narrow}
           label="Whose move"
           none="Anybody’s"
           choices={HOLDER_OPTIONS}
@@ -55,6 +69,7 @@ export function BoardFilters({
         />
         <SelectField
           id="board-state"
+          className={narrow}
           label="State"
           none={query.state.length > 1 ? `${query.state.length} states` : 'All open'}
           choices={CONSIGNMENT_STATES.map((state) => ({
@@ -70,13 +85,13 @@ export function BoardFilters({
         />
         <Tick
           id="board-closed"
-          className="pb-1.5"
+          className={join('pb-1.5', narrow)}
           label="Closed ones too"
           checked={query.closed}
           onChange={(event) => onAsk({ closed: event.target.checked })}
         />
       </div>
-      <fieldset className="mt-2 flex flex-wrap gap-x-4 gap-y-1">
+      <fieldset className={join('mt-2 flex flex-wrap gap-x-4 gap-y-1', narrow)}>
         <legend className="sr-only">Verdict</legend>
         {VERDICT_FILTERS.map(({ value, words }) => (
           <Tick

@@ -1,29 +1,30 @@
 import Link from 'next/link'
 import { Mark } from '@/components/ui/mark'
+import { STATE_WORDS } from '@/lib/states/consignment'
 import type { BoardView } from '@/lib/views/board'
-import { JourneyCell, LeavesCell, MarginCell, StampCell, StateCell, rowHref } from './row-cells'
+import { HOLDER_WORDS } from './board-words'
+import { JourneyCell, LeavesCell, MarginCell, StampCell, rowHref } from './row-cells'
 
-/** The board under 760 px: a row of two lines a consignment, the whole of it one link. */
+/** The board under 760 px: mark and verdict, then the journey, its hour and its margin; the whole of it one link. */
 export function BoardList({ view }: { view: BoardView }) {
   return (
     <ul className="list-none border-y-2 border-ink bg-sheet desk:hidden">
       {view.rows.map((row) => (
-        <li key={row.id} className="border-t border-hair first:border-t-0">
-          <Link
-            href={rowHref(row)}
-            className="grid grid-cols-[4.75rem_1fr] gap-x-3 px-3 py-2.5 text-ink no-underline"
-          >
-            <Mark label="Consignment">{row.mark}</Mark>
-            <span className="min-w-0">
+        <li key={row.id} className="border-t border-rule first:border-t-0">
+          <Link href={rowHref(row)} className="block px-3 py-2.5 text-ink no-underline">
+            <span className="flex flex-wrap items-center justify-between gap-x-3 gap-y-1">
+              <Mark label="Consignment">{row.mark}</Mark>
+              <StampCell row={row} />
+            </span>
+            <span className="my-1 block">
               <JourneyCell row={row} />
             </span>
-            <span className="text-small">
+            <span className="flex flex-wrap items-start justify-between gap-x-4 gap-y-1">
               <LeavesCell row={row} />
+              {row.verdict === null ? null : <MarginCell row={row} />}
             </span>
-            <span className="flex min-w-0 flex-wrap items-center gap-x-3 gap-y-1 pt-1">
-              <StampCell row={row} />
-              {row.verdict !== null && <MarginCell row={row} />}
-              <StateCell row={row} />
+            <span className="block text-small text-mute">
+              {STATE_WORDS[row.state]}, revision {row.revision}. {HOLDER_WORDS[row.holder]}
             </span>
           </Link>
         </li>

@@ -8,7 +8,7 @@ import type { ConsignmentRow } from '@/lib/views/consignment-row'
 import { clock, dayDate, duration, minutesToSpare, zoneName } from '@/lib/views/format'
 import { PATTERN_OF_KIND } from '@/components/charts/pattern-of-kind'
 
-const WIDTH = 300
+const WIDTH = 272
 const HOURS = 48
 const STEP_H = 12
 const HOUR_MS = 3_600_000

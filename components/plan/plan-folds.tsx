@@ -50,11 +50,14 @@ export function PlanFolds({
     )
   }
   return (
-    <Folds>
-      {part('parties', <PartiesLine plan={plan} />)}
-      {part('animals', <AnimalsLine plan={plan} />)}
-      {part('crates', <CratesLine plan={plan} />)}
-    </Folds>
+    <div>
+      <h2 className="sr-only">Parties, animals and crates</h2>
+      <Folds>
+        {part('parties', <PartiesLine plan={plan} />)}
+        {part('animals', <AnimalsLine plan={plan} />)}
+        {part('crates', <CratesLine plan={plan} />)}
+      </Folds>
+    </div>
   )
 }
 

@@ -21,7 +21,7 @@ export function PlanHead({ consignment, nowMs }: { consignment: EditedConsignmen
     <BoxedFacts columns="150px 1.25fr 1.15fr 1fr .9fr 230px">
       <Fact caption="Consignment">
         {consignment === null ? (
-          <span className="text-section font-head font-bold">New</span>
+          <h1 className="text-section">New consignment</h1>
         ) : (
           <h1>
             <Mark size="l" label="Plan of consignment">
