@@ -76,7 +76,13 @@ export function ActsBar({
         {may('submit') && (
           <Button
             first={main === 'submit'}
-            refused={submit.pending ? 'Sending' : undefined}
+            refused={
+              submit.pending
+                ? 'Sending'
+                : absolute === null
+                  ? undefined
+                  : `No vet can approve this: ${absolute}`
+            }
             onClick={submit.run}
           >
             {submit.pending ? 'Sending' : 'Send to the vet'}

@@ -16,8 +16,8 @@ export function ConsignmentHead({
   inForceRevision: number | null
 }) {
   return (
-    <div className="grid wide:grid-cols-[1fr_400px]">
-      <BoxedFacts columns="138px 1.5fr 1.3fr .8fr 1.05fr .85fr">
+    <div className="grid wide:grid-cols-[1fr_484px]">
+      <BoxedFacts columns="132px 1.4fr 1.3fr .8fr 1.1fr .9fr">
         <Fact caption="Consignment" tall whole>
           <h1 className="flex h-full items-end">
             <Mark size="l" label="Consignment">
@@ -56,7 +56,12 @@ export function ConsignmentHead({
         </Fact>
       </BoxedFacts>
       <div className="flex flex-wrap items-center gap-x-4 gap-y-2 border-2 border-ink bg-sheet px-4 py-2.5 max-wide:border-t-0 wide:border-l-0">
-        <Stamp {...view.stamp} size="l" />
+        <span className="max-desk:hidden">
+          <Stamp {...view.stamp} size="l" />
+        </span>
+        <span className="desk:hidden">
+          <Stamp {...view.stamp} size="phone" />
+        </span>
         <div className="min-w-0 flex-1 basis-60">
           <StampWords view={view} />
         </div>

@@ -45,7 +45,12 @@ export function GoNoGoSheet({ view }: { view: SheetView }) {
       </header>
       <SheetFacts view={view} />
       <div className="my-3 flex flex-wrap items-center gap-x-5 gap-y-2">
-        <Stamp {...view.stamp} size="l" />
+        <span className="max-desk:hidden print:inline">
+          <Stamp {...view.stamp} size="l" />
+        </span>
+        <span className="desk:hidden print:hidden">
+          <Stamp {...view.stamp} size="phone" />
+        </span>
         <div className="min-w-0 flex-1 basis-72">
           <p className="font-semibold">{view.headline}</p>
           {view.headlineMore.map((words) => (

@@ -5,25 +5,51 @@ import type { TempFrame, TimeFrame } from './frame'
 import { line, words } from './marks'
 import type { Mark } from './marks'
 import { legStretches } from './channel'
-import { stretchOf } from './series'
-import type { CorridorInput } from './types'
+import { extreme, stretchOf } from './series'
+import type { Sample } from './series'
+import type { CorridorInput, Track } from './types'
 
 type BodyInput = Pick<CorridorInput, 'legs' | 'limits' | 'typical' | 'deciding' | 'spread'>
 
-/** All four limits and every track, with room in both walls for a label. */
+/** How far past a critical limit the scale follows a track, as a share of the room between both critical limits. */
+const BEYOND = 0.6
+
+/** All four limits and every track, with room in both walls for a label. A runaway leaves the picture (see offScale). */
 export function wholeBodyFrame(time: TimeFrame, input: BodyInput, top: number, foot: number): TempFrame {
-  const limits = legStretches(time, input).map((stretch) => stretch.limits)
+  const { lowestC, highestC } = reach(time, input)
   const values = trackValues(time, input)
-  const low = Math.min(...limits.map((each) => each.criticalLowC), ...values)
-  const high = Math.max(...limits.map((each) => each.criticalHighC), ...values)
+  const low = Math.min(lowestC, Math.max(lowestC - BEYOND * (highestC - lowestC), Math.min(...values)))
+  const high = Math.max(highestC, Math.min(highestC + BEYOND * (highestC - lowestC), Math.max(...values)))
   const range = high - low
-  const lowest = Math.min(...limits.map((each) => each.criticalLowC))
-  const highest = Math.max(...limits.map((each) => each.criticalHighC))
   return {
-    lowC: Math.min(lowest - 0.07 * range, low - 0.03 * range),
-    highC: Math.max(highest + 0.21 * range, high + 0.03 * range),
+    lowC: Math.min(lowestC - 0.07 * range, low - 0.03 * range),
+    highC: Math.max(highestC + 0.21 * range, high + 0.03 * range),
     top,
     foot,
+  }
+}
+
+/** Where a track leaves the picture: its extreme there, so that no figure is lost with the line. */
+export function offScale(
+  time: TimeFrame,
+  temp: TempFrame,
+  track: Track | null,
+): { sample: Sample; side: 'high' | 'low' }[] {
+  if (!track) return []
+  const samples = stretchOf(track.minutes, track.bodyC, time.fromMin, time.toMin)
+  const most = extreme(samples, 1)
+  const least = extreme(samples, -1)
+  return [
+    ...(most && most.value > temp.highC ? [{ sample: most, side: 'high' as const }] : []),
+    ...(least && least.value < temp.lowC ? [{ sample: least, side: 'low' as const }] : []),
+  ]
+}
+
+function reach(time: TimeFrame, input: BodyInput): { lowestC: number; highestC: number } {
+  const limits = legStretches(time, input).map((stretch) => stretch.limits)
+  return {
+    lowestC: Math.min(...limits.map((each) => each.criticalLowC)),
+    highestC: Math.max(...limits.map((each) => each.criticalHighC)),
   }
 }
 
@@ -40,8 +66,10 @@ export function nearBodyFrame(
 ): TempFrame {
   const limits = legStretches(time, input).map((stretch) => stretch.limits)
   const values = trackValues(time, input)
-  const least = Math.min(...values)
-  const most = Math.max(...values)
+  const { lowestC, highestC } = reach(time, input)
+  const beyond = BEYOND * (highestC - lowestC)
+  const least = Math.max(lowestC - beyond, Math.min(...values))
+  const most = Math.min(highestC + beyond, Math.max(...values))
   const roomHigh = Math.min(...limits.map((each) => each.alarmHighC)) - most
   const roomLow = least - Math.max(...limits.map((each) => each.alarmLowC))
   const edges = [least, most]

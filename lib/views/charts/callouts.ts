@@ -15,6 +15,7 @@ export function calloutMarks(
   taken: Box[],
   tracks: readonly Track[] = [],
   lineYs: readonly number[] = [],
+  critical?: { lowC: number; highC: number },
 ): Placed {
   const placed: Placed = { marks: [], taken: [] }
   const leaders: [Point, Point][] = []
@@ -22,7 +23,8 @@ export function calloutMarks(
     const point = { x: xAt(time, callout.minute), y: yInside(temp, callout.tempC) }
     const size = calloutSize(callout)
     const hides = (spot: Box) =>
-      hiding(time, temp, spot, tracks, lineYs) +
+      hiding(time, temp, spot, tracks, lineYs, critical) +
+      (taken.some((other) => strikes(edgeOf(spot, point), point, other)) ? 150 : 0) +
       (leaders.some(([from, to]) => crosses(from, to, edgeOf(spot, point), point)) ? 400 : 0)
     const box = freeSpot(time, temp, point, size, [...taken, ...placed.taken], hides)
     if (!box) continue
@@ -86,6 +88,15 @@ function crosses(a: Point, b: Point, c: Point, d: Point): boolean {
   const turn = (p: Point, q: Point, r: Point) =>
     Math.sign((q.x - p.x) * (r.y - p.y) - (q.y - p.y) * (r.x - p.x))
   return turn(a, b, c) !== turn(a, b, d) && turn(c, d, a) !== turn(c, d, b)
+}
+
+/** True where a leader would run through a label. */
+function strikes(from: Point, to: Point, box: Box): boolean {
+  return [0.2, 0.4, 0.6, 0.8].some((share) => {
+    const x = from.x + share * (to.x - from.x)
+    const y = from.y + share * (to.y - from.y)
+    return x > box.x && x < box.x + box.width && y > box.y && y < box.y + box.height
+  })
 }
 
 /** The free spot nearest the point: along the top and the foot of the picture, then anywhere. */

@@ -2,6 +2,7 @@ import { bodyMargin } from '../format'
 import { airPart, hasAir } from './air'
 import type { AirPart } from './air'
 import { bodyAxis, wholeBodyFrame } from './body-frame'
+import { offScaleLabels } from './off-scale'
 import { channel, legStretches, marginAt } from './channel'
 import { xAt, yAt } from './frame'
 import type { TempFrame, TimeFrame } from './frame'
@@ -102,6 +103,7 @@ function airCaptions(time: TimeFrame, input: CorridorInput, air: AirPart): Mark[
 function wordsInChannel(time: TimeFrame, temp: TempFrame, input: CorridorInput): Mark[] {
   const legs = legStretches(time, input).map(({ leg, limits }) => ({ ...leg, limits }))
   const limits = limitLabels(time, temp, legs, input.unit)
+  const off = offScaleLabels(time, temp, input)
   const narrow = dimensions(time, temp, input)
   const tracks = [input.deciding, input.typical].flatMap((track) => track ?? [])
   const lineYs = legs.flatMap((leg) => Object.values(leg.limits).map((limitC) => yAt(temp, limitC)))
@@ -109,11 +111,15 @@ function wordsInChannel(time: TimeFrame, temp: TempFrame, input: CorridorInput):
     time,
     temp,
     input.callouts,
-    [...limits.taken, ...narrow.taken],
+    [...limits.taken, ...narrow.taken, ...off.taken],
     tracks,
     lineYs,
+    {
+      lowC: Math.min(...legs.map((leg) => leg.limits.criticalLowC)),
+      highC: Math.max(...legs.map((leg) => leg.limits.criticalHighC)),
+    },
   )
-  const taken = [...limits.taken, ...narrow.taken, ...callouts.taken]
+  const taken = [...limits.taken, ...narrow.taken, ...off.taken, ...callouts.taken]
   const deciders = input.deciding ? [input.deciding] : []
   const deciding = input.deciding
     ? trackLabel(time, temp, input.deciding, input.deciding.words, taken, { lineYs })
@@ -126,7 +132,14 @@ function wordsInChannel(time: TimeFrame, temp: TempFrame, input: CorridorInput):
         others: deciders,
       })
     : { marks: [], taken: [] }
-  return [...limits.marks, ...typical.marks, ...deciding.marks, ...narrow.marks, ...callouts.marks]
+  return [
+    ...limits.marks,
+    ...off.marks,
+    ...typical.marks,
+    ...deciding.marks,
+    ...narrow.marks,
+    ...callouts.marks,
+  ]
 }
 
 /**
@@ -147,7 +160,7 @@ function dimensions(time: TimeFrame, temp: TempFrame, input: CorridorInput): { m
     )
     if (
       !least ||
-      least.marginC < 0 ||
+      least.marginC < 0.1 ||
       bodyMargin(least.marginC, input.unit) !== bodyMargin(bodyC, input.unit)
     )
       return []

@@ -1,4 +1,3 @@
-import type { Verdict } from '@/lib/rules/result'
 import { bodyMargin, clock, minutesToSpare, zoneName } from '../format'
 import type { TempUnit } from '../preferences'
 import type { AnimalChart, BodyLimits, LegCell, LegView, SheetCharts, SheetView } from '../sheet'
@@ -98,39 +97,47 @@ function crateChart(charts: SheetCharts, chart: AnimalChart): SheetCharts['crate
   return own.find((crate) => crate.variant === chart.deciding?.variant) ?? own[0]
 }
 
-/** A label for each leg that is NO-GO on a body limit, worst first, else for the narrowest GO WITH CONDITIONS; three at most. */
+/**
+ * Labels for where the deciding track first passes the alarm and first passes the critical limit; where it passes none, for
+ * the leg with least room.
+ */
 function callouts(
   charts: SheetCharts,
   chart: AnimalChart,
   legs: readonly ChartLeg[],
   unit: TempUnit,
 ): Callout[] {
-  const bad = byRoom(legs, 'no-go')
-  const chosen = bad.length > 0 ? bad.slice(0, 3) : byRoom(legs, 'conditional').slice(0, 1)
-  return chosen.flatMap((leg) => callout(charts, chart, leg, unit) ?? [])
+  const body = legs.filter((leg) => leg.head?.minutes != null && /alarm|critical/.test(leg.head.limitWords))
+  const passing = body
+    .flatMap((leg) => callout(charts, chart, leg, unit))
+    .filter((each) => each.passes !== null)
+  const first = ['critical', 'alarm'].flatMap((name) => passing.find((each) => each.passes === name) ?? [])
+  if (first.length > 0) return first.map((each) => each.label)
+  const bad = body.filter((leg) => leg.head?.verdict === 'no-go' || leg.head?.verdict === 'conditional')
+  const [narrowest] = bad.sort((a, b) => (a.head?.minutes ?? 0) - (b.head?.minutes ?? 0))
+  return narrowest ? callout(charts, chart, narrowest, unit).map((each) => each.label) : []
 }
 
-function byRoom(legs: readonly ChartLeg[], verdict: Verdict): ChartLeg[] {
-  return legs
-    .filter((leg) => leg.head?.verdict === verdict && leg.head.minutes !== null)
-    .sort((a, b) => (a.head?.minutes ?? 0) - (b.head?.minutes ?? 0))
-}
-
-function callout(charts: SheetCharts, chart: AnimalChart, leg: ChartLeg, unit: TempUnit): Callout | null {
+function callout(
+  charts: SheetCharts,
+  chart: AnimalChart,
+  leg: ChartLeg,
+  unit: TempUnit,
+): { passes: string | null; label: Callout }[] {
   const { deciding, limits } = chart
-  if (!deciding || !leg.head || leg.head.minutes === null) return null
-  // Effort, law and carrier's rules decide legs too, but have no place on a scale of body temperature.
-  if (!/alarm|critical/.test(leg.head.limitWords)) return null
+  if (!deciding || !leg.head || leg.head.minutes === null) return []
   const samples = stretchOf(deciding.minutes, deciding.bodyC, leg.startMin, leg.endMin)
   const sign = leg.head.limitWords.includes('low') ? -1 : 1
   const worst = extreme(samples, sign)
-  if (!worst) return null
+  if (!worst) return []
   const side = sign === 1 ? 'high' : 'low'
   const past = passed(samples, limits, sign)
   const at = past ?? worst
   const zone = zoneAt(charts.zones, at.minute)
   const ms = charts.departureMs + at.minute * 60_000
-  return {
+  const time = `${clock(ms, zone)} ${zoneName(ms, zone)}`
+  const body = leg.head.bodyC === null ? '' : `, body ${bodyMargin(leg.head.bodyC, unit)}`
+  const label: Callout = {
     verdict: leg.head.verdict === 'no-go' ? 'no-go' : 'conditional',
     minute: at.minute,
     tempC: at.value,
@@ -138,10 +145,9 @@ function callout(charts: SheetCharts, chart: AnimalChart, leg: ChartLeg, unit: T
     title: past
       ? `Leg ${leg.ordinal}: passes ${past.name} ${side}`
       : `Leg ${leg.ordinal}: ${leg.head.limitWords} is nearest`,
-    text: past
-      ? `from ${clock(ms, zone)} ${zoneName(ms, zone)}`
-      : `at ${clock(ms, zone)} ${zoneName(ms, zone)}${leg.head.bodyC === null ? '' : `, body ${bodyMargin(leg.head.bodyC, unit)}`}`,
+    text: past ? `from ${time}` : `at ${time}${body}`,
   }
+  return [{ passes: past?.name ?? null, label }]
 }
 
 /** Where the deciding track first passes the outer limit it passes at all. */

@@ -56,7 +56,8 @@ export function limitLabels(
       const criticalWas = side === 'high' ? before?.criticalHighC : before?.criticalLowC
       const wall = Math.abs(yAt(temp, alarmC) - yAt(temp, criticalC))
       const up = side === 'high'
-      const wide = wall >= height + 8
+      // Above, the critical limit's name stands outside the wall; below, both names stand in it.
+      const wide = wall >= (up ? height + 8 : 2 * height + 10)
       if (criticalC !== criticalWas && inFrame(temp, criticalC)) {
         const y = up ? yAt(temp, criticalC) - height - 3 : yAt(temp, criticalC) - (wide ? height + 3 : -6)
         place(
@@ -188,20 +189,26 @@ export function clearOfTracks(
   return from
 }
 
-/** What a label would lie on: a limit's line costs a little, a track's line much, because that is the fact itself. */
+/**
+ * What a label would lie on: a limit's line costs a little, a track's line much, because that is the fact itself; so does
+ * what is solid between a track and the critical limit it has passed.
+ */
 export function hiding(
   time: TimeFrame,
   temp: TempFrame,
   box: Box,
   tracks: readonly Track[],
   lineYs: readonly number[],
+  critical?: { lowC: number; highC: number },
 ): number {
   const lines = lineYs.filter((y) => y > box.y - 3 && y < box.y + box.height + 3).length
   const hidden = tracks.some((track) =>
     stretchOf(track.minutes, track.bodyC, minuteOf(time, box.x), minuteOf(time, box.x + box.width)).some(
       ({ value }) => {
         const y = yInside(temp, value)
-        return y > box.y - 4 && y < box.y + box.height + 4
+        const passed = critical ? Math.max(critical.lowC, Math.min(critical.highC, value)) : value
+        const to = yInside(temp, passed)
+        return Math.max(y, to) > box.y - 4 && Math.min(y, to) < box.y + box.height + 4
       },
     ),
   )

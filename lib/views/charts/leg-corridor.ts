@@ -9,6 +9,7 @@ import { clearOfTracks, label, trackLabel } from './labels'
 import { words } from './marks'
 import type { Box, Mark, Picture } from './marks'
 import { ruledZones, ruler, zoneAt } from './ruler'
+import { offScaleLabels } from './off-scale'
 import type { ChartLeg, CorridorInput } from './types'
 
 /** Minutes of each neighbour in view, so that the change of ground is seen. */
@@ -59,6 +60,7 @@ export function legCorridor(
     ...channel(time, temp, input),
     ...bodyAxis(time, temp, input.unit, SIZE, 52),
     ...limitNames(input, leg, time, temp),
+    ...offScaleLabels(time, temp, input, SIZE).marks,
     ...air.marks,
     ...(hasAir(input) ? [words(4, air.strip.y + 18, 'crate', { size: SIZE, ink: 'mute' })] : []),
   ]

@@ -9,6 +9,7 @@ import { line, path, rect, words } from './marks'
 import type { Box, Mark } from './marks'
 import { ruledZones, ruler } from './ruler'
 import { textWidth } from './text-width'
+import { offScaleLabels } from './off-scale'
 import type { ChartLeg, CorridorInput } from './types'
 
 /** A leg narrower than this is drawn again, wide. */
@@ -72,6 +73,7 @@ export function stretchPart(
       legName(time, leg, fromMin, toMin, channelTop + 8, leg === chosen),
     ),
     ...limitNames(time, temp, input, chosen),
+    ...offScaleLabels(time, temp, input).marks,
     path(
       `M${xAt(time, Math.max(chosen.startMin, time.fromMin)).toFixed(1)} ${channelTop - 14}H${xAt(time, Math.min(chosen.endMin, time.toMin)).toFixed(1)}`,
       {

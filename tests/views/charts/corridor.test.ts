@@ -94,6 +94,34 @@ describe('corridor', () => {
   })
 })
 
+describe('a runaway', () => {
+  const hot: CorridorInput = {
+    ...input,
+    deciding: input.deciding && {
+      ...input.deciding,
+      bodyC: input.deciding.bodyC.map((bodyC, minute) => bodyC + (minute > 860 ? 8 : 0)),
+    },
+  }
+
+  it('leaves the picture with its figure said, and squeezes no limit', () => {
+    const calmScale = corridor(calm, { width: 1392, chosenLegId: null }).temp
+    const picture = corridor(hot, { width: 1392, chosenLegId: 'leg-7' })
+    const px = (temp: typeof picture.temp) => yAt(temp, 39.4) - yAt(temp, 40.2)
+    expect(px(picture.temp)).toBeGreaterThan(0.6 * px(calmScale))
+    expect(texts(picture.marks).map((mark) => mark.text)).toContain('to 48.5\u00a0°C')
+  })
+
+  it('keeps its callout off the solid part', () => {
+    const { marks, time, temp } = corridor(hot, { width: 1392, chosenLegId: null })
+    const block = marks.find((mark) => mark.kind === 'rect' && mark.fill === 'sheet' && mark.height === 46)
+    if (block?.kind !== 'rect') throw new Error('no callout')
+    const from = minuteAt(time, block.x)
+    const to = minuteAt(time, block.x + block.width)
+    const overSolid = from < 1385 && to > 865 && block.y < yAt(temp, 40.2)
+    expect(overSolid).toBe(false)
+  })
+})
+
 describe('solid ink in a channel', () => {
   const time = { fromMin: 0, toMin: input.endMin, x0: 0, x1: 1000 }
   const temp = { lowC: 35, highC: 42, top: 0, foot: 400 }
