@@ -17,6 +17,8 @@ export default defineConfig({
     : [['list']],
   use: {
     baseURL: process.env.E2E_BASE_URL ?? 'http://127.0.0.1:3000',
+    actionTimeout: 30_000,
+    navigationTimeout: 60_000,
     locale: 'en-GB',
     timezoneId: 'Europe/London',
     trace: 'retain-on-failure',
