@@ -2,7 +2,7 @@
 
 import { keepPreviousData, useQuery } from '@tanstack/react-query'
 import { useSearchParams } from 'next/navigation'
-import { useMemo } from 'react'
+import { useMemo, useState } from 'react'
 import type { BoardView } from '@/lib/views/board'
 import { boardAddressOf, boardSearch } from './board-address'
 import type { BoardAddress } from './board-address'
@@ -13,8 +13,12 @@ import type { BoardAddress } from './board-address'
  */
 export function useBoard(first: { search: string; view: BoardView }) {
   const params = useSearchParams()
-  const address = useMemo(() => boardAddressOf(new URLSearchParams(params)), [params])
-  const search = boardSearch(address)
+  const inUrl = boardSearch(boardAddressOf(new URLSearchParams(params)))
+  // Next hands a new address over in its own time; a tick must show at once, so what was asked last leads until then.
+  const [known, setKnown] = useState({ inUrl, asked: inUrl })
+  if (known.inUrl !== inUrl) setKnown({ inUrl, asked: inUrl })
+  const search = known.asked
+  const address = useMemo(() => boardAddressOf(new URLSearchParams(search)), [search])
   const query = useQuery({
     queryKey: ['consignments', search],
     queryFn: ({ signal }) => readBoard(search, signal),
@@ -32,6 +36,7 @@ export function useBoard(first: { search: string; view: BoardView }) {
     go: (next: BoardAddress, how: 'push' | 'replace' = 'push') => {
       const text = boardSearch(next)
       const href = text === '' ? '/consignments' : `/consignments?${text}`
+      setKnown((before) => ({ ...before, asked: text }))
       // The handler answers the rows, so the address alone moves on: a tick shows at once and no page is drawn anew.
       window.history[how === 'push' ? 'pushState' : 'replaceState'](null, '', href)
     },
