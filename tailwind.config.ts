@@ -1,6 +1,16 @@
 import type { Config } from 'tailwindcss'
 import plugin from 'tailwindcss/plugin'
-import { COLOUR_NAMES, COLOURS, FACES, PHONE_TYPE, RAMP, RAMP_NAMES, SCREENS, TYPE } from './lib/tokens'
+import {
+  COLOUR_NAMES,
+  COLOURS,
+  FACES,
+  PAPER_TYPE,
+  PHONE_TYPE,
+  RAMP,
+  RAMP_NAMES,
+  SCREENS,
+  TYPE,
+} from './lib/tokens'
 import type { Light } from './lib/tokens'
 
 /**
@@ -30,7 +40,9 @@ const config: Config = {
         '@media (prefers-color-scheme: dark)': {
           '[data-theme=system]': { ...inks('night'), 'color-scheme': 'dark' },
         },
-        '@media print': { ':root, [data-theme]': { ...inks('paper'), 'color-scheme': 'light' } },
+        '@media print': {
+          ':root, [data-theme]': { ...inks('paper'), ...sizes(PAPER_TYPE), 'color-scheme': 'light' },
+        },
       })
     }),
   ],

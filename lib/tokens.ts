@@ -190,6 +190,17 @@ export const PHONE_TYPE: Partial<Record<TypeName, readonly [number, number]>> = 
   'mark-m': [26, 28],
 }
 
+/** And on paper, where a page is printed as it stands; the sheets that count are documents of their own. */
+export const PAPER_TYPE: Partial<Record<TypeName, readonly [number, number]>> = {
+  caption: [10, 13],
+  small: [11, 14],
+  body: [12, 15],
+  long: [13, 17],
+  sub: [13, 17],
+  section: [16, 20],
+  page: [22, 26],
+}
+
 /** Line weights, px: an alarm limit is always half as thick as a critical one. */
 export const STROKE = {
   edge: 2,

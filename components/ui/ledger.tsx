@@ -13,12 +13,12 @@ export function Ledger({
   ...rest
 }: { caption: ReactNode; shown?: boolean } & ComponentProps<'table'>) {
   return (
-    <div className="relative overflow-x-auto">
+    <div className="relative overflow-x-auto print:overflow-visible">
       <table
         {...rest}
         className={join(
           // Many columns on a phone: the table scrolls in its part rather than stand one word wide.
-          'w-full max-desk:has-[th:nth-child(5)]:min-w-[56rem] border-collapse border-y-2 border-ink bg-sheet [&_td+td]:border-l [&_td+td]:border-l-hair [&_td+th]:border-l [&_td+th]:border-l-hair [&_th+td]:border-l [&_th+td]:border-l-hair [&_th+th]:border-l [&_th+th]:border-l-hair',
+          'w-full max-desk:has-[th:nth-child(5)]:min-w-[56rem] print:!min-w-0 border-collapse border-y-2 border-ink bg-sheet [&_td+td]:border-l [&_td+td]:border-l-hair [&_td+th]:border-l [&_td+th]:border-l-hair [&_th+td]:border-l [&_th+td]:border-l-hair [&_th+th]:border-l [&_th+th]:border-l-hair',
           className,
         )}
       >
