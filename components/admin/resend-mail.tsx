@@ -31,7 +31,7 @@ export function ResendMail({
     defaultValues: { mailId, requestId, reason: '' },
   })
   return (
-    <form onSubmit={submit} noValidate className="grid gap-2.5">
+    <form method="post" onSubmit={submit} noValidate className="grid gap-2.5">
       <h3 className="text-sub">Send it again</h3>
       <Tick
         id="resend-sure"

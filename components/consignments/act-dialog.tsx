@@ -65,7 +65,12 @@ export function ActDialog<In extends FieldValues, Out extends FieldValues>({
         {words}
       </Button>
       <Dialog open={open} title={title} onClose={() => setOpen(false)}>
-        <form noValidate onSubmit={(event) => void submit(event)} className="flex flex-col gap-3">
+        <form
+          method="post"
+          noValidate
+          onSubmit={(event) => void submit(event)}
+          className="flex flex-col gap-3"
+        >
           {children}
           <ErrorSummary title={refusal?.message} issues={issues} turn={turn}>
             {refusal !== null && issues.length === 0 ? <p>Nothing was changed.</p> : null}

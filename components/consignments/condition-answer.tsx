@@ -53,7 +53,12 @@ export function ConditionAnswer({
         title={`Condition ${condition.number}: what was answered`}
         onClose={() => setOpen(false)}
       >
-        <form noValidate onSubmit={(event) => void submit(event)} className="flex flex-col gap-3">
+        <form
+          method="post"
+          noValidate
+          onSubmit={(event) => void submit(event)}
+          className="flex flex-col gap-3"
+        >
           <p>
             {condition.text}{' '}
             <span className="text-mute">Asked of {condition.askedOf || 'the party in charge'}.</span>

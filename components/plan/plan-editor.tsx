@@ -80,7 +80,7 @@ export function PlanEditor({
   return (
     <FormProvider {...form}>
       <PlanPageProvider page={page}>
-        <form noValidate onSubmit={(event) => void saving.submit(event)}>
+        <form method="post" noValidate onSubmit={(event) => void saving.submit(event)}>
           <PlanHead consignment={consignment} nowMs={nowMs} />
           <PlanCommands
             mark={consignment?.mark ?? null}

@@ -68,7 +68,7 @@ function AcknowledgeForm({
   })
   const conditions = conditionCount === 0 ? '' : ` and its ${counted(conditionCount, 'condition')}`
   return (
-    <form onSubmit={submit} noValidate className="mt-2 grid gap-2">
+    <form method="post" onSubmit={submit} noValidate className="mt-2 grid gap-2">
       <Tick
         id="acknowledge-read"
         label={`I have read revision ${revision}${conditions}`}

@@ -73,7 +73,7 @@ function AskChangeForm({
     onDone: onSent,
   })
   return (
-    <form onSubmit={submit} noValidate className="mt-2 grid gap-3">
+    <form method="post" onSubmit={submit} noValidate className="mt-2 grid gap-3">
       <Radios
         {...field('subject')}
         label="Of what"

@@ -63,6 +63,7 @@ export function ReviewDesk({
 
   return (
     <form
+      method="post"
       onSubmit={state.submit}
       noValidate
       className="mt-4 grid items-start gap-6 board:grid-cols-[minmax(0,1fr)_324px] wide:grid-cols-[minmax(0,1fr)_346px]"

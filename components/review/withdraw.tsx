@@ -36,7 +36,7 @@ export function Withdraw({
       </Button>
     )
   return (
-    <form onSubmit={submit} noValidate className="grid gap-2.5 border border-rule bg-sheet p-3">
+    <form method="post" onSubmit={submit} noValidate className="grid gap-2.5 border border-rule bg-sheet p-3">
       <p className="text-small">
         The consignment goes back to the desk. A manifest that rests on this approval is void at once.
       </p>

@@ -20,6 +20,8 @@ import { SignalLine } from './signal-line'
 import { StopLimits } from './stop-limits'
 import { useEntries } from './use-entries'
 
+const ANSWER_MS = 20_000
+
 /** The driver's own legs in a column as wide as a phone, one at a time; works on without a signal. */
 export function Checklist({
   view,
@@ -125,6 +127,8 @@ async function sendEntries(address: string, batch: EntryView[]): Promise<BatchAn
     method: 'POST',
     headers: { 'content-type': 'application/json' },
     body: JSON.stringify({ entries: batch }),
+    // A line that has gone dead without saying so must not hold up the next try.
+    signal: AbortSignal.timeout(ANSWER_MS),
   })
   if (!response.ok) throw new Error(`The server answered ${response.status}.`)
   return (await response.json()) as BatchAnswer

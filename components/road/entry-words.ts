@@ -1,4 +1,4 @@
-import { airTemp } from '@/lib/views/format'
+import { UNIT_SIGN, inUnit, withUnit } from '@/lib/views/format'
 import type { TempUnit } from '@/lib/views/preferences'
 import type { ChecklistView, EntryView } from '@/lib/views/checklist'
 
@@ -31,7 +31,7 @@ function readings(entry: EntryView, crates: ChecklistView['crates'], unit: TempU
   return Object.entries(byCrate)
     .map(([crateId, tempC]) => {
       const letter = crates.find((crate) => crate.crateId === crateId)?.letter ?? crateId
-      return `at ${letter} ${typeof tempC === 'number' ? airTemp(tempC, unit) : 'unknown'}`
+      return `at ${letter} ${typeof tempC === 'number' ? reading(tempC, unit) : 'unknown'}`
     })
     .join(', ')
 }
@@ -43,4 +43,10 @@ function words(value: EntryView['value'], key: string): string {
 
 function join(first: string, more: string): string {
   return more === '' ? first : `${first}: ${more}`
+}
+
+/** As it was typed: a decimal stays one. */
+function reading(tempC: number, unit: TempUnit): string {
+  const value = inUnit(tempC, unit)
+  return withUnit(value, UNIT_SIGN[unit], Number.isInteger(value) ? 0 : 1)
 }

@@ -45,7 +45,7 @@ export function HandoverAct({
   }
 
   return (
-    <form noValidate onSubmit={enter} className="mt-2 grid gap-2.5">
+    <form method="post" noValidate onSubmit={enter} className="mt-2 grid gap-2.5">
       <TextInput
         id={`${id}-to`}
         label="To whom, name and firm"

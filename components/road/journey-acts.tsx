@@ -79,7 +79,7 @@ function Depart({ act, action }: { act: DepartConsignment; action: JourneyAction
     defaultValues: act,
   })
   return (
-    <form onSubmit={submit} noValidate className="grid gap-2.5">
+    <form method="post" onSubmit={submit} noValidate className="grid gap-2.5">
       <ErrorSummary title={refusal?.message} issues={issues} turn={turn}>
         {refusal && issues.length === 0 ? <p>Nothing was changed.</p> : null}
       </ErrorSummary>
@@ -106,7 +106,7 @@ function Deliver({
     defaultValues: { ...act, receivedBy: '' },
   })
   return (
-    <form onSubmit={submit} noValidate className="grid gap-2.5 border-t border-rule pt-2.5">
+    <form method="post" onSubmit={submit} noValidate className="grid gap-2.5 border-t border-rule pt-2.5">
       <ErrorSummary title={refusal?.message} issues={issues} turn={turn}>
         {refusal && issues.length === 0 ? <p>Nothing was changed.</p> : null}
       </ErrorSummary>
@@ -139,7 +139,7 @@ function Stop({
     defaultValues: { ...act, reason: '', whereAnimalsAre: '' },
   })
   return (
-    <form onSubmit={submit} noValidate className="grid gap-2.5 border-t border-rule pt-2.5">
+    <form method="post" onSubmit={submit} noValidate className="grid gap-2.5 border-t border-rule pt-2.5">
       <ErrorSummary title={refusal?.message} issues={issues} turn={turn}>
         {refusal && issues.length === 0 ? <p>Nothing was changed.</p> : null}
       </ErrorSummary>

@@ -6,7 +6,7 @@ const MOST_LARGE = 8
 /** The items as a form: a box, a time and a reason for each. What was entered by phone is not printed: paper is written on. */
 export function LegFormItems({ leg, crates }: { leg: ChecklistLeg; crates: ChecklistView['crates'] }) {
   // The list stays on one sheet: a long one is set a little smaller.
-  const row = leg.items.length > MOST_LARGE ? 'h-7 text-[10.5pt]/[12pt]' : 'h-8 text-[12pt]/[14pt]'
+  const row = leg.items.length > MOST_LARGE ? 'h-[25px] text-[10.5pt]/[11.5pt]' : 'h-8 text-[12pt]/[14pt]'
   return (
     <section className="mt-1.5">
       <h2 className="flex items-baseline gap-2.5 text-[11.5pt]/[14pt]">
@@ -39,7 +39,7 @@ export function LegFormItems({ leg, crates }: { leg: ChecklistLeg; crates: Check
           {leg.items.map((item) => (
             <tr key={item.key} className={`break-inside-avoid border-t border-hair ${row}`}>
               <td className="w-7 px-1.5 font-head font-bold">{item.number}</td>
-              <td className="px-1.5 py-0.5">
+              <td className="px-1.5 py-px">
                 {item.text}
                 <Lines item={item} crates={crates} />
               </td>

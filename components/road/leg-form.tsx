@@ -80,7 +80,7 @@ function LegForm({ view, leg, sheet }: { view: ChecklistView; leg: ChecklistLeg;
       <Signs leg={leg} />
       <LegFormItems leg={leg} crates={view.crates} />
       <Calls calls={view.calls} />
-      <dl className="mt-2 grid grid-cols-[1.2fr_1fr_1fr_1.1fr] border border-ink [&>div+div]:border-l [&>div+div]:border-rule [&>div]:pb-6">
+      <dl className="mt-2 grid grid-cols-[1.2fr_1fr_1fr_1.1fr] border border-ink [&>div+div]:border-l [&>div+div]:border-rule [&>div]:pb-5">
         <Box caption="Driver, name in capitals" />
         <Box caption="Signature" />
         <Box caption={`Date, time, ${zoneName(leg.end.ms, leg.end.zone)}`} />
@@ -159,7 +159,7 @@ function Figure({ word, c, f }: { word: string; c: number | null; f: number | nu
         <span>none found</span>
       ) : (
         <span className="fig whitespace-nowrap font-semibold">
-          <span className="text-[25pt]/[24pt] tracking-[-.03em]">{spell(c)} °C</span>
+          <span className="text-[22pt]/[22pt] tracking-[-.03em]">{spell(c)} °C</span>
           {f !== null && <span className="ml-2 text-[13pt]">{spell(f)} °F</span>}
         </span>
       )}

@@ -55,16 +55,20 @@ export function useEntries({
   const sendNow = useCallback(async () => {
     if (!store || sending.current || store.read().every(({ refused }) => refused !== '')) return
     sending.current = true
-    const before = store.read().map(({ entry }) => entry)
-    const reached = await flush(store, send)
+    let reached = true
+    // What is made while a batch is on its way goes with the next one, at once.
+    while (reached && store.read().some(({ refused }) => refused === '')) {
+      const before = store.read().map(({ entry }) => entry)
+      reached = await flush(store, send)
+      const left = new Set(store.read().map(({ entry }) => entry.clientId))
+      const gone = before.filter((entry) => !left.has(entry.clientId))
+      if (gone.length > 0) {
+        setAcknowledged((earlier) => [...earlier, ...gone])
+        onStored()
+      }
+    }
     sending.current = false
     setSilentSince((since) => (reached ? null : (since ?? Date.now())))
-    const left = new Set(store.read().map(({ entry }) => entry.clientId))
-    const gone = before.filter((entry) => !left.has(entry.clientId))
-    if (gone.length > 0) {
-      setAcknowledged((earlier) => [...earlier, ...gone])
-      onStored()
-    }
   }, [store, send, onStored])
 
   useEffect(() => {

@@ -50,7 +50,7 @@ export function SignInForm({
   }
 
   return (
-    <form noValidate onSubmit={send} aria-labelledby="sign-in-title">
+    <form method="post" noValidate onSubmit={send} aria-labelledby="sign-in-title">
       <h1 id="sign-in-title" className="text-page">
         Sign in
       </h1>
