@@ -11,19 +11,20 @@ import { FACES, type FaceName, PAPER_FONTS } from '@/lib/tokens'
 type Weight = (typeof PAPER_FONTS)[number]['weight']
 type FontFile = ReturnType<typeof open>
 
-const shared = globalThis as {
-  steadfoldPaperFonts?: Map<string, FontFile>
-  steadfoldFontsRegistered?: boolean
-}
+const shared = globalThis as { steadfoldPaperFonts?: Map<string, FontFile> }
 
-/** Makes the faces known to the renderer; words are never split at a line's end. */
-export function registerFonts(): void {
-  if (shared.steadfoldFontsRegistered) return
+/**
+ * Makes the faces known to the renderer, opened anew: to be called before each document. Embedding a letter made of parts
+ * (i is ı and a dot) leaves the parts in the font's cache without a character of their own, and every later document of
+ * the process then drops its ı: “Şırnak” came out as “ırnak”. Words are never split at a line's end.
+ */
+export function registerFreshFonts(): void {
+  const known = Font.getRegisteredFonts()
+  for (const { family } of Object.values(FACES)) delete known[family]
   for (const { face, weight, style, file } of PAPER_FONTS) {
     Font.register({ family: FACES[face].family, fontWeight: weight, fontStyle: style, src: fontPath(file) })
   }
   Font.registerHyphenationCallback((word) => [word])
-  shared.steadfoldFontsRegistered = true
 }
 
 /** Letters of a text that a face cannot show. Any weight of a face has the same letters, so one is asked. */

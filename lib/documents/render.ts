@@ -1,7 +1,7 @@
 import { renderToBuffer } from '@react-pdf/renderer'
 import type { ManifestView } from '@/lib/views/manifest'
 import type { SheetView } from '@/lib/views/sheet'
-import { registerFonts } from './fonts'
+import { registerFreshFonts } from './fonts'
 import { manifest } from './manifest'
 import { assertPrintable } from './printable'
 import { goNoGoSheet } from './sheet'
@@ -29,11 +29,21 @@ type Plan<View> = (
 /** Room given up on each sheet where the planned heights were too small for what was drawn. */
 const SLACKS = [1, 0.94, 0.88]
 
-async function renderPlanned<View extends object>(view: View, plan: Plan<View>): Promise<RenderedDocument> {
-  registerFonts()
+const shared = globalThis as { steadfoldPress?: Promise<unknown> }
+
+/** One document at a time in a process: see registerFreshFonts. */
+function renderPlanned<View extends object>(view: View, plan: Plan<View>): Promise<RenderedDocument> {
+  const before = shared.steadfoldPress ?? Promise.resolve()
+  const ours = before.then(() => renderNow(view, plan))
+  shared.steadfoldPress = ours.catch(() => undefined)
+  return ours
+}
+
+async function renderNow<View extends object>(view: View, plan: Plan<View>): Promise<RenderedDocument> {
   assertPrintable(view)
   for (const slack of SLACKS) {
     const { document, sheets } = plan(view, slack)
+    registerFreshFonts()
     const bytes = await renderToBuffer(document)
     if (pagesOf(bytes) === sheets) return { bytes, pages: sheets }
   }

@@ -11,7 +11,7 @@ import { TwoLines } from '@/lib/documents/sheet/leg-table'
 import { dayDate, hourMin, localTime } from '@/lib/views/format'
 import type { ManifestLeg } from '@/lib/views/manifest'
 
-const WIDTH = { leg: 30, swatch: 32, start: 78, length: 42, party: 146, ours: 36, spare: 150, conditions: 38 }
+const WIDTH = { leg: 28, swatch: 30, start: 76, length: 40, party: 172, ours: 36, spare: 126, conditions: 36 }
 const TITLE = CONTENT_WIDTH - Object.values(WIDTH).reduce((sum, width) => sum + width, 0)
 const COLUMNS: Column[] = [
   { head: 'Leg', width: WIDTH.leg },
@@ -56,7 +56,11 @@ function legRow(leg: ManifestLeg, before: ManifestLeg | undefined): LedgerRow {
     lineCount(telephone, 'text', 400, 10, WIDTH.party - 12)
   return {
     key: leg.legId,
-    height: Math.max(32, 6 + 13 * (titleLines + 1), 6 + 13 * partyLines),
+    height: Math.max(
+      32,
+      6 + 13 * (titleLines + lineCount(leg.airWords, 'text', 400, 10, TITLE - 6)),
+      6 + 13 * partyLines,
+    ),
     cells: [
       <Ordinal key="n">{leg.ordinal}</Ordinal>,
       <Swatch key="s" pattern={leg.pattern} />,

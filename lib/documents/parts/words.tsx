@@ -23,12 +23,14 @@ const FACE_HEIGHT: Record<FaceName, number> = { head: 1.2, text: 1.3, fig: 1.3, 
 
 /**
  * Text in one of the four faces, sizes in pixels. Figures of the text face are set to one width. The renderer hangs a line
- * from its top; it is moved so that the line stands in the middle of its height, as on a page.
+ * from its top, and drops lines that don't fit: a text never shrinks, and it is moved so that the line stands in the middle of its height, as on a page.
  */
 export function Words({ size = 11, line, weight = 400, face = 'text', style = {}, children }: WordsProps) {
   const high = line ?? Math.round(size * 1.25)
   const top = px((high - FACE_HEIGHT[face] * size) / 2)
-  return <Text style={{ ...typeset(size, high, weight, face), top, ...style }}>{children}</Text>
+  return (
+    <Text style={{ ...typeset(size, high, weight, face), top, flexShrink: 0, ...style }}>{children}</Text>
+  )
 }
 
 /** The same as a style, for text inside text. */

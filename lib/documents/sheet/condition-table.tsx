@@ -6,7 +6,7 @@ import { CONTENT_WIDTH, Heading } from '@/lib/documents/parts/paper'
 import { Bold, Words } from '@/lib/documents/parts/words'
 import type { ConditionView } from '@/lib/views/sheet'
 
-const WIDTH = { number: 26, leg: 44, asked: 121, answer: 220 }
+const WIDTH = { number: 26, leg: 42, asked: 124, answer: 222 }
 const TEXT = CONTENT_WIDTH - WIDTH.number - WIDTH.leg - WIDTH.asked - WIDTH.answer
 const COLUMNS: Column[] = [
   { head: 'No.', width: WIDTH.number },
@@ -36,9 +36,9 @@ export function conditionTable(conditions: ConditionView[], remark: string): Tab
 function conditionRow(condition: ConditionView): LedgerRow {
   const { text, askedOf, answerWords, legWords } = condition
   const lines = Math.max(
-    lineCount(text, 'text', 400, 11, TEXT - 12),
-    lineCount(askedOf, 'text', 400, 11, WIDTH.asked - 12),
-    lineCount(answerWords, 'text', 600, 11, WIDTH.answer - 12),
+    lineCount(text, 'text', 400, 11, TEXT - 10.5),
+    lineCount(askedOf, 'text', 400, 11, WIDTH.asked - 10.5),
+    lineCount(answerWords, 'text', 600, 11, WIDTH.answer - 10.5),
     lineCount(legWords, 'text', 400, 11, WIDTH.leg - 12),
   )
   return {

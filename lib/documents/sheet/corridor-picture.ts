@@ -111,11 +111,16 @@ function smallFrame(animal: AnimalChart, top: number): TempFrame {
   return { lowC: lowest < alarmLowC ? lowC : cutC, highC, top, foot: top + SMALL }
 }
 
+/**
+ * Both critical limits and the tracks, though never more than a third of the range beyond a limit: a body far past its
+ * critical limit is drawn at the edge, and the room that is left stays readable.
+ */
 function wholeRange(animal: AnimalChart): { lowC: number; highC: number } {
   const { criticalLowC, criticalHighC } = animal.limits
   const values = bodies(animal)
-  const low = Math.min(criticalLowC, ...values)
-  const high = Math.max(criticalHighC, ...values)
+  const most = (criticalHighC - criticalLowC) / 3
+  const low = Math.max(criticalLowC - most, Math.min(criticalLowC, ...values))
+  const high = Math.min(criticalHighC + most, Math.max(criticalHighC, ...values))
   const pad = 0.05 * (high - low)
   return { lowC: low - pad, highC: high + pad }
 }

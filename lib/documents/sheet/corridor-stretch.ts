@@ -53,7 +53,7 @@ export function stretchMarks({
   const input = channelInput(legs, deciding)
   const channelTop = top + 12
   const temp = roomForNames(
-    nearBodyFrame(time, input, channelTop, channelTop + height),
+    readable(nearBodyFrame(time, input, channelTop, channelTop + height), deciding.limits),
     deciding.limits.criticalHighC,
   )
   const zone = zoneAt(charts.zones, leg.startMin)
@@ -89,6 +89,16 @@ function roomForNames(temp: TempFrame, criticalHighC: number): TempFrame {
   return {
     ...temp,
     highC: criticalHighC + (NAMES_HIGH * (criticalHighC - temp.lowC)) / (height - NAMES_HIGH),
+  }
+}
+
+/** What lies far past a critical limit is drawn at the edge. */
+function readable(temp: TempFrame, { criticalHighC, criticalLowC }: AnimalChart['limits']): TempFrame {
+  const most = (criticalHighC - criticalLowC) / 4
+  return {
+    ...temp,
+    highC: Math.min(temp.highC, criticalHighC + most),
+    lowC: Math.max(temp.lowC, criticalLowC - most),
   }
 }
 
@@ -170,7 +180,9 @@ function pasted(
   )
   const point = { x: xAt(time, worst), y: yAt(temp, valueAt(deciding.minutes, deciding.bodyC, worst)) }
   const solid = callout.verdict === 'no-go'
-  const block = solid ? 46 : textWidth('GO WITH CONDITIONS', 'head', 10, 800) + 14
+  const block = solid
+    ? Math.max(46, textWidth(callout.figure, 'fig', 10.5, 600) + 10)
+    : textWidth('GO WITH CONDITIONS', 'head', 10, 800) + 14
   const width =
     block + Math.max(textWidth(callout.title, 'text', 10.5, 600), textWidth(callout.text, 'text', 10.5)) + 14
   const past = valueAt(deciding.minutes, deciding.bodyC, worst) > (limits.alarmHighC + limits.alarmLowC) / 2

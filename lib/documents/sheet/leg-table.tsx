@@ -16,7 +16,9 @@ const REMARK =
   'In the frame minutes to spare, beside it outside air to spare; below the limit that decides, then body °C'
 const KEY =
   'Minutes until the limit, at worst delay. Solid frame GO, broken frame GO WITH CONDITIONS, block NO-GO. Low: the cold side. Co.: condition.'
-const WIDTH = { leg: 28, swatch: 30, start: 71, cell: 99.5, conditions: 25 }
+const WIDTH = { leg: 28, swatch: 30, start: 71, conditions: 27 }
+const CELL = { least: 99, most: 126 }
+const TITLE = 142
 const HEAD = 28
 const ROW = 30
 const UNDER = 16
@@ -47,7 +49,8 @@ export function legTables({ animals, legs }: Pick<SheetView, 'animals' | 'legs'>
 }
 
 function columnsFor(animals: AnimalView[]): Column[] {
-  const cells = animals.length * WIDTH.cell
+  const cell = cellWidth(animals.length)
+  const cells = animals.length * cell
   const title = CONTENT_WIDTH - WIDTH.leg - WIDTH.swatch - WIDTH.start - WIDTH.conditions - cells
   return [
     { head: 'Leg', width: WIDTH.leg, pad: 4 },
@@ -55,15 +58,21 @@ function columnsFor(animals: AnimalView[]): Column[] {
     { head: '', width: title, joined: true, pad: 2 },
     { head: 'Starts\nh:min', width: WIDTH.start, pad: 4 },
     ...animals.map(({ crateLetter, name }) => ({
-      head: <AnimalHead letter={crateLetter} name={name} />,
-      width: WIDTH.cell,
+      head: <AnimalHead letter={crateLetter} name={name} width={cell} />,
+      width: cell,
       pad: 4,
     })),
     { head: 'Co.', width: WIDTH.conditions, align: 'center', pad: 2 },
   ]
 }
 
-function AnimalHead({ letter, name }: { letter: string; name: string }) {
+/** Few animals leave room for wider cells and longer titles alike. */
+function cellWidth(animals: number): number {
+  const room = CONTENT_WIDTH - WIDTH.leg - WIDTH.swatch - WIDTH.start - WIDTH.conditions - TITLE
+  return Math.min(CELL.most, Math.max(CELL.least, room / Math.max(1, animals)))
+}
+
+function AnimalHead({ letter, name, width }: { letter: string; name: string; width: number }) {
   return (
     <View style={{ flexDirection: 'row', alignItems: 'flex-end' }}>
       <Mark size={15} line={14} style={{ marginRight: px(5) }}>
@@ -73,7 +82,7 @@ function AnimalHead({ letter, name }: { letter: string; name: string }) {
         size={10}
         line={12}
         weight={600}
-        style={{ maxLines: 1, textOverflow: 'ellipsis', width: px(WIDTH.cell - 26) }}
+        style={{ maxLines: 1, textOverflow: 'ellipsis', width: px(width - 26) }}
       >
         {name}
       </Words>
@@ -82,7 +91,11 @@ function AnimalHead({ letter, name }: { letter: string; name: string }) {
 }
 
 function legRow(leg: LegView, cells: LegCell[], titleWidth: number): LedgerRow {
-  const lines = lineCount(leg.title, 'text', 400, 11, titleWidth - 4)
+  const lines =
+    lineCount(leg.title, 'text', 400, 11, titleWidth - 5) +
+    lineCount(leg.airWords, 'text', 400, 10, titleWidth - 5) -
+    1
+  const width = cellWidth(cells.length) - 7
   return {
     key: leg.legId,
     height: ROW + (lines - 1) * 13.5,
@@ -91,7 +104,7 @@ function legRow(leg: LegView, cells: LegCell[], titleWidth: number): LedgerRow {
       <Swatch key="s" pattern={leg.pattern} />,
       <TwoLines key="t" first={leg.title} second={leg.airWords} />,
       <TwoLines key="w" first={localTime(leg.start.ms, leg.start.zone)} second={hourMin(leg.durationMin)} />,
-      ...cells.map((cell) => <SpareCell key={cell.animalId} cell={cell} />),
+      ...cells.map((cell) => <SpareCell key={cell.animalId} cell={cell} width={width} />),
       leg.conditionNumbers.join(', '),
     ],
   }
@@ -111,9 +124,8 @@ export function TwoLines({ first, second, size = 11 }: { first: string; second: 
   )
 }
 
-function SpareCell({ cell }: { cell: LegCell }) {
+function SpareCell({ cell, width }: { cell: LegCell; width: number }) {
   if (cell.verdict === null) return <Words size={10.5}>not on this leg</Words>
-  const { bodyC } = cell.margin
   return (
     <View>
       <View style={{ flexDirection: 'row', alignItems: 'center' }}>
@@ -123,8 +135,16 @@ function SpareCell({ cell }: { cell: LegCell }) {
         </Words>
       </View>
       <Words size={10} line={12}>
-        {`${cell.limitWords}${bodyC === null ? '' : `, body ${bodyMargin(bodyC, 'c').replace(/\u00a0°C$/, '')}`}`}
+        {limitAndBody(cell, width)}
       </Words>
     </View>
   )
+}
+
+/** "alarm low, body 0.9"; where that runs over, the column's own remark says what the figure is. */
+function limitAndBody({ limitWords, margin: { bodyC } }: LegCell, width: number): string {
+  if (bodyC === null) return limitWords
+  const figure = bodyMargin(bodyC, 'c').replace(/\u00a0°C$/, '')
+  const full = `${limitWords}, body ${figure}`
+  return lineCount(full, 'text', 400, 10, width) === 1 ? full : `${limitWords}, ${figure}`
 }

@@ -1,5 +1,6 @@
 import { View } from '@react-pdf/renderer'
 import type { FixedBlock } from '@/lib/documents/flow'
+import { lineCount } from '@/lib/documents/fonts'
 import { CONTENT_WIDTH } from '@/lib/documents/parts/paper'
 import { Figure, INK, Mark, px, Words } from '@/lib/documents/parts/words'
 import { figure } from '@/lib/views/format'
@@ -9,15 +10,15 @@ import { chunk } from './animal-boxes'
 const PER_ROW = 4
 const HEAD = 26
 const BOX = 112
-const ROW_NOTE = 15
 
 /** The one frame a driver looks for: air at which to stop and ring, each crate, above first. */
 export function stopLimits(limits: StopLimitView[], firm: SheetFirm): FixedBlock[] {
   if (limits.length === 0) return []
   const perRow = Math.min(PER_ROW, Math.max(2, limits.length))
   const rows = chunk(limits, perRow)
-  const noted = limits.some((limit) => otherLegs(limit) !== '') ? ROW_NOTE : 0
-  const height = HEAD + rows.length * (BOX + noted) + 8
+  const width = (CONTENT_WIDTH - 8) / perRow
+  const heights = rows.map((row) => BOX + Math.max(...row.map((limit) => noteHeight(limit, width))))
+  const height = HEAD + heights.reduce((sum, one) => sum + one, 0) + 8
   return [
     {
       height: height + 9,
@@ -39,17 +40,12 @@ export function stopLimits(limits: StopLimitView[], firm: SheetFirm): FixedBlock
               key={row[0]?.crateId}
               style={{
                 flexDirection: 'row',
-                height: px(BOX + noted),
+                height: px(heights[index] ?? BOX),
                 ...(index > 0 ? { borderTopWidth: px(1), borderTopColor: INK.rule } : {}),
               }}
             >
               {row.map((limit, at) => (
-                <CrateStops
-                  key={limit.crateId}
-                  limit={limit}
-                  width={(CONTENT_WIDTH - 8) / perRow}
-                  first={at === 0}
-                />
+                <CrateStops key={limit.crateId} limit={limit} width={width} first={at === 0} />
               ))}
             </View>
           ))}
@@ -105,13 +101,13 @@ function Side({ word, c, f }: { word: string; c: number | null; f: number | null
           no limit found
         </Words>
       ) : (
-        <View style={{ flexDirection: 'row', alignItems: 'flex-end', height: px(30) }}>
+        <View style={{ flexDirection: 'row', alignItems: 'flex-end', minHeight: px(30) }}>
           <Figure
             size={33}
             line={30}
             weight={600}
             tight={0.4}
-            style={{ width: px(102), letterSpacing: px(-1) }}
+            style={{ minWidth: px(102), marginRight: px(6), letterSpacing: px(-1) }}
           >
             {`${figure(c)} °C`}
           </Figure>
@@ -124,16 +120,21 @@ function Side({ word, c, f }: { word: string; c: number | null; f: number | null
   )
 }
 
-/** "Leg 3: 24 °C, 6 °C": legs whose planned air lies outside the strictest limits, and which have their own. */
+/** "Own limits: leg 3, −6 to 24 °C": legs planned outside the strictest limits, which have their own. */
 function otherLegs({ byLeg }: StopLimitView): string {
   const others = byLeg.filter(({ plannedInside }) => !plannedInside)
-  return others.map((leg) => `Leg ${leg.ordinal}: ${pair(leg)}`).join('; ')
+  // Where none is planned inside its limit, the strictest of all stands above already.
+  if (others.length === 0 || others.length === byLeg.length) return ''
+  return `Own limits: ${others.map((leg) => `leg ${leg.ordinal}, ${range(leg)}`).join('; ')}`
 }
 
-function pair({ aboveC, belowC }: AirStop): string {
-  const words = [
-    belowC === null ? '' : `below ${figure(belowC)}`,
-    aboveC === null ? '' : `above ${figure(aboveC)}`,
-  ]
-  return `${words.filter(Boolean).join(', ')} °C`
+function range({ aboveC, belowC }: AirStop): string {
+  if (aboveC !== null && belowC !== null) return `${figure(belowC)} to ${figure(aboveC)}\u00a0°C`
+  if (aboveC !== null) return `above ${figure(aboveC)}\u00a0°C`
+  return belowC === null ? 'no air keeps it' : `below ${figure(belowC)}\u00a0°C`
+}
+
+function noteHeight(limit: StopLimitView, width: number): number {
+  const note = otherLegs(limit)
+  return note === '' ? 0 : 3 + 12 * lineCount(note, 'text', 400, 10, width - 20)
 }

@@ -6,7 +6,7 @@ import type { AnimalView, Moment, Stamp } from '../sheet'
 import type { Assessed } from './assessed'
 import type { ProfileFact, SheetFacts } from './facts'
 import type { JourneyLeg } from './journey'
-import { legsInWords, limitWords, marginOf, trackWords } from './words'
+import { legsInWords, limitWords, marginOf, narrowest, trackWords } from './words'
 
 export interface AnimalContext {
   facts: SheetFacts
@@ -42,6 +42,7 @@ function animalView(
     verdict?.decidedBy === undefined ? undefined : assessed?.effective.findings[verdict.decidedBy]
   const decidedLegs =
     finding === undefined || assessed === null ? [] : legsOfFinding(finding, animal.id, assessed, journey)
+  const shown = finding?.marginMin === undefined ? (narrowestOf(animal.id, assessed) ?? finding) : finding
   const firstZone = journey[0]?.start.zone ?? facts.firm.zone
   return {
     animalId: animal.id,
@@ -63,15 +64,27 @@ function animalView(
     lastWatered: momentOf(animal.lastWateredLocal, firstZone),
     bodyLimits: profile?.limits ?? null,
     stamp: stampOf(verdict?.verdict, context, conditionsOn(conditionalLegs(animal.id, assessed))),
-    margin: marginOf(finding),
+    margin: marginOf(shown),
     decidedWords:
       finding === undefined ? '' : [limitWords(finding), legsInWords(decidedLegs)].filter(Boolean).join(', '),
     decidedLegs,
-    variant: finding?.variant ?? null,
-    trackWords: trackWords(finding),
+    variant: shown?.variant ?? null,
+    trackWords: shown === finding ? trackWords(finding) : narrowestWords(shown, journey),
     decidedAt: decidedAt(finding, assessed, journey),
     overridden: isOverridden(animal.id, assessed),
   }
+}
+
+function narrowestOf(animalId: string, assessed: Assessed | null): Finding | undefined {
+  return narrowest((assessed?.effective.findings ?? []).filter((one) => one.animalId === animalId))
+}
+
+/** What decides has no margin of its own: the figures are those of the narrowest body limit, and say so. */
+function narrowestWords(finding: Finding | undefined, journey: JourneyLeg[]): string {
+  if (finding === undefined) return ''
+  const ordinals = journey.filter(({ leg }) => leg.id === finding.legId).map(({ ordinal }) => ordinal)
+  const where = [limitWords(finding), legsInWords(ordinals)].filter(Boolean).join(', ')
+  return `Narrowest: ${where}. ${trackWords(finding).replace(/ decides\.$/, '.')}`
 }
 
 /** The verdict as a stamp; conditions count only where the verdict holds on them. */

@@ -138,9 +138,9 @@ function countOn(conditions: ConditionView[], journey: JourneyLeg[], legIds: rea
 
 /** "Hallmyre Kennels, Peebles": the party, and its place where the name doesn't say it. */
 function placed(party: string, place: string | undefined): string {
-  return [party, place ?? '']
-    .filter((part, index, all) => part !== '' && !(index === 1 && all[0]?.includes(part)))
-    .join(', ')
+  const at = place ?? ''
+  if (at.includes(party)) return at
+  return [party, party.includes(at) ? '' : at].filter(Boolean).join(', ')
 }
 
 function flightOf(journey: JourneyLeg[]): string {

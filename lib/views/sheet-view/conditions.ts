@@ -2,7 +2,7 @@ import { dayTime } from '../format'
 import type { ConditionView } from '../sheet'
 import type { ConditionFact, SheetFacts } from './facts'
 import type { JourneyLeg } from './journey'
-import { listed, ordinalRange } from './words'
+import { ordinalRange } from './words'
 
 /** Conditions in the order of the journey; the same words to the same party on several legs are one. */
 export function conditionViews({ conditions, firm }: SheetFacts, journey: JourneyLeg[]): ConditionView[] {
@@ -47,7 +47,7 @@ export function conditionViews({ conditions, firm }: SheetFacts, journey: Journe
 export function conditionsRemark(conditions: ConditionView[]): string {
   const open = conditions.filter(({ holdsRelease }) => holdsRelease).map(({ number }) => number)
   if (open.length === 0) return ''
-  return `${listed(open)} ${open.length === 1 ? 'isn’t' : 'aren’t'} confirmed, so no figure on this sheet counts ${open.length === 1 ? 'it' : 'them'}`
+  return `${ordinalRange(open)} ${open.length === 1 ? 'isn’t' : 'aren’t'} confirmed, so no figure on this sheet counts ${open.length === 1 ? 'it' : 'them'}`
 }
 
 function answerWords(condition: ConditionFact, zone: string): string {

@@ -1,8 +1,7 @@
-import type { Finding } from '@/lib/rules/result'
 import type { AnimalView, ConditionView, LegCell, LegView } from '../sheet'
 import type { Assessed } from './assessed'
 import type { JourneyLeg } from './journey'
-import { limitWords, marginOf } from './words'
+import { limitWords, marginOf, narrowest } from './words'
 
 /** Legs with a cell for each animal, in the order of the animals. */
 export function legViews(
@@ -48,7 +47,10 @@ function legCell(animalId: string, legId: string, assessed: Assessed | null): Le
   const verdict = assessed?.effective.verdicts.find((one) => one.animalId === animalId && one.legId === legId)
   const findings = assessed?.effective.findings ?? []
   const decided = verdict?.decidedBy === undefined ? undefined : findings[verdict.decidedBy]
-  const shown = decided?.marginMin === undefined ? narrowest(findings, animalId, legId) : decided
+  const shown =
+    decided?.marginMin === undefined
+      ? narrowest(findings.filter((one) => one.animalId === animalId && one.legId === legId))
+      : decided
   const overridden = (assessed?.effective.overridden ?? []).some(({ findingIndex }) => {
     const finding = assessed?.original[findingIndex]
     return finding?.animalId === animalId && finding.legId === legId
@@ -60,18 +62,4 @@ function legCell(animalId: string, legId: string, assessed: Assessed | null): Le
     limitWords: decided === undefined ? (shown === undefined ? '' : limitWords(shown)) : limitWords(decided),
     overridden,
   }
-}
-
-function narrowest(findings: readonly Finding[], animalId: string, legId: string): Finding | undefined {
-  const own = findings.filter(
-    (one) => one.animalId === animalId && one.legId === legId && one.marginMin !== undefined,
-  )
-  return own.reduce<Finding | undefined>(
-    (best, one) => (best === undefined || room(one) < room(best) ? one : best),
-    undefined,
-  )
-}
-
-function room({ marginOutsideAirC = 99, marginMin = 999 }: Finding): number {
-  return marginOutsideAirC * 1000 + marginMin
 }

@@ -105,3 +105,14 @@ export function trackWords(finding: Finding | undefined): string {
 export function capital(words: string): string {
   return words.charAt(0).toUpperCase() + words.slice(1)
 }
+
+/** The finding with least room among those that have a margin; a law or a judgement has none. */
+export function narrowest(findings: readonly Finding[]): Finding | undefined {
+  const room = ({ marginOutsideAirC = 99, marginMin = 999 }: Finding) => marginOutsideAirC * 1000 + marginMin
+  return findings
+    .filter(({ marginMin }) => marginMin !== undefined)
+    .reduce<Finding | undefined>(
+      (best, one) => (best === undefined || room(one) < room(best) ? one : best),
+      undefined,
+    )
+}
