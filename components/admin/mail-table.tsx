@@ -33,7 +33,7 @@ export function MailTable({
               aria-current={row.id === chosenId ? 'true' : undefined}
               className="aria-[current]:bg-handwash aria-[current]:[&>td:first-child]:shadow-[inset_4px_0_0_var(--hand)]"
             >
-              <Cell attention={needsDecision(row.state)} className="whitespace-nowrap">
+              <Cell attention={needsDecision(row.state)} className="min-w-[9rem]">
                 <MailStateCell row={row} />
               </Cell>
               <Cell>
@@ -42,7 +42,7 @@ export function MailTable({
                     <Mark size="s">{row.mark}</Mark>{' '}
                   </>
                 )}
-                {row.subject}
+                {withoutMark(row)}
               </Cell>
               <Cell className="break-all text-small">{row.to}</Cell>
               <Cell className="text-small">{row.lastWord}</Cell>
@@ -64,4 +64,11 @@ export function MailTable({
       </p>
     </>
   )
+}
+
+/** A subject begins with the mark, which stands beside it already. */
+function withoutMark({ mark, subject }: MailRow): string {
+  return mark !== null && subject.startsWith(mark)
+    ? subject.slice(mark.length).replace(/^[,:]\s*/, '')
+    : subject
 }

@@ -21,7 +21,8 @@ export function LiveQueue({
   chosen: { consignmentId: number; crateId: string } | null
 }) {
   const queue = useQuery({
-    queryKey: ['review-queue'],
+    // A page drawn again after a signature brings its own queue, newer than what is kept.
+    queryKey: ['review-queue', first.nowMs],
     queryFn: readQueue,
     initialData: first,
     initialDataUpdatedAt: first.nowMs,

@@ -80,7 +80,12 @@ export function ReviewDesk({
       </div>
       <div className="divide-y divide-rule border-2 border-ink bg-sheet [&>*]:px-4 [&>*]:py-3">
         <OtherCrates form={state} crates={crates} chosen={chosen} />
-        <VetConditions form={state} conditions={sheet.conditions} legs={sheet.legs} />
+        <VetConditions
+          form={state}
+          conditions={sheet.conditions}
+          legs={sheet.legs}
+          closed={view.closedWords !== ''}
+        />
         <DecisionPart form={state} view={view} findings={covered} all={findings} />
       </div>
     </form>

@@ -11,10 +11,13 @@ export function VetConditions({
   form,
   conditions,
   legs,
+  closed,
 }: {
   form: ReviewFormState
   conditions: readonly ConditionView[]
   legs: readonly LegView[]
+  /** Nothing can be decided now, so nothing can be added. */
+  closed: boolean
 }) {
   const { fields, append, remove } = useFieldArray({ control: form.form.control, name: 'conditions' })
   return (
@@ -65,7 +68,7 @@ export function VetConditions({
           </button>
         </fieldset>
       ))}
-      <p className="mt-2">
+      <p className="mt-2" hidden={closed}>
         <button type="button" className="link" onClick={() => append({ text: '', legId: '', party: '' })}>
           Add a condition
         </button>
