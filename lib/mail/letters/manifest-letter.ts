@@ -82,8 +82,8 @@ function journey(view: ManifestView): LetterPart[] {
     {
       kind: 'facts',
       rows: [
-        { label: 'Leaves', lines: [[view.consignor.name, first].filter(Boolean).join(', '), at(leaves)] },
-        { label: 'Arrives', lines: [[view.consignee.name, last].filter(Boolean).join(', '), at(arrives)] },
+        { label: 'Leaves', lines: [partyAt(view.consignor.name, first), at(leaves)] },
+        { label: 'Arrives', lines: [partyAt(view.consignee.name, last), at(arrives)] },
         { label: 'In crate', lines: [`${duration(view.journeyMin)}, ${counted(view.legs.length, 'leg')}`] },
         ...(replacesRevision === null
           ? []
@@ -96,6 +96,12 @@ function journey(view: ManifestView): LetterPart[] {
       ],
     },
   ]
+}
+
+/** "Hallmyre Kennels, Peebles"; a place called after its party is said once. */
+function partyAt(party: string, place: string): string {
+  if (place.includes(party)) return place
+  return [party, party.includes(place) ? '' : place].filter(Boolean).join(', ')
 }
 
 function conditions({ conditions: all }: ManifestView): LetterPart[] {
