@@ -17,8 +17,16 @@ const { knowledge, faces, storage, verbs, edge, client } = floors
 const zone = (target, from, message) => ({ target, from, message })
 
 const zones = [
-  zone(['./lib/thermal', './lib/errors.ts', './lib/tokens.ts'], [...knowledge, ...faces, ...storage, ...verbs, ...edge, ...client], 'The ground floor imports nothing of ours.'),
-  zone(knowledge, [...faces, ...storage, ...verbs, ...edge, ...client], 'Knowledge imports only the ground floor and itself.'),
+  zone(
+    ['./lib/thermal', './lib/errors.ts', './lib/tokens.ts'],
+    [...knowledge, ...faces, ...storage, ...verbs, ...edge, ...client],
+    'The ground floor imports nothing of ours.',
+  ),
+  zone(
+    knowledge,
+    [...faces, ...storage, ...verbs, ...edge, ...client],
+    'Knowledge imports only the ground floor and itself.',
+  ),
   zone(faces, [...verbs, ...edge, ...client], 'Faces are pure: ground, knowledge, and types of rows.'),
   zone(storage, [...faces, ...verbs, ...edge, ...client], 'Storage imports ground and knowledge only.'),
   zone(verbs, [...edge, ...client], 'Verbs never import the edge.'),
@@ -26,7 +34,17 @@ const zones = [
 ]
 
 const config = [
-  { ignores: ['.next/**', 'dist/**', 'node_modules/**', '.data/**', 'next-env.d.ts', 'test-results/**', 'playwright-report/**'] },
+  {
+    ignores: [
+      '.next/**',
+      'dist/**',
+      'node_modules/**',
+      '.data/**',
+      'next-env.d.ts',
+      'test-results/**',
+      'playwright-report/**',
+    ],
+  },
   ...next,
   ...typescript,
   {
@@ -50,19 +68,55 @@ const config = [
   {
     files: ['lib/thermal/**', 'lib/rules/**'],
     rules: {
-      'no-restricted-globals': ['error', 'process', 'fetch', 'setTimeout', 'window', 'document', 'Date', 'performance'],
+      'no-restricted-globals': [
+        'error',
+        'process',
+        'fetch',
+        'setTimeout',
+        'window',
+        'document',
+        'Date',
+        'performance',
+      ],
       'no-restricted-properties': [
         'error',
-        ...['random', 'exp', 'log', 'log2', 'log10', 'log1p', 'expm1', 'pow', 'sin', 'cos', 'tan', 'asin', 'acos', 'atan', 'atan2', 'cbrt', 'tanh', 'sinh', 'cosh', 'hypot'].map((property) => ({
+        ...[
+          'random',
+          'exp',
+          'log',
+          'log2',
+          'log10',
+          'log1p',
+          'expm1',
+          'pow',
+          'sin',
+          'cos',
+          'tan',
+          'asin',
+          'acos',
+          'atan',
+          'atan2',
+          'cbrt',
+          'tanh',
+          'sinh',
+          'cosh',
+          'hypot',
+        ].map((property) => ({
           object: 'Math',
           property,
           message: 'Engines differ in the last bit: use lib/thermal/elementary.ts.',
         })),
       ],
-      'no-restricted-syntax': ['error', { selector: "BinaryExpression[operator='**']", message: 'Use pow of lib/thermal/elementary.ts.' }],
+      'no-restricted-syntax': [
+        'error',
+        { selector: "BinaryExpression[operator='**']", message: 'Use pow of lib/thermal/elementary.ts.' },
+      ],
     },
   },
-  { files: ['lib/local/**', 'lib/workers/**', 'seeders/**', 'migrations/**', 'tests/**'], rules: { 'no-console': 'off' } },
+  {
+    files: ['lib/local/**', 'lib/workers/**', 'seeders/**', 'migrations/**', 'tests/**'],
+    rules: { 'no-console': 'off' },
+  },
 ]
 
 export default config

@@ -28,7 +28,11 @@ export class SteadfoldError extends Error {
   readonly issues: FieldIssue[]
   readonly details: Record<string, unknown>
 
-  constructor(code: ErrorCode, message: string, more: { issues?: FieldIssue[]; details?: Record<string, unknown> } = {}) {
+  constructor(
+    code: ErrorCode,
+    message: string,
+    more: { issues?: FieldIssue[]; details?: Record<string, unknown> } = {},
+  ) {
     super(message)
     this.name = 'SteadfoldError'
     this.code = code

@@ -6,7 +6,8 @@ test('a critical limit is overridden by nobody', async ({ browser }) => {
   const desk = await open(browser, 'dispatcher')
   await desk.page.goto('/consignments')
   await desk.page
-    .getByRole('link', { name: /Wadi Sahm/ })
+    .locator('tr', { hasText: /Wadi Sahm/ })
+    .getByRole('link')
     .first()
     .click()
   await expect(desk.page.getByRole('img', { name: /^Verdict: no-go/i }).first()).toBeVisible()

@@ -7,7 +7,8 @@ test('two editors collide and nothing is lost', async ({ browser }) => {
   const second = await open(browser, 'second-dispatcher')
   await first.page.goto('/consignments')
   await first.page
-    .getByRole('link', { name: /Lorn loft/ })
+    .locator('tr', { hasText: /Lorn loft/ })
+    .getByRole('link')
     .first()
     .click()
   await expect(first.page).toHaveURL(/consignments\/\d+/)

@@ -27,7 +27,10 @@ async function bodyWithin(request: Request, most: number): Promise<Uint8Array> {
     length += part.value.byteLength
     if (length > most) {
       await reader?.cancel()
-      throw new SteadfoldError('invalid', `This file is larger than ${most / 1024 / 1024} MB: no paper of ours is.`)
+      throw new SteadfoldError(
+        'invalid',
+        `This file is larger than ${most / 1024 / 1024} MB: no paper of ours is.`,
+      )
     }
     chunks.push(part.value)
   }

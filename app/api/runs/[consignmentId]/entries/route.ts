@@ -5,11 +5,14 @@ import { storeEntriesSchema } from '@/lib/schemas/run-entry'
 export const dynamic = 'force-dynamic'
 
 /** A device's queue of road entries: answers which are stored and which never will be. Sent twice, stored once. */
-export const POST = jsonRoute('/api/runs/[consignmentId]/entries', async ({ actor, request, params, now }) => {
-  const sent = (await request.json()) as Record<string, unknown>
-  return storeEntries(
-    actor,
-    storeEntriesSchema.parse({ ...sent, consignmentId: idOf(params, 'consignmentId') }),
-    now,
-  )
-})
+export const POST = jsonRoute(
+  '/api/runs/[consignmentId]/entries',
+  async ({ actor, request, params, now }) => {
+    const sent = (await request.json()) as Record<string, unknown>
+    return storeEntries(
+      actor,
+      storeEntriesSchema.parse({ ...sent, consignmentId: idOf(params, 'consignmentId') }),
+      now,
+    )
+  },
+)
