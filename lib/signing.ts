@@ -196,7 +196,6 @@ function certificate(
   made.publicKey = publicKey
   // Positive and 16 bytes: RFC 5280 4.1.2.2 allows 20.
   made.serialNumber = `4${randomBytes(16).toString('hex').slice(1)}`
-  // A quarter of an hour back, for readers whose clock is behind ours.
   // Two days back: clocks lag, and the papers of a demo are dated back to when its journeys were prepared.
   made.validity.notBefore = new Date(Date.now() - 2 * 86_400_000)
   made.validity.notAfter = new Date(made.validity.notBefore.getTime() + years * 365.25 * 86_400_000)

@@ -37,7 +37,12 @@ export function SpeciesSheet({ view }: { view: SpeciesView }) {
         words="product limits: below any recorded fatal value"
       >
         {view.limits && (
-          <div className="mb-3 overflow-x-auto border border-rule bg-sheet p-3">
+          <div
+            role="group"
+            tabIndex={0}
+            aria-label="Limits"
+            className="mb-3 overflow-x-auto border border-rule bg-sheet p-3"
+          >
             <SpeciesRuler limits={view.limits} unit={unit} />
           </div>
         )}

@@ -28,7 +28,7 @@ export function SheetCorridors({ view }: { view: SheetView }) {
         Body °C, true time, {charts.scheduleWords}. Hatching begins at the alarm limit; the thick line in it
         is critical. {corridorExplanation(cut, charts.animals)}
       </p>
-      <div className="overflow-x-auto">
+      <div role="group" tabIndex={0} aria-label="Corridors" className="overflow-x-auto">
         <PictureSvg
           picture={picture}
           summary={`Body temperature of every animal between its limits. ${view.headline}`}

@@ -13,7 +13,13 @@ export function Ledger({
   ...rest
 }: { caption: ReactNode; shown?: boolean } & ComponentProps<'table'>) {
   return (
-    <div className="relative overflow-x-auto print:overflow-visible">
+    // Focusable, so that the arrow keys scroll what does not fit.
+    <div
+      role="group"
+      tabIndex={0}
+      aria-label={typeof caption === 'string' ? caption : 'Table'}
+      className="relative overflow-x-auto print:overflow-visible"
+    >
       <table
         {...rest}
         className={join(
