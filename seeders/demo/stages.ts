@@ -109,7 +109,7 @@ async function decide(demo: DemoConsignment, world: DemoWorld, consignmentId: nu
 }
 
 /** Every party asked has confirmed in writing. */
-async function confirmAll(desk: Actor, consignmentId: number, key: string, at: Date) {
+export async function confirmAll(desk: Actor, consignmentId: number, key: string, at: Date) {
   const waiting = await models.Condition.findAll({ where: { consignmentId, answer: null }, order: ['id'] })
   for (const [index, condition] of waiting.entries()) {
     await answerCondition(
@@ -127,12 +127,12 @@ async function confirmAll(desk: Actor, consignmentId: number, key: string, at: D
   }
 }
 
-async function workOff(at: Date) {
+export async function workOff(at: Date) {
   const shift = { worker: 'demo', assessor: plainAssessor(), clock: () => at }
   while (await runNextJob(shift));
 }
 
-async function personOf(world: DemoWorld, key: string): Promise<Actor> {
+export async function personOf(world: DemoWorld, key: string): Promise<Actor> {
   const user = await models.User.findByPk(world.people[key] ?? 0, { include: 'shipper', rejectOnEmpty: true })
   return actorOf(user, null)
 }

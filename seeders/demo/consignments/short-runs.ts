@@ -7,7 +7,7 @@ const low = [56, 40, 41] as const
 const vivarium = [60, 45, 35] as const
 const basket = [90, 55, 26] as const
 
-/** Two reptiles in an unheated van on a cold morning: the vet sent it back. */
+/** Two reptiles in a van that was warmed before loading and is not heated on the way, on a cold morning. */
 export const peeblesBalfron: DemoConsignment = {
   key: 'peebles-balfron',
   stage: 'assessed',
@@ -75,13 +75,18 @@ export const peeblesBalfron: DemoConsignment = {
           from: 'peebles',
           to: 'balfron',
           minutes: 125,
-          surroundings: van(outside(3, 85, 3, 60)),
+          surroundings: warmed(outside(3, 85, 3, 60), 28),
           inCharge: DESK,
           ...(driverId !== undefined && { driverId }),
         },
       ]),
     }
   },
+}
+
+function warmed(around: ReturnType<typeof outside>, startC: number): ReturnType<typeof van> {
+  const space = van(around)
+  return space.type === 'enclosed' ? { ...space, initialAirTempC: startC } : space
 }
 
 /** A draft with what a dispatcher still has to put right. */
