@@ -1,4 +1,5 @@
 import type { DemoConsignment } from './common'
+import { collieHome } from './collie-home'
 import { glasgowMuscat } from './glasgow-muscat'
 import { glasgowValletta } from './glasgow-valletta'
 import { lauderKelso } from './lauder-kelso'
@@ -15,4 +16,5 @@ export const DEMO_CONSIGNMENTS: readonly DemoConsignment[] = [
   balfronPeebles,
   peeblesBalfron,
   obanCarlisle,
+  collieHome,
 ]
