@@ -1,4 +1,4 @@
-import { fromZonedTime, formatInTimeZone, getTimezoneOffset } from 'date-fns-tz'
+import { fromZonedTime, formatInTimeZone } from 'date-fns-tz'
 import fc from 'fast-check'
 import { describe, expect, it } from 'vitest'
 import {
@@ -89,8 +89,10 @@ describe('any minute from 2020 to 2035 in any of five zones', () => {
     fc.assert(
       fc.property(minute, zone, (m, z) => {
         const ms = m * 60_000
-        expect(toLocalTime(ms, z)).toBe(formatInTimeZone(ms, z, "yyyy-MM-dd'T'HH:mm"))
-        expect(zoneOffsetMin(ms, z) * 60_000).toBe(getTimezoneOffset(z, new Date(ms)))
+        const wall = formatInTimeZone(ms, z, "yyyy-MM-dd'T'HH:mm")
+        expect(toLocalTime(ms, z)).toBe(wall)
+        // Its getTimezoneOffset is an hour off in the hours before a change; its wall times are right.
+        expect(zoneOffsetMin(ms, z) * 60_000).toBe(Date.parse(`${wall}Z`) - ms)
       }),
       { numRuns: 400 },
     )
