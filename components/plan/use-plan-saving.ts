@@ -61,8 +61,7 @@ export function usePlanSaving({
     setKeptAtMs(kept.atMs)
     if (kept.version === saved.version) return show(kept.values)
     takeIn(kept.base, kept.values, saved.plan, { by: '', atMs: kept.atMs })
-    // Once, when the page opens.
-    // eslint-disable-next-line react-hooks/exhaustive-deps
+    // eslint-disable-next-line react-hooks/exhaustive-deps -- once, when the page opens
   }, [])
 
   function takeIn(base: Plan, mine: Plan, theirs: Plan, by: OpenConflict['saved']) {
