@@ -26,7 +26,7 @@ export function GoNoGoSheet({ view }: { view: SheetView }) {
           {view.edgeWords}
         </p>
       )}
-      <header className="mb-3 flex items-end gap-4 border-b-4 border-ink pb-2">
+      <header className="mb-3 flex flex-wrap items-end gap-4 border-b-4 border-ink pb-2">
         <Mark size="l" label="Consignment">
           {view.mark}
         </Mark>
@@ -34,7 +34,7 @@ export function GoNoGoSheet({ view }: { view: SheetView }) {
           <h1 className="text-section">Go/no-go sheet</h1>
           <p className="text-small">{view.revisionWords}</p>
         </div>
-        <div className="ml-auto flex flex-col items-end text-small">
+        <div className="ml-auto flex min-w-0 flex-col items-end text-small">
           <Brand />
           <span>
             Shown {dayDateYear(view.made.ms, view.made.zone)},{' '}
