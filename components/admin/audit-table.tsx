@@ -23,7 +23,7 @@ export function AuditTable({
 }) {
   return (
     <>
-      <Ledger caption="Audit trail, newest first" className="max-desk:min-w-[52rem]">
+      <Ledger caption="Audit trail, newest first" folds>
         <thead>
           <tr>
             <Head numeric>Row</Head>
@@ -71,28 +71,32 @@ function Row({
         aria-current={chosen ? 'true' : undefined}
         className="aria-[current]:bg-handwash aria-[current]:[&>td:first-child]:shadow-[inset_4px_0_0_var(--hand)]"
       >
-        <Cell numeric>{count(row.id)}</Cell>
-        <Cell className="whitespace-nowrap">
+        <Cell label="Row" numeric>
+          {count(row.id)}
+        </Cell>
+        <Cell label="When" className="whitespace-nowrap">
           {dayDate(row.at.ms, row.at.zone)} <span className="fig text-small">{clockWithSeconds(row)}</span>
         </Cell>
-        <Cell>
+        <Cell label="Who">
           {row.who}
           {row.role && <span className="text-mute">, {row.role}</span>}
         </Cell>
-        <Cell attention={row.refused}>
+        <Cell label="What" attention={row.refused}>
           <span className="fig text-small">{row.verb}</span>
           <span className="text-mute"> {row.subject}</span>
           {row.note && <span className="block text-small text-mute">{row.note}</span>}
         </Cell>
-        <Cell>
+        <Cell label="Mark">
           {row.mark && (
             <Link href={hrefOfConsignment(row)} className="text-ink">
               <Mark size="s">{row.mark}</Mark>
             </Link>
           )}
         </Cell>
-        <Cell className="fig text-small">{row.from}</Cell>
-        <Cell>
+        <Cell label="From where" className="fig text-small">
+          {row.from}
+        </Cell>
+        <Cell label="Before, after">
           {opens ? (
             <Link href={hrefOf(chosen ? null : row)} scroll={false} className="link">
               {chosen ? 'Close' : 'Open'}

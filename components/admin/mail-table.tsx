@@ -16,7 +16,7 @@ export function MailTable({
 }) {
   return (
     <>
-      <Ledger caption="Mails, newest first" className="max-desk:min-w-[44rem]">
+      <Ledger caption="Mails, newest first" folds>
         <thead>
           <tr>
             <Head>State</Head>
@@ -44,8 +44,12 @@ export function MailTable({
                 )}
                 {withoutMark(row)}
               </Cell>
-              <Cell className="break-all text-small">{row.to}</Cell>
-              <Cell className="text-small">{row.lastWord}</Cell>
+              <Cell label="To" className="break-all text-small">
+                {row.to}
+              </Cell>
+              <Cell label="Last word" className="text-small">
+                {row.lastWord}
+              </Cell>
               <Cell>
                 <Link href={hrefOf(row)} scroll={false} className="link">
                   {needsDecision(row.state) ? 'Decide' : 'Open'}

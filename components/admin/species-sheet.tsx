@@ -96,7 +96,7 @@ function Figures({
   unit: TempUnit
 }) {
   return (
-    <Ledger caption={caption} className="max-desk:min-w-[40rem]">
+    <Ledger caption={caption} folds>
       <thead>
         <tr>
           <Head className="w-[28%]">What</Head>
@@ -109,11 +109,11 @@ function Figures({
         {figures.map((figure) => (
           <tr key={figure.words}>
             <RowHead className="font-normal">{figure.words}</RowHead>
-            <Cell numeric className="font-semibold">
+            <Cell label="Figure" numeric className="font-semibold">
               {figureWords(figure, unit)}
             </Cell>
-            <Cell>{figure.source}</Cell>
-            <Cell>{CONFIDENCE_WORDS[figure.confidence]}</Cell>
+            <Cell label="Where from">{figure.source}</Cell>
+            <Cell label="Confidence">{CONFIDENCE_WORDS[figure.confidence]}</Cell>
           </tr>
         ))}
       </tbody>

@@ -12,7 +12,7 @@ export function SpeciesTable({ rows }: { rows: readonly SpeciesRow[] }) {
   const unit = useUnit()
   return (
     <>
-      <Ledger caption="Species rows in force" className="max-desk:min-w-[40rem]">
+      <Ledger caption="Species rows in force" folds>
         <thead>
           <tr>
             <Head>Species</Head>
@@ -32,15 +32,15 @@ export function SpeciesTable({ rows }: { rows: readonly SpeciesRow[] }) {
                 <span className="block text-small font-normal italic text-mute">{row.scientificName}</span>
               </RowHead>
               <Cell>{row.limits ? <SpeciesRuler limits={row.limits} unit={unit} small /> : 'No limits'}</Cell>
-              <Cell numeric>
+              <Cell label="Alarms" numeric>
                 {row.limits &&
                   `${limitFigure(row.limits.alarmLowC, 'low', unit)} to ${limitFigure(row.limits.alarmHighC, 'high', unit)}`}
               </Cell>
-              <Cell numeric>
+              <Cell label="Criticals" numeric>
                 {row.limits &&
                   `${limitFigure(row.limits.criticalLowC, 'low', unit)} to ${limitFigure(row.limits.criticalHighC, 'high', unit)}`}
               </Cell>
-              <Cell attention={row.refused !== ''}>
+              <Cell label="In force" attention={row.refused !== ''}>
                 Version {row.version}
                 {row.refused && <span className="block text-small font-semibold">cannot be assessed</span>}
               </Cell>

@@ -10,7 +10,7 @@ import { registrationTrouble } from './registration-trouble'
 /** People of the firm and of its shippers. A double rule: a vet's record that needs somebody. */
 export function UsersTable({ rows, today }: { rows: readonly UserRow[]; today: string }) {
   return (
-    <Ledger caption="Users by name" className="max-desk:min-w-[44rem]">
+    <Ledger caption="Users by name" folds>
       <thead>
         <tr>
           <Head>Name</Head>
@@ -27,24 +27,22 @@ export function UsersTable({ rows, today }: { rows: readonly UserRow[]; today: s
               <span className="block font-semibold">{row.name}</span>
               <span className="block text-small font-normal text-mute">{row.email}</span>
             </RowHead>
-            <Cell>
+            <Cell label="Role">
               {ROLE_WORDS[row.role]}
               {row.shipperName && <span className="block text-small text-mute">{row.shipperName}</span>}
             </Cell>
-            <Cell>
+            <Cell label="State">
               {row.offSince ? 'Off' : 'Active'}
               <span className="block text-small text-mute">
                 since {dayDateYear((row.offSince ?? row.since).ms, row.since.zone)}
               </span>
             </Cell>
-            <Cell>
+            <Cell label="Telephone">
               {row.telephone ? (
                 <a href={`tel:${row.telephone.replace(/[^+\d]/g, '')}`}>{row.telephone}</a>
-              ) : (
-                ''
-              )}
+              ) : null}
             </Cell>
-            <Cell>
+            <Cell label="Registration">
               {row.role === 'vet' && <Registration registration={row.registration} today={today} />}
             </Cell>
           </tr>

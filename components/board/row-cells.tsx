@@ -61,7 +61,11 @@ export function MarginCell({ row }: { row: ConsignmentRow }) {
             air <Temperature c={row.marginOutsideAirC} kind="air-margin" />
           </span>
         )}
-        <span className="block">{row.deciding}</span>
+        {row.deciding.split('; ').map((line) => (
+          <span key={line} className="block">
+            {line}
+          </span>
+        ))}
       </span>
     </span>
   )

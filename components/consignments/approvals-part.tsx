@@ -14,7 +14,7 @@ export function ApprovalsPart({ approvals }: { approvals: readonly ApprovalLine[
   if (approvals.length === 0)
     return <p className="text-mute">No vet has decided on a crate of this consignment yet.</p>
   return (
-    <Ledger caption="Approvals of crate set-ups, newest first">
+    <Ledger caption="Approvals of crate set-ups, newest first" folds>
       <thead>
         <tr>
           <Head>Crate</Head>
@@ -30,17 +30,17 @@ export function ApprovalsPart({ approvals }: { approvals: readonly ApprovalLine[
             <RowHead>
               <span className="crate text-mark-s">{line.crateMark}</span>
             </RowHead>
-            <Cell>{line.revision}</Cell>
-            <Cell>
+            <Cell label="Revision">{line.revision}</Cell>
+            <Cell label="Decision">
               <Lines
                 first={DECISION_WORDS[line.decision]}
                 second={line.reasons || line.conditions.join('. ')}
               />
             </Cell>
-            <Cell>
+            <Cell label="Signed by">
               <Lines first={`${line.signerName}, ${line.registration}`} second={when(line.signedAt)} />
             </Cell>
-            <Cell attention={line.voided !== null}>
+            <Cell label="Stands" attention={line.voided !== null}>
               <Stands line={line} />
             </Cell>
           </tr>

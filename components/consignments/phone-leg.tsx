@@ -47,7 +47,7 @@ export function PhoneLeg({
         <>
           <div className="my-3 flex flex-wrap items-center gap-3.5">
             <Stamp verdict={cell.verdict} outOfDate={view.stamp.outOfDate} size="phone" />
-            <b>{cell.limitWords === '' ? '' : `${capital(cell.limitWords)} decides.`}</b>
+            <DecidedBy cell={cell} />
           </div>
           <div className="-mx-4 grid grid-cols-2 divide-x divide-rule border-y-2 border-ink bg-sheet">
             <Large
@@ -74,6 +74,17 @@ export function PhoneLeg({
         {step(index + 1)}
       </div>
     </section>
+  )
+}
+
+/** "Alarm decides."; where a law or a judgement does, to which limit the figures below are. */
+function DecidedBy({ cell: { limitWords, decidedWords } }: { cell: LegCell }) {
+  if (limitWords === '') return null
+  return (
+    <b>
+      {capital(decidedWords || limitWords)} decides.
+      {decidedWords && ` The figures are to ${limitWords}.`}
+    </b>
   )
 }
 

@@ -2,6 +2,8 @@
 
 import { useFormContext, useWatch } from 'react-hook-form'
 import { Tick } from '@/components/forms/ticks'
+import { controlOf } from '@/lib/planning/climate-control'
+import type { Control } from '@/lib/planning/climate-control'
 import type { Plan } from '@/lib/schemas/plan'
 import { PlanNumber, PlanTemperature, PlanText } from './plan-fields'
 import { WeatherRows } from './weather-rows'
@@ -33,6 +35,13 @@ export function EnclosedFields({ index }: { index: number }) {
   )
 }
 
+const CONTROL_WORDS: Record<Control, string> = {
+  both: 'Watts the machine gives on such a day. Too few and the air leaves its set-point: the assessment shows it.',
+  cooling: 'It can only cool: the space is as cold as it gets without.',
+  heating: 'It can only heat: the space is as hot as it gets without.',
+  none: 'Put the watts the machine gives on such a day, 0 where it can’t. Ask whoever runs it: none is guessed.',
+}
+
 function FreshAir({ index }: { index: number }) {
   const { control } = useFormContext<Plan>()
   const air = useWatch({ control, name: `legs.${index}.surroundings` })
@@ -60,17 +69,20 @@ function Conditioning({ index }: { index: number }) {
         label="Cooled or heated to a set-point"
         checked={on}
         onChange={(event) =>
-          setValue(base, event.target.checked ? { setPointC: null, coolingW: 0, heatingW: 0 } : null, {
+          setValue(base, event.target.checked ? { setPointC: null, coolingW: null, heatingW: null } : null, {
             shouldDirty: true,
           })
         }
       />
       {on && (
-        <div className="grid grid-cols-3 gap-2.5">
-          <PlanTemperature path={`${base}.setPointC`} label="Set-point" />
-          <PlanNumber path={`${base}.coolingW`} label="Cooling" unit="W" />
-          <PlanNumber path={`${base}.heatingW`} label="Heating" unit="W" />
-        </div>
+        <>
+          <div className="grid grid-cols-3 gap-2.5">
+            <PlanTemperature path={`${base}.setPointC`} label="Set-point" />
+            <PlanNumber path={`${base}.coolingW`} label="Cooling" unit="W" />
+            <PlanNumber path={`${base}.heatingW`} label="Heating" unit="W" />
+          </div>
+          <p className="text-small text-mute">{CONTROL_WORDS[controlOf(air.conditioning)]}</p>
+        </>
       )}
     </fieldset>
   )

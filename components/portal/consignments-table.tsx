@@ -8,7 +8,7 @@ import { portalStateWords } from './state-words'
 /** A shipper's own consignments, the one that leaves next first. Double rule: something is asked of the shipper. */
 export function ConsignmentsTable({ rows }: { rows: readonly PortalRow[] }) {
   return (
-    <Ledger caption="Your consignments">
+    <Ledger caption="Your consignments" folds>
       <thead>
         <tr>
           <Head>Mark</Head>
@@ -32,11 +32,11 @@ export function ConsignmentsTable({ rows }: { rows: readonly PortalRow[] }) {
                 {row.leaves && `, leaves ${dayTime(row.leaves.ms, row.leaves.zone)}`}
               </span>
             </Cell>
-            <Cell attention={row.asked !== ''}>
+            <Cell label="State" attention={row.asked !== ''}>
               {portalStateWords(row.state)}
               {row.asked && <span className="block text-small font-semibold">{row.asked}</span>}
             </Cell>
-            <Cell>
+            <Cell label="Open">
               <Link
                 href={`/portal/${row.consignmentId}`}
                 className="link inline-flex items-center max-desk:min-h-11"

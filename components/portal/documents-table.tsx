@@ -17,12 +17,12 @@ export function DocumentsTable({ documents }: { documents: readonly PortalDocume
   if (documents.length === 0)
     return <Empty>No paper is issued yet. The manifest comes with the release.</Empty>
   return (
-    <Ledger caption="Papers, newest first">
+    <Ledger caption="Papers, newest first" folds>
       <thead>
         <tr>
           <Head>Paper</Head>
           <Head>State</Head>
-          <Head className="max-desk:hidden">Made, code</Head>
+          <Head>Made, code</Head>
           <Head>PDF</Head>
         </tr>
       </thead>
@@ -34,11 +34,8 @@ export function DocumentsTable({ documents }: { documents: readonly PortalDocume
               <span className="block text-small font-normal text-mute">
                 {counted(document.sheets, 'sheet')}
               </span>
-              <span className="desk:hidden">
-                <MadeAndCode document={document} />
-              </span>
             </RowHead>
-            <Cell>
+            <Cell label="State">
               <span className="flex items-center gap-2.5">
                 <DocumentDrawing state={document.state} height={28} />
                 <span>
@@ -46,10 +43,10 @@ export function DocumentsTable({ documents }: { documents: readonly PortalDocume
                 </span>
               </span>
             </Cell>
-            <Cell className="max-desk:hidden">
+            <Cell label="Made, code">
               <MadeAndCode document={document} />
             </Cell>
-            <Cell>
+            <Cell label="PDF">
               <a
                 href={`/api/documents/${document.documentId}/pdf`}
                 className="link inline-flex items-center max-desk:min-h-11"

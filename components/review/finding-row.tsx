@@ -47,15 +47,19 @@ export function FindingRow({
             />
           )}
         </Cell>
-        <Cell className="align-top">{finding.basisWords}</Cell>
+        <Cell label="Basis" className="align-top">
+          {finding.basisWords}
+        </Cell>
         <Cell className="align-top">
           <b>{finding.asked}</b>
           <span className="block text-small text-mute">
             {[finding.whoLegWords, finding.citation, finding.sourceWords].filter(Boolean).join('; ')}
           </span>
         </Cell>
-        <Cell className="whitespace-nowrap align-top">{finding.givesWords}</Cell>
-        <Cell numeric className={join('align-top', isBreach(finding) && 'font-semibold')}>
+        <Cell label="Plan gives" className="whitespace-nowrap align-top">
+          {finding.givesWords}
+        </Cell>
+        <Cell label="To spare" numeric className={join('align-top', isBreach(finding) && 'font-semibold')}>
           {finding.spareWords.split(', ').map((part) => (
             <span key={part} className="block">
               {part}

@@ -45,7 +45,7 @@ export function FindingsPart({
         )
       }
     >
-      <Ledger caption={`Findings on crates ${letters}`} className="max-desk:min-w-[44rem]">
+      <Ledger caption={`Findings on crates ${letters}`} folds>
         <thead>
           <tr>
             <Head className="w-[200px]">Override, by name</Head>

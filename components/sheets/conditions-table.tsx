@@ -13,7 +13,7 @@ export function ConditionsTable({
 }) {
   if (conditions.length === 0) return <p className="text-mute">The verdict rests on no condition.</p>
   return (
-    <Ledger caption="Conditions">
+    <Ledger caption="Conditions" folds>
       <thead>
         <tr>
           <Head>No.</Head>
@@ -27,10 +27,12 @@ export function ConditionsTable({
         {conditions.map((condition) => (
           <tr key={condition.conditionId}>
             <RowHead className="font-head text-sub font-bold">{condition.number}</RowHead>
-            <Cell className="whitespace-nowrap">{condition.legWords}</Cell>
+            <Cell label="Leg" className="whitespace-nowrap">
+              {condition.legWords}
+            </Cell>
             <Cell>{condition.text}</Cell>
-            <Cell>{condition.askedOf}</Cell>
-            <Cell attention={condition.answer === 'refused' || condition.kept === 'broken'}>
+            <Cell label="Asked of">{condition.askedOf}</Cell>
+            <Cell label="Confirmed" attention={condition.answer === 'refused' || condition.kept === 'broken'}>
               <Answer condition={condition} />
               {condition.answer === 'waiting' && act && <span className="block">{act(condition)}</span>}
             </Cell>

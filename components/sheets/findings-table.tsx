@@ -39,7 +39,7 @@ export function FindingsTable({
       : findings.filter(({ animalIds }) => animalIds.length === 0 || animalIds.includes(animalId))
   if (shown.length === 0) return <p className="text-mute">Nothing was found against this plan.</p>
   return (
-    <Ledger caption="Findings, the deciding ones first">
+    <Ledger caption="Findings, the deciding ones first" folds>
       <thead>
         <tr>
           <Head>No.</Head>
@@ -55,8 +55,8 @@ export function FindingsTable({
         {shown.map((finding) => (
           <tr key={finding.number} id={`finding-${finding.number}`}>
             <RowHead className="font-head text-sub font-bold">{finding.number}</RowHead>
-            <Cell>{finding.basisWords}</Cell>
-            <Cell>{finding.whoLegWords}</Cell>
+            <Cell label="Basis">{finding.basisWords}</Cell>
+            <Cell label="Who, leg">{finding.whoLegWords}</Cell>
             <Cell className="max-w-[34rem]">
               {finding.asked}
               {finding.note !== '' && finding.note !== finding.asked && (
@@ -68,15 +68,15 @@ export function FindingsTable({
                 </span>
               )}
             </Cell>
-            <Cell>{finding.givesWords}</Cell>
-            <Cell>
+            <Cell label="Plan gives">{finding.givesWords}</Cell>
+            <Cell label="To spare">
               {finding.margin.minutes === null && finding.margin.outsideAirC === null ? (
                 finding.spareWords
               ) : (
                 <MarginLine margin={finding.margin} />
               )}
             </Cell>
-            <Cell attention={finding.status === 'breach'}>
+            <Cell label="Status" attention={finding.status === 'breach'}>
               <StatusWords finding={finding} />
             </Cell>
           </tr>

@@ -16,7 +16,10 @@ export function LegsTable({
   outOfDate: boolean
 }) {
   return (
-    <Ledger caption="Legs: in the frame minutes to spare, beside it outside air to spare; below the limit that decides, then body">
+    <Ledger
+      caption="Legs: in the frame minutes to spare, beside it outside air to spare; below the limit that decides, then body"
+      folds
+    >
       <thead>
         <tr>
           <Head>Leg</Head>
@@ -45,16 +48,20 @@ export function LegsTable({
                 )}
               </span>
             </Cell>
-            <Cell className="whitespace-nowrap text-small">
+            <Cell label="From, to" className="whitespace-nowrap text-small">
               <LegTimes leg={leg} />
             </Cell>
-            <Cell numeric>{hourMin(leg.durationMin)}</Cell>
-            {leg.cells.map((cell) => (
-              <Cell key={cell.animalId}>
+            <Cell label="h:min" numeric>
+              {hourMin(leg.durationMin)}
+            </Cell>
+            {leg.cells.map((cell, column) => (
+              <Cell key={cell.animalId} label={animalLabel(animals[column])}>
                 <LegCellFigures cell={cell} outOfDate={outOfDate} />
               </Cell>
             ))}
-            <Cell className="fig text-small">{leg.conditionNumbers.join(', ')}</Cell>
+            <Cell label="Conditions" className="fig text-small">
+              {leg.conditionNumbers.join(', ')}
+            </Cell>
           </Row>
         ))}
       </tbody>
@@ -114,6 +121,10 @@ export function PaperLegs({
       </Ledger>
     </div>
   ))
+}
+
+function animalLabel(animal: AnimalView | undefined): string | undefined {
+  return animal && `${animal.crateLetter} ${animal.name}`
 }
 
 function AnimalHeads({ animals }: { animals: readonly AnimalView[] }) {

@@ -33,6 +33,7 @@ export function LegCellFigures({ cell, outOfDate = false }: { cell: LegCell; out
             , body <Temperature c={margin.bodyC} kind="body-margin" />
           </>
         )}
+        {cell.decidedWords && <span className="block">{cell.decidedWords} decides</span>}
       </span>
     </span>
   )

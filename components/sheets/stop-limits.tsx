@@ -20,9 +20,9 @@ export function StopLimits({
           {hours && `, ${hours}`}. Strictest of any leg, read at the slats
         </p>
       </div>
-      <div className="grid grid-cols-2 gap-px bg-rule desk:grid-cols-[repeat(auto-fit,minmax(11rem,1fr))]">
+      <div className="grid grid-cols-2 overflow-hidden desk:grid-cols-[repeat(auto-fit,minmax(11rem,1fr))]">
         {limits.map((limit) => (
-          <div key={limit.crateId} className="bg-sheet px-3 py-1.5">
+          <div key={limit.crateId} className="-ml-px -mt-px border-l border-t border-rule px-3 py-1.5">
             <Mark>{limit.crateMark}</Mark>
             <StopFigure words="above" c={limit.strictest.aboveC} f={limit.strictest.aboveF} />
             <StopFigure words="below" c={limit.strictest.belowC} f={limit.strictest.belowF} />

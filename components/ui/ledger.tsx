@@ -3,15 +3,17 @@ import { join } from './join'
 
 /**
  * A table ruled as a ledger: ink above and below, column hairlines. The caption is for ears unless `shown`.
- * Wrapped, so that a wide table scrolls inside its page and not the page itself.
+ * Wrapped, so that a wide table scrolls inside its page and not the page itself. One that `folds` needs no scrolling on a
+ * phone: each row stands as a block, each cell on its own line behind its `label`.
  */
 export function Ledger({
   caption,
   shown = false,
+  folds = false,
   children,
   className,
   ...rest
-}: { caption: ReactNode; shown?: boolean } & ComponentProps<'table'>) {
+}: { caption: ReactNode; shown?: boolean; folds?: boolean } & ComponentProps<'table'>) {
   return (
     // Focusable, so that the arrow keys scroll what does not fit.
     <div
@@ -24,7 +26,8 @@ export function Ledger({
         {...rest}
         className={join(
           // Many columns on a phone: the table scrolls in its part rather than stand one word wide.
-          'w-full max-desk:has-[th:nth-child(5)]:min-w-[56rem] print:!min-w-0 border-collapse border-y-2 border-ink bg-sheet [&_td+td]:border-l [&_td+td]:border-l-hair [&_td+th]:border-l [&_td+th]:border-l-hair [&_th+td]:border-l [&_th+td]:border-l-hair [&_th+th]:border-l [&_th+th]:border-l-hair',
+          folds ? 'folds' : 'max-desk:has-[th:nth-child(5)]:min-w-[56rem]',
+          'w-full print:!min-w-0 border-collapse border-y-2 border-ink bg-sheet [&_td+td]:border-l [&_td+td]:border-l-hair [&_td+th]:border-l [&_td+th]:border-l-hair [&_th+td]:border-l [&_th+td]:border-l-hair [&_th+th]:border-l [&_th+th]:border-l-hair',
           className,
         )}
       >
@@ -57,15 +60,20 @@ export function Head({
   )
 }
 
-/** A body cell; `numeric` sets figures right in Mono; `attention` is the double rule of something to be put right. */
+/**
+ * A body cell; `numeric` sets figures right in Mono; `attention` is the double rule of something to be put right; `label`
+ * names the cell where its table is folded.
+ */
 export function Cell({
   numeric = false,
   attention = false,
+  label,
   className,
   ...rest
-}: { numeric?: boolean; attention?: boolean } & ComponentProps<'td'>) {
+}: { numeric?: boolean; attention?: boolean; label?: string } & ComponentProps<'td'>) {
   return (
     <td
+      data-label={label}
       {...rest}
       className={join(
         'border-t border-hair px-2.5 py-[7px] align-middle',

@@ -11,7 +11,7 @@ export type { TempUnit }
 
 const NBSP = '\u00a0'
 const MINUS = '\u2212'
-const MINUTES_SHOWN = 240
+export const MINUTES_SHOWN = 240
 const DAYS = ['Sun', 'Mon', 'Tue', 'Wed', 'Thu', 'Fri', 'Sat'] as const
 const MONTHS = ['Jan', 'Feb', 'Mar', 'Apr', 'May', 'Jun', 'Jul', 'Aug', 'Sep', 'Oct', 'Nov', 'Dec'] as const
 

@@ -46,6 +46,7 @@ export interface ManifestLeg extends Omit<LegView, 'cells'> {
   verdict: LegView['cells'][number]['verdict']
   margin: Margin
   limitWords: string
+  decidedWords: string
   /** Letter of the crate that has least to spare. */
   crateLetter: string
 }

@@ -41,8 +41,10 @@ export interface LegCell {
   /** null: the animal is not on this leg, or the leg was not evaluated. */
   verdict: Verdict | null
   margin: Margin
-  /** The limit or rule that decides, e.g. "alarm", "alarm low", "critical", "law". */
+  /** The limit the margin is to, e.g. "alarm", "alarm low", "critical"; the rule that decides where there is no margin. */
   limitWords: string
+  /** What decides the verdict where that is another thing than the limit of the margin, e.g. "law", "judgement"; else "". */
+  decidedWords: string
   overridden: boolean
 }
 

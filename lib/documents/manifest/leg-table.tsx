@@ -93,7 +93,7 @@ function SpareCell({ leg }: { leg: ManifestLeg }) {
           {[spareAir(leg.margin), leg.crateLetter].filter(Boolean).join(', ')}
         </Words>
         <Words size={10} line={12}>
-          {leg.limitWords}
+          {[leg.limitWords, leg.decidedWords].filter(Boolean).join(', ')}
         </Words>
       </View>
     </View>

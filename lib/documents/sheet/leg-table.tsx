@@ -142,9 +142,10 @@ function SpareCell({ cell, width }: { cell: LegCell; width: number }) {
 }
 
 /** "alarm low, body 0.9"; where that runs over, the column's own remark says what the figure is. */
-function limitAndBody({ limitWords, margin: { bodyC } }: LegCell, width: number): string {
-  if (bodyC === null) return limitWords
+function limitAndBody({ limitWords, decidedWords, margin: { bodyC } }: LegCell, width: number): string {
+  const words = [limitWords, decidedWords].filter(Boolean).join(', ')
+  if (bodyC === null) return words
   const figure = bodyMargin(bodyC, 'c').replace(/\u00a0°C$/, '')
-  const full = `${limitWords}, body ${figure}`
-  return lineCount(full, 'text', 400, 10, width) === 1 ? full : `${limitWords}, ${figure}`
+  const fits = (line: string) => lineCount(line, 'text', 400, 10, width) === 1
+  return [`${words}, body ${figure}`, `${words}, ${figure}`].find(fits) ?? words
 }

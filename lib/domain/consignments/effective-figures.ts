@@ -1,8 +1,9 @@
 import 'server-only'
 import type { Transaction } from 'sequelize'
 import { effectiveVerdict } from '@/lib/rules/effective-verdict'
-import type { EffectiveVerdict } from '@/lib/rules/effective-verdict'
+import type { EffectiveVerdict, SignedOverride } from '@/lib/rules/effective-verdict'
 import type { Finding } from '@/lib/rules/result'
+import { narrowest } from '@/lib/views/sheet-view/words'
 import type { Plan } from '@/lib/schemas/plan'
 import { models } from '@/models'
 import type { Approval, Consignment } from '@/models'
@@ -25,16 +26,7 @@ export function effectiveOf(
     assessment: { findings: result.findings, verdicts: result.verdicts, animals },
     approvals: [...approvals.values()].map((approval) => ({
       crateId: approval.crateRef,
-      overrides: (approval.overrides ?? []).map((override) => ({
-        rule: override.findingRule,
-        animalId: override.animalRef,
-        legId: override.legRef,
-        reason: override.reason,
-        minutesPast: override.minutesPast,
-        worstBodyC: override.worstBodyC,
-        signedBy: approval.signerName,
-        signedAtMs: approval.signedAt.getTime(),
-      })),
+      overrides: overridesOf(approval),
     })),
     conditions: conditions.flatMap(({ row, crateRefs }) =>
       (crateRefs ?? [null]).map((crateId) => ({
@@ -48,6 +40,20 @@ export function effectiveOf(
   })
 }
 
+/** What an approval overrides, as the rules read it. */
+export function overridesOf({ overrides = [], signerName, signedAt }: Approval): SignedOverride[] {
+  return overrides.map((override) => ({
+    rule: override.findingRule,
+    animalId: override.animalRef,
+    legId: override.legRef,
+    reason: override.reason,
+    minutesPast: override.minutesPast,
+    worstBodyC: override.worstBodyC,
+    signedBy: signerName,
+    signedAtMs: signedAt.getTime(),
+  }))
+}
+
 /** Puts the verdict that counts, and the finding that decides it, where the board reads them. */
 export async function writeEffectiveVerdict(tx: Transaction, row: Consignment): Promise<void> {
   const assessment =
@@ -58,16 +64,24 @@ export async function writeEffectiveVerdict(tx: Transaction, row: Consignment): 
   const effective = effectiveOf(result, plan, await signedCrates(tx, row), await standingConditions(tx, row))
   const { verdict, decidedBy } = effective.verdict
   const finding = decidedBy === undefined ? undefined : effective.findings[decidedBy]
+  const room = finding?.marginMin === undefined ? narrowest(effective.findings) : finding
   await row.update(
     {
       verdict,
-      deciding: finding === undefined ? null : decidingWords(finding, plan),
-      marginMin: finding?.marginMin ?? null,
-      marginOutsideAirC: finding?.marginOutsideAirC ?? null,
-      marginBodyC: finding?.marginBodyC ?? null,
+      deciding: finding === undefined ? null : boardWords(finding, room, plan),
+      marginMin: room?.marginMin ?? null,
+      marginOutsideAirC: room?.marginOutsideAirC ?? null,
+      marginBodyC: room?.marginBodyC ?? null,
     },
     { transaction: tx },
   )
+}
+
+/** A law or a judgement that decides has no minutes: the smallest margin then is another finding's, named after it. */
+function boardWords(finding: Finding, room: Finding | undefined, plan: Plan): string {
+  const decides = decidingWords(finding, plan)
+  if (room === undefined || room === finding) return decides
+  return `${decides}; figures to ${decidingWords(room, plan)}`.slice(0, 300)
 }
 
 const LIMIT_WORDS = {
@@ -87,5 +101,5 @@ function decidingWords(finding: Finding, plan: Plan): string {
   )
   const who = animal ? `${animal.name} (${crate?.letter ?? ''})` : crate ? `crate ${crate.letter}` : 'all'
   const leg = plan.legs.findIndex(({ id }) => id === finding.legId)
-  return [`${kind}${side}`, who, ...(leg < 0 ? [] : [`leg ${leg + 1}`])].join(', ').slice(0, 300)
+  return [`${kind}${side}`, who, ...(leg < 0 ? [] : [`leg ${leg + 1}`])].join(', ')
 }

@@ -159,21 +159,23 @@ function legs({ legs: all }: ManifestView): LetterPart[] {
         { head: 'To spare' },
         { head: 'Air to spare' },
       ],
-      rows: all.map(({ ordinal, title, start, verdict, margin, limitWords, crateLetter }): LetterCell[] => [
-        { text: String(ordinal), bold: true },
-        { text: title },
-        { text: localTime(start.ms, start.zone) },
-        {
-          text: margin.minutes === null ? 'not judged' : minutesToSpare(margin.minutes),
-          ...(verdict === null ? {} : { verdict }),
-          under: limitWords,
-        },
-        {
-          text: [margin.outsideAirC === null ? '' : airMargin(margin.outsideAirC, 'c'), crateLetter]
-            .filter(Boolean)
-            .join(', '),
-        },
-      ]),
+      rows: all.map(
+        ({ ordinal, title, start, verdict, margin, limitWords, decidedWords, crateLetter }): LetterCell[] => [
+          { text: String(ordinal), bold: true },
+          { text: title },
+          { text: localTime(start.ms, start.zone) },
+          {
+            text: margin.minutes === null ? 'not judged' : minutesToSpare(margin.minutes),
+            ...(verdict === null ? {} : { verdict }),
+            under: [limitWords, decidedWords].filter(Boolean).join(', '),
+          },
+          {
+            text: [margin.outsideAirC === null ? '' : airMargin(margin.outsideAirC, 'c'), crateLetter]
+              .filter(Boolean)
+              .join(', '),
+          },
+        ],
+      ),
     },
     {
       kind: 'note',

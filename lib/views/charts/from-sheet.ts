@@ -88,6 +88,7 @@ function chartLeg(leg: SheetCharts['legs'][number], name: string | null, cell: L
       outsideAirC: cell.margin.outsideAirC,
       bodyC: cell.margin.bodyC,
       limitWords: cell.limitWords,
+      decidedWords: cell.decidedWords,
     },
   }
 }

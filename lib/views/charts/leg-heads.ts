@@ -115,12 +115,17 @@ function headWords(leg: ChartLeg, head: HeadBox, unit: TempUnit): Mark[] {
 
 function limitWords(head: LegHead, x: number, box: HeadBox, unit: TempUnit): Mark[] {
   const room = box.x + box.width - x - 2
-  const marks: Mark[] = [words(x, box.y + 83, shortened(head.limitWords, room, 12, 600), { weight: 600 })]
+  const marks: Mark[] = [words(x, box.y + 83, shortened(decides(head), room, 12, 600), { weight: 600 })]
   const air = head.outsideAirC === null ? '' : `air ${bare(airMargin(head.outsideAirC, unit))}`
   const body = head.bodyC === null ? '' : `body ${bare(bodyMargin(head.bodyC, unit))}`
   const joined = [air, body].filter(Boolean).join(', ')
   if (box.height < 120) return [...marks, words(x, box.y + 101, joined, { ink: 'mute' })]
   return [...marks, words(x, box.y + 101, air, { ink: 'mute' }), words(x, box.y + 118, body, { ink: 'mute' })]
+}
+
+/** "alarm"; "alarm, law" where a law decides and the figures are to the alarm limit. */
+function decides({ limitWords: limit, decidedWords }: LegHead): string {
+  return [limit, decidedWords].filter(Boolean).join(', ')
 }
 
 /** A figure in the frame of its verdict; the limit's words stand under it. */

@@ -23,6 +23,8 @@ export interface LegHead {
   bodyC: number | null
   /** "alarm", "alarm low", "critical". */
   limitWords: string
+  /** What decides where that is another thing than the limit of the figures. */
+  decidedWords: string
 }
 
 export interface Track {

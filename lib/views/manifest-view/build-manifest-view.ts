@@ -181,6 +181,7 @@ function manifestLeg({ cells, ...leg }: LegView, { animals }: SheetView): Manife
       side: null,
     },
     limitWords: narrowest?.limitWords ?? '',
+    decidedWords: narrowest?.decidedWords ?? '',
     crateLetter: animal?.crateLetter ?? '',
   }
 }

@@ -1,3 +1,5 @@
+import { controlOf, controlWords } from '@/lib/planning/climate-control'
+import type { Control } from '@/lib/planning/climate-control'
 import { timelineOf } from '@/lib/planning/timeline'
 import type { Plan, PlanLeg, PlanOpenAir, PlanPlace, PlanSurroundings } from '@/lib/schemas/plan'
 import { figure } from '../format'
@@ -106,10 +108,26 @@ function plannedAir(leg: PlanLeg): PlannedAir {
 }
 
 function enclosed(leg: PlanLeg, space: Extract<PlanSurroundings, { type: 'enclosed' }>): PlannedAir {
-  const setPointC = space.conditioning?.setPointC ?? null
-  if (setPointC !== null) return known(setPointC, setPointC, `${spaceOf(leg)} at ${degrees(setPointC)}`)
   const air = outside(space.outside)
+  const setPointC = space.conditioning?.setPointC ?? null
+  const control = controlOf(space.conditioning)
+  const words = controlWords(control, degrees(setPointC))
+  if (setPointC !== null && words !== null)
+    return { ...driven(control, setPointC, air), words: `${spaceOf(leg)} ${words}` }
   return space.ventilationM3h === null ? { ...air, words: `no fresh air known, ${air.words}` } : air
+}
+
+/** A machine that only cools leaves cold air as cold as it is outside, and one that only heats leaves it as hot. */
+function driven(control: Control, setPointC: number, { minC, maxC }: PlannedAir): Omit<PlannedAir, 'words'> {
+  switch (control) {
+    case 'cooling':
+      return { minC: minC === null ? null : Math.min(minC, setPointC), maxC: setPointC }
+    case 'heating':
+      return { minC: setPointC, maxC: maxC === null ? null : Math.max(maxC, setPointC) }
+    case 'both':
+    case 'none':
+      return { minC: setPointC, maxC: setPointC }
+  }
 }
 
 function outside({ rows }: PlanOpenAir): PlannedAir {

@@ -1,4 +1,5 @@
 import type { AnimalView, ConditionView, LegCell, LegView } from '../sheet'
+import type { Finding } from '@/lib/rules/result'
 import type { Assessed } from './assessed'
 import type { JourneyLeg } from './journey'
 import { limitWords, marginOf, narrowest } from './words'
@@ -41,7 +42,7 @@ export function legViews(
 
 /**
  * What decides on one leg. Where that is no body limit (a law, a carrier's rule), the room shown is that of the narrowest
- * body limit of the leg, and the words still name what decides.
+ * body limit of the leg, named, and what decides is named beside it.
  */
 function legCell(animalId: string, legId: string, assessed: Assessed | null): LegCell {
   const verdict = assessed?.effective.verdicts.find((one) => one.animalId === animalId && one.legId === legId)
@@ -59,7 +60,17 @@ function legCell(animalId: string, legId: string, assessed: Assessed | null): Le
     animalId,
     verdict: verdict?.verdict ?? null,
     margin: marginOf(shown),
-    limitWords: decided === undefined ? (shown === undefined ? '' : limitWords(shown)) : limitWords(decided),
+    ...wordsOf(decided, shown),
     overridden,
   }
+}
+
+function wordsOf(
+  decided: Finding | undefined,
+  shown: Finding | undefined,
+): Pick<LegCell, 'limitWords' | 'decidedWords'> {
+  const finding = shown ?? decided
+  const limit = finding === undefined ? '' : limitWords(finding)
+  const decides = decided === undefined || decided === finding ? '' : limitWords(decided)
+  return { limitWords: limit, decidedWords: decides === limit ? '' : decides }
 }

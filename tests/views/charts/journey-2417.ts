@@ -40,7 +40,7 @@ export const legs: ChartLeg[] = ROWS.map(
       pattern,
       startMin,
       endMin: startMin + minutes,
-      head: { verdict, minutes: spare, outsideAirC: air, bodyC: body, limitWords },
+      head: { verdict, minutes: spare, outsideAirC: air, bodyC: body, limitWords, decidedWords: '' },
     }
   },
 )
