@@ -1,4 +1,6 @@
 import type { Plan, PlanCrate, PlanLeg } from '@/lib/schemas/plan'
+import { controlOf } from './climate-control'
+import type { Control } from './climate-control'
 
 export type ChecklistItemKind = 'tick' | 'reading' | 'water' | 'condition' | 'handover'
 
@@ -77,20 +79,24 @@ function openFaces(crate: PlanCrate): string {
 }
 
 function airItems(leg: PlanLeg): Item[] {
-  const air = leg.surroundings
-  const setPoint = air.type === 'enclosed' ? (air.conditioning?.setPointC ?? null) : null
   return [
-    ...(setPoint === null
-      ? []
-      : [
-          {
-            key: 'set-point',
-            kind: 'tick' as const,
-            text: `Climate control runs, set-point ${degrees(setPoint)}.`,
-          },
-        ]),
+    ...controlItems(leg),
     { key: 'reading-start', kind: 'reading', text: 'Air outside the crates, before moving off.' },
   ]
+}
+
+function controlItems({ surroundings: air }: PlanLeg): Item[] {
+  const machine = air.type === 'enclosed' ? air.conditioning : null
+  const runs = RUNS[controlOf(machine)]
+  if (machine?.setPointC == null || runs === null) return []
+  return [{ key: 'set-point', kind: 'tick', text: `${runs}, set-point ${degrees(machine.setPointC)}.` }]
+}
+
+const RUNS: Record<Control, string | null> = {
+  both: 'Climate control runs',
+  cooling: 'Cooling runs (there is no heating)',
+  heating: 'Heating runs (there is no cooling)',
+  none: null,
 }
 
 /** A condition of the whole journey stands on the driver's first leg. */

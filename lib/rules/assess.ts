@@ -20,6 +20,7 @@ import { minutesToSpare } from './minutes-to-spare'
 import { packFindings } from './packs'
 import type { Assessment, Endurance, Finding, Progress, StopLimit } from './result'
 import { type Runner, type Steps, createRunner } from './runner'
+import { setPointFindings } from './set-point'
 import { stopLimitsOf } from './stop-limits'
 import { type Prepared, type Subject, isAboard, prepare } from './subject'
 import { type Passage, decide } from './verdicts'
@@ -142,7 +143,7 @@ function planFindings(
       .filter((finding) => finding.animalId === animal.id && finding.legId === legId)
       .every(({ status, marginOutsideAirC = 0 }) => status !== 'breach' && marginOutsideAirC >= GO_MARGIN_C)
   }
-  return [...crates, ...judgements(scenario, subjects, base), ...rules]
+  return [...crates, ...judgements(scenario, subjects, base), ...setPointFindings(scenario, base), ...rules]
 }
 
 function* legFigures(

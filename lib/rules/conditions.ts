@@ -1,4 +1,5 @@
-import type { Leg, Scenario, Surroundings } from '@/lib/thermal'
+import { controlOf } from '@/lib/planning/climate-control'
+import type { EnclosedSpace, Leg, Scenario, Surroundings } from '@/lib/thermal'
 import { GO_MARGIN_C } from './base-runs'
 import type { Assessment, Finding } from './result'
 import { compare, degrees, list, minutes, signed } from './wording'
@@ -88,10 +89,7 @@ function heldText(surroundings: Surroundings): string {
     case 'controlled':
       return `Air held at ${degrees(surroundings.airTempC)} throughout.`
     case 'enclosed': {
-      const setPoint =
-        surroundings.conditioning === undefined
-          ? ''
-          : `Set-point ${degrees(surroundings.conditioning.setPointC)} held throughout. `
+      const setPoint = heldSetPoint(surroundings)
       const air =
         surroundings.ventilationM3h === undefined
           ? 'Fresh air of the space stated.'
@@ -100,6 +98,21 @@ function heldText(surroundings: Surroundings): string {
     }
     case 'open-air':
       return 'Somebody stays with the crates in the open and reads the air at the start and every 30 minutes.'
+  }
+}
+
+function heldSetPoint({ conditioning }: EnclosedSpace): string {
+  if (conditioning === undefined) return ''
+  const setPoint = degrees(conditioning.setPointC)
+  switch (controlOf(conditioning)) {
+    case 'both':
+      return `Set-point ${setPoint} held throughout. `
+    case 'cooling':
+      return `Cooled to at most ${setPoint} throughout. `
+    case 'heating':
+      return `Heated to at least ${setPoint} throughout. `
+    case 'none':
+      return ''
   }
 }
 

@@ -174,8 +174,9 @@ const enclosedSchema = z.object({
   conditioning: z
     .object({
       setPointC: draftQuantity({ label: 'Set-point', unit: '°C', min: -10, max: 40 }),
-      coolingW: quantity({ label: 'Cooling', unit: 'W', min: 0, max: 200_000 }),
-      heatingW: quantity({ label: 'Heating', unit: 'W', min: 0, max: 200_000 }),
+      /** Empty: nobody has asked yet. 0: the machine cannot. */
+      coolingW: draftQuantity({ label: 'Cooling', unit: 'W', min: 0, max: 200_000 }),
+      heatingW: draftQuantity({ label: 'Heating', unit: 'W', min: 0, max: 200_000 }),
     })
     .nullable(),
   outside: openAirSchema,

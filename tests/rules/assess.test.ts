@@ -225,6 +225,62 @@ describe('a van whose cooling fails in the heat', () => {
   })
 })
 
+describe('a van with too small a machine', () => {
+  const at = (coolingW: number, heatingW: number, outsideC: number) =>
+    run(
+      scenarioOf({
+        legs: [
+          legOf('road', {
+            durationMin: 180,
+            surroundings: vanIn(openAirAt(outsideC), {
+              solarApertureM2: 0,
+              conditioning: { setPointC: 18, coolingW, heatingW },
+            }),
+          }),
+        ],
+        crates: [crateOf('a', [beagle('bess')])],
+      }),
+    ).findings.filter(({ rule }) => rule === 'set-point-not-held')
+
+  it('says that 18 °C is not held, and how far off it is', () => {
+    // 45 W/K of walls and 66 m³/h of air at 0.34 Wh/m³K are 67 W/K: 400 W hold 30 °C at best when it is 36 °C outside.
+    const [finding, ...more] = at(400, 2_000, 36)
+    expect(more).toEqual([])
+    expect(finding).toMatchObject({ status: 'note', side: 'high', limit: 18, legId: 'road' })
+    expect(finding?.value).toBeGreaterThan(30)
+    expect(finding?.value).toBeLessThan(37)
+  })
+
+  it('says nothing where it holds, nor of a side it has no machine for', () => {
+    expect(at(4_000, 2_000, 36)).toEqual([])
+    expect(at(4_000, 0, 2)).toEqual([])
+    expect(at(0, 300, 2).map(({ side }) => side)).toEqual(['low'])
+  })
+})
+
+describe('air conditioning as the law asks for it at 85 °F', () => {
+  it.each([
+    [3_000, 0, 'met'],
+    [0, 3_000, 'condition'],
+  ])(
+    '%d W of cooling, %d W of heating in a van that nothing ventilates: %s',
+    (coolingW, heatingW, status) => {
+      const surroundings = vanIn(openAirAt(40), {
+        ventilationM3h: undefined,
+        conditioning: { setPointC: 18, coolingW, heatingW },
+      })
+      const assessment = run(
+        scenarioOf({
+          legs: [legOf('road', { durationMin: 40, surroundings })],
+          crates: [crateOf('a', [beagle('bess')])],
+          context: usContext(),
+        }),
+      )
+      expect(find(assessment, 'us-9cfr-3.16e-ventilation')?.status).toBe(status)
+    },
+  )
+})
+
 describe('what a vet made tighter', () => {
   it('decides in place of the species row', () => {
     const legs = [legOf('road', { durationMin: 60, surroundings: roomAt(20) })]

@@ -54,6 +54,24 @@ describe('a narrow margin asks for something by itself', () => {
     expect(condition?.text).toMatch(/16.0 °C.*80 m³\/h.*in writing/)
   })
 
+  it.each([
+    [3_000, 0, 'Cooled to at most 16.0 °C throughout. '],
+    [0, 2_000, 'Heated to at least 16.0 °C throughout. '],
+  ])(
+    'with %d W of cooling and %d W of heating it asks for no more than the machine can',
+    (coolingW, heatingW, words) => {
+      const surroundings = vanIn(openAirAt(24), {
+        conditioning: { setPointC: 16, coolingW, heatingW },
+        ventilationM3h: 80,
+      })
+      const [condition] = conditions(
+        [legOf('shed', { kind: 'shed', attended: false, surroundings })],
+        [narrow('shed')],
+      )
+      expect(condition?.text).toBe(`${words}Fresh air 80 m³/h kept running. Confirmed in writing.`)
+    },
+  )
+
   it('in open air: the most minutes outside, shade, first off', () => {
     const leg = legOf('ramp', {
       kind: 'ramp',

@@ -39,6 +39,16 @@ function file(): ReturnType<typeof JSON.parse> {
   }
 }
 
+const VAN = {
+  type: 'enclosed',
+  volumeM3: 12,
+  heatTransferWK: 45,
+  interiorMassKJK: 150,
+  leakageM3h: 6,
+  solarApertureM2: 1,
+  crateAirSpeedMs: 0.1,
+}
+
 function issuesOf(json: unknown) {
   const parsed = parseScenario(json)
   return parsed.ok ? [] : parsed.issues
@@ -209,6 +219,17 @@ describe('what a scenario may not say', () => {
       'initial',
       /exactly one for heat-prone/,
     ],
+    [
+      'a set-point with no watts behind it',
+      (json) =>
+        (json.legs[0].surroundings = {
+          ...VAN,
+          conditioning: { setPointC: 18, coolingW: 0, heatingW: 0 },
+          outside: json.legs[1].surroundings,
+        }),
+      'legs.0.surroundings.conditioning',
+      /without cooling or heating holds nothing/,
+    ],
   ])('refuses %s', (_, spoil, path, message) => {
     const json = file()
     spoil(json)
@@ -237,18 +258,9 @@ describe('what a scenario may not say', () => {
       type: 'open-air',
       series: [{ minute: 0, airTempC: 20, relHumidityPct: 50, windMs: 1, solarWm2: 0 }],
     }
-    const space = {
-      type: 'enclosed',
-      volumeM3: 12,
-      heatTransferWK: 45,
-      interiorMassKJK: 150,
-      leakageM3h: 6,
-      solarApertureM2: 1,
-      crateAirSpeedMs: 0.1,
-    }
-    json.legs[0].surroundings = { ...space, outside: { ...space, outside: open } }
+    json.legs[0].surroundings = { ...VAN, outside: { ...VAN, outside: open } }
     expect(issuesOf(json)).toEqual([])
-    json.legs[0].surroundings = { ...space, outside: { ...space, outside: { ...space, outside: open } } }
+    json.legs[0].surroundings = { ...VAN, outside: { ...VAN, outside: { ...VAN, outside: open } } }
     expect(issuesOf(json)[0]?.message).toMatch(/at most once/)
   })
 })

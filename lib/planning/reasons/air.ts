@@ -26,16 +26,41 @@ function surroundingsReasons(leg: PlanLeg, index: number): Reason[] {
       ]
     case 'enclosed':
       return [
-        ...(air.conditioning === null
-          ? []
-          : missing(
-              air.conditioning.setPointC,
-              `${at}.conditioning.setPointC`,
-              `${words} has no set-point.`,
-            )),
+        ...(air.conditioning === null ? [] : controlReasons(air.conditioning, `${at}.conditioning`, words)),
         ...openAirReasons(air.outside, `${at}.outside`, `${words}, outside,`, false),
       ]
   }
+}
+
+type Conditioning = NonNullable<Enclosed['conditioning']>
+
+/** A set-point nobody has the watts for would be read as held and computed as not. */
+function controlReasons(machine: Conditioning, at: string, words: string): Reason[] {
+  const { setPointC, coolingW, heatingW } = machine
+  const setPoint = missing(setPointC, `${at}.setPointC`, `${words} has no set-point.`)
+  if (!coolingW && !heatingW) {
+    const path = coolingW === 0 && heatingW === null ? `${at}.heatingW` : `${at}.coolingW`
+    return [
+      ...setPoint,
+      reason(
+        path,
+        `${words} has a set-point but no cooling or heating capacity: put its watts, or untick the set-point.`,
+      ),
+    ]
+  }
+  return [
+    ...setPoint,
+    ...missing(
+      coolingW,
+      `${at}.coolingW`,
+      `${words}: cooling is not given. Put its watts, 0 where it cannot cool.`,
+    ),
+    ...missing(
+      heatingW,
+      `${at}.heatingW`,
+      `${words}: heating is not given. Put its watts, 0 where it cannot heat.`,
+    ),
+  ]
 }
 
 /** Sun may stay empty: it then counts as none, and a finding says so where it is day. Wind is needed only where it blows on crates. */

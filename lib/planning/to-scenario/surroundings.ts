@@ -85,12 +85,21 @@ function enclosed(
     solarTransmittance: 0.6,
     crateAirSpeedMs: space.crateAirSpeedMs,
     ...startOf(legs[index - 1]?.surroundings, space),
-    ...(space.conditioning === null
-      ? {}
-      : { conditioning: { ...space.conditioning, setPointC: known(space.conditioning.setPointC) } }),
+    ...conditioningOf(space),
     outside: openAir(space.outside, minutes),
     ...compartment(legs, index, space),
   }
+}
+
+function conditioningOf({ conditioning }: PlanEnclosed) {
+  if (conditioning === null) return {}
+  const [setPointC, coolingW, heatingW] = [
+    known(conditioning.setPointC),
+    known(conditioning.coolingW),
+    known(conditioning.heatingW),
+  ]
+  if (coolingW <= 0 && heatingW <= 0) throw new RangeError('A set-point has no watts to hold it.')
+  return { conditioning: { setPointC, coolingW, heatingW } }
 }
 
 /** A hold that was kept at a set-point in the air begins its wait on the ground at that set-point, walls too. */

@@ -98,11 +98,16 @@ const controlledSchema = z
   })
   .transform((air) => ({ ...air, surfaceTempC: air.surfaceTempC ?? air.airTempC }))
 
-const conditioningSchema = z.strictObject({
-  setPointC: figure({ what: 'Set-point', unit: '°C', min: -30, max: 45 }),
-  coolingW: figure({ what: 'Cooling', unit: 'W', min: 0, max: 500_000 }),
-  heatingW: figure({ what: 'Heating', unit: 'W', min: 0, max: 500_000 }),
-})
+const conditioningSchema = z
+  .strictObject({
+    setPointC: figure({ what: 'Set-point', unit: '°C', min: -30, max: 45 }),
+    coolingW: figure({ what: 'Cooling', unit: 'W', min: 0, max: 500_000 }),
+    heatingW: figure({ what: 'Heating', unit: 'W', min: 0, max: 500_000 }),
+  })
+  .refine(({ coolingW, heatingW }) => coolingW > 0 || heatingW > 0, {
+    error:
+      'A set-point without cooling or heating holds nothing: put watts for one of them, or take conditioning out.',
+  })
 
 const otherLoadSchema = z.strictObject({
   sensibleW: figure({ what: 'Other heat', unit: 'W', min: -50_000, max: 500_000 }),

@@ -86,6 +86,8 @@ async function typeLeg(page: Page, plan: TypedPlan) {
   if (plan.setPointC !== undefined) {
     await leg.getByLabel('Cooled or heated to a set-point').check()
     await leg.getByLabel('Set-point', { exact: true }).fill(plan.setPointC)
+    await leg.getByLabel('Cooling', { exact: true }).fill('3500')
+    await leg.getByLabel('Heating', { exact: true }).fill('4000')
     await leg.getByLabel('Air at start').fill(plan.setPointC)
   }
   const air = {

@@ -48,7 +48,7 @@ function ventilation(
   const reached = hottestC > inCelsius(FAN_F) - JUST_UNDER_C
   const provided =
     leg.surroundings.type === 'enclosed' &&
-    ((leg.surroundings.ventilationM3h ?? 0) > 0 || leg.surroundings.conditioning !== undefined)
+    ((leg.surroundings.ventilationM3h ?? 0) > 0 || (leg.surroundings.conditioning?.coolingW ?? 0) > 0)
   const asked = `Fans, blowers or air conditioning when the air reaches ${fahrenheit(FAN_F)}.`
   const shared = {
     legId: leg.id,
