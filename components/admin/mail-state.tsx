@@ -25,7 +25,7 @@ export function needsDecision(state: MailState): boolean {
 }
 
 /** The hole of a mail's state with its word and its time. */
-export function MailStateCell({ row }: { row: Pick<MailRow, 'state' | 'at' | 'attempts'> }) {
+export function MailStateCell({ row }: { row: Timed }) {
   return (
     <span className="grid grid-cols-[auto_1fr] gap-x-2">
       <span className="pt-0.5">
@@ -34,12 +34,26 @@ export function MailStateCell({ row }: { row: Pick<MailRow, 'state' | 'at' | 'at
       <span>
         <span className="block font-semibold">{MAIL_STATE_WORDS[row.state]}</span>
         <span className="block text-small text-mute">{timeWords(row)}</span>
+        {isLate(row) && (
+          <span className="block text-small text-mute">
+            written {dayTime(row.written.ms, row.written.zone)}
+          </span>
+        )}
       </span>
     </span>
   )
 }
 
-function timeWords({ state, at, attempts }: Pick<MailRow, 'state' | 'at' | 'attempts'>): string {
+type Timed = Pick<MailRow, 'state' | 'at' | 'written' | 'attempts'>
+
+/** Long after it was decided, what a mail says may be overtaken: then both times stand there. */
+function isLate({ state, at, written }: Timed): boolean {
+  return state === 'sent' && at.ms - written.ms > LATE_MS
+}
+
+const LATE_MS = 3_600_000
+
+function timeWords({ state, at, attempts }: Timed): string {
   const time = dayTime(at.ms, at.zone)
   switch (state) {
     case 'waiting':

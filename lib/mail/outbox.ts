@@ -50,6 +50,8 @@ export async function enqueue(tx: Transaction, mail: NewMail, now: Date): Promis
         leasedBy: null,
         lastError: null,
         sentAt: null,
+        // The letter's own date: when it was decided, however long it waits.
+        createdAt: now,
       },
       { transaction: tx },
     )

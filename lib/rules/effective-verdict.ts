@@ -63,7 +63,7 @@ export function effectiveVerdict({ assessment, approvals, conditions }: Effectiv
       const matching = indexesOf(assessment.findings, by, crateId, passages)
       if (matching.length === 0) ended.push({ by, because: 'The finding is no longer in breach.' })
       for (const findingIndex of matching) {
-        const because = endedBecause(assessment.findings[findingIndex], by)
+        const because = whyOverrideEnds(assessment.findings[findingIndex], by)
         if (because === undefined) overridden.push({ findingIndex, by })
         else ended.push({ by, because })
       }
@@ -94,7 +94,8 @@ export function signedFigures({
   return { minutesPast, worstBodyC: worstBodyC ?? null }
 }
 
-function endedBecause(finding: Finding | undefined, by: SignedOverride): string | undefined {
+/** Why an override holds no longer for this finding of a later run; undefined where it does. */
+export function whyOverrideEnds(finding: Finding | undefined, by: SignedOverride): string | undefined {
   if (finding === undefined || !isOverridable(finding))
     return finding?.overrideRefusedBecause ?? 'This finding can no longer be overridden.'
   const { minutesPast, worstBodyC } = signedFigures(finding)

@@ -56,7 +56,8 @@ export function weightOf({ status, marginOutsideAirC }: Finding): Verdict {
   }
 }
 
-const SEVERITY: Record<Verdict, number> = { 'no-go': 0, conditional: 1, go: 2 }
+/** The lower, the worse. */
+export const SEVERITY: Record<Verdict, number> = { 'no-go': 0, conditional: 1, go: 2 }
 
 export function worstOf(verdicts: readonly Verdict[]): Verdict {
   return verdicts.reduce<Verdict>(

@@ -33,6 +33,8 @@ export interface MailRow {
   state: MailState
   /** When it was sent, is next tried, or stopped. */
   at: Moment
+  /** When what it says was decided. */
+  written: Moment
   mark: string | null
   consignmentId: number | null
   to: string
@@ -42,7 +44,6 @@ export interface MailRow {
 }
 
 export interface MailDetail extends MailRow {
-  written: Moment
   messageId: string
   text: string
   attachments: { documentId: number; words: string }[]

@@ -161,6 +161,12 @@ describe('a shipper', () => {
     const [mail, ...more] = await models.OutboxMessage.findAll()
     expect(more).toEqual([])
     expect(mail).toMatchObject({ toAddress: 'desk@corran.example' })
-    expect(mail?.html).toContain('Two days &lt;later&gt; &amp; by night.')
+    expect(mail?.subject).toMatch(/^\d{4}: change asked for, Later, please$/)
+    for (const part of [mail?.html, mail?.text]) {
+      expect(part).toContain('Balfron Lodge Kennels to Glasgow Airport animal shed, 2 × dog')
+      expect(part).toContain(`/consignments/${consignmentId}`)
+    }
+    expect(mail?.html).toContain('“Two days &lt;later&gt; &amp; by night.”')
+    expect(mail?.text).toContain('“Two days <later> & by night.”')
   })
 })

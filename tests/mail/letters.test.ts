@@ -111,7 +111,8 @@ describe('letters that move work on', () => {
       approvalVoidedLetter({
         ...work,
         crateMarks: ['2441-A', '2441-B'],
-        reason: 'The plan was changed.',
+        because: 'S. Halloway-Odu withdrew it',
+        reason: 'The hold is another one.',
         voidedAt: LEAVES,
       }),
       changeAskedLetter({ ...work, askedBy: 'M. Ferrand-Ito', about: 'departure', text: 'One day later' }),
@@ -119,7 +120,7 @@ describe('letters that move work on', () => {
     const said = [
       ['I. Quennell', '03:20 BST'],
       ['S. Halloway-Odu', '2441-D', 'Otto’s crate is too small.'],
-      ['2441-A, 2441-B', 'The plan was changed.'],
+      ['2441-A, 2441-B', 'S. Halloway-Odu withdrew it', 'The hold is another one.', '03:20 BST'],
       ['M. Ferrand-Ito', 'One day later'],
     ]
     letters.forEach((letter, index) => {

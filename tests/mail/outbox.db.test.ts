@@ -68,6 +68,15 @@ describe('putting a mail in the outbox', () => {
 })
 
 describe('delivering', () => {
+  it('dates a letter by when it was decided, however late it goes', async () => {
+    server = await mailServer()
+    await put(mail('late'))
+    expect(await only()).toMatchObject({ createdAt: NOON })
+    await deliver(smtpTransport(server.url), later(300))
+    expect(server.taken.map(({ date }) => date)).toEqual([NOON])
+    expect(await only()).toMatchObject({ sentAt: later(300) })
+  })
+
   it('sends what is due, keeps the Message-ID, and writes the trail', async () => {
     server = await mailServer()
     await put(mail('one'))

@@ -1,4 +1,5 @@
 import 'server-only'
+import { crateMark } from '@/lib/planning/crate-mark'
 import type { Actor } from '@/lib/policies/actor'
 import type { ReturnCrates } from '@/lib/schemas/approval'
 import type { ConsignmentState } from '@/lib/states/consignment'
@@ -9,10 +10,14 @@ import { authorize } from '../authorize'
 import { currentAssessment } from '../consignments/current-assessment'
 import { move } from '../consignments/move'
 import { findConsignment } from '../consignments/visible'
+import { mailReturned } from '../mail/work-mails'
 import { chosenCrates } from './crate-findings'
 import { registrationOf } from './signer'
 
-/** The vet sends crate set-ups back to the desk with the reason. One returned crate returns the consignment. */
+/**
+ * The vet sends crate set-ups back to the desk with the reason, which the desk gets by mail too. One returned crate returns
+ * the consignment.
+ */
 export function returnCrates(
   actor: Actor,
   input: ReturnCrates,
@@ -28,7 +33,8 @@ export function returnCrates(
       const state = await move(tx, row, 'return')
       const registration = await registrationOf(tx, actor, now)
       const { assessment, plan } = await currentAssessment(tx, row)
-      for (const crate of chosenCrates(plan, input.crateIds)) {
+      const crates = chosenCrates(plan, input.crateIds)
+      for (const crate of crates) {
         await models.Approval.create(
           {
             consignmentId,
@@ -50,6 +56,8 @@ export function returnCrates(
           { transaction: tx },
         )
       }
+      const crateMarks = crates.map(({ letter }) => crateMark(row.mark, letter))
+      await mailReturned(tx, row, { now, key: requestId, by: actor.name, crateMarks, reason })
       return { result: { state }, after: { state, crateIds: input.crateIds }, note: reason }
     },
   )

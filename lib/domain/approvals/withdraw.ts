@@ -14,10 +14,11 @@ import { writeEffectiveVerdict } from '../consignments/effective-figures'
 import { move } from '../consignments/move'
 import { findConsignment } from '../consignments/visible'
 import { voidDocuments } from '../documents/document-state'
+import { voidApprovals } from './void'
 
 /**
  * A vet takes an approval back before the journey starts: the manifest that rests on it is void, and the consignment goes
- * back to the desk.
+ * back to the desk, which gets a mail.
  */
 export async function withdrawApproval(
   actor: Actor,
@@ -44,10 +45,13 @@ export async function withdrawApproval(
           'The journey has started: an approval can no longer be withdrawn.',
         )
       }
-      await models.Approval.update(
-        { voidedAt: now, voidedReason: reason.slice(0, 500), withdrawn: true },
-        { where: { id: approvalId, voidedAt: null }, transaction: tx },
-      )
+      await voidApprovals(tx, row, [approval], {
+        at: now,
+        key: requestId,
+        voidedReason: reason,
+        because: `${actor.name} withdrew it`,
+        withdrawn: { byId: actor.id, reason },
+      })
       const before = { state: row.state, inForceRevision: row.inForceRevision }
       const state = await takeBack(tx, row, approval, { at: now, reason: `Approval withdrawn: ${reason}` })
       await writeEffectiveVerdict(tx, row)

@@ -7,6 +7,7 @@ import type { Scenario } from '@/lib/thermal/scenario'
 import { models } from '@/models'
 import type { Assessment as AssessmentRow, Consignment, Finding as FindingRow } from '@/models'
 import type { AssessmentError } from '@/models/assessment'
+import { voidWorsened } from '../approvals/void-worsened'
 import { record } from '../audit/record'
 import { writeEffectiveVerdict } from '../consignments/effective-figures'
 import { move } from '../consignments/move'
@@ -20,7 +21,8 @@ export type RecordedAssessment = 'recorded' | 'already' | 'superseded'
 
 /**
  * Stores what a run found: findings, tracks, the result for good, the board's figures and the conditions that follow, and
- * moves the consignment on. Recorded twice, it is stored once; where the plan was saved anew meanwhile, nothing moves.
+ * moves the consignment on. An approval whose crate came out worse is void. Recorded twice, it is stored once; where the
+ * plan was saved anew meanwhile, nothing moves.
  */
 export async function recordAssessment(
   { assessmentId, result }: { assessmentId: number; result: Assessment },
@@ -43,7 +45,9 @@ export async function recordAssessment(
     if (!isCurrent(row, assessment)) return 'superseded'
     await move(tx, row, 'assess', { outOfDate: false })
     const scenario = (await readSnapshot(assessment.scenarioHash, tx)) as Scenario
-    await writeConditions(tx, row, { plan: await readPlan(row, tx), scenario, result }, now)
+    const plan = await readPlan(row, tx)
+    await voidWorsened(tx, row, { plan, assessmentId: assessment.id, result }, now)
+    await writeConditions(tx, row, { plan, scenario, result }, now)
     await writeEffectiveVerdict(tx, row)
     await record(tx, {
       actor: null,

@@ -1,5 +1,4 @@
 import 'server-only'
-import { Op } from 'sequelize'
 import type { Transaction } from 'sequelize'
 import { SteadfoldError } from '@/lib/errors'
 import { timelineOf } from '@/lib/planning/timeline'
@@ -11,6 +10,7 @@ import { models } from '@/models'
 import type { Consignment } from '@/models'
 import { act } from '../act'
 import type { Done } from '../act'
+import { standingApprovals, voidApprovals } from '../approvals/void'
 import { authorize } from '../authorize'
 import { planningKnowledge } from '../catalogue/knowledge'
 import { boardFigures, writeWords } from './board-figures'
@@ -48,8 +48,8 @@ export interface PlanConflict {
 /**
  * Saves a plan. The version that was opened goes with it: a second editor's save is refused with both versions, and
  * nothing is overwritten. A save of a released plan starts the next revision while the released one stays in force. A
- * changed plan hash voids what was signed for this revision; an unchanged one (a telephone, a driver, a note) leaves
- * assessment, review and approvals as they are.
+ * changed plan hash voids what was signed for this revision, and its vets and the desk get a mail; an unchanged one (a
+ * telephone, a driver, a note) leaves assessment, review and approvals as they are.
  */
 export function saveConsignment(actor: Actor, input: SavePlan, now: Date): Promise<SavedPlan> {
   const { consignmentId, requestId, plan } = input
@@ -95,11 +95,12 @@ export function saveConsignment(actor: Actor, input: SavePlan, now: Date): Promi
         { where: { id: row.id, version: row.version, state: row.state }, transaction: tx },
       )
       if (count === 0) throw await conflict(tx, row, plan)
-      await writePlan(tx, row.id, plan, timeline, { at: now, by: actor.id })
-      await writeWords(tx, row.id, plan, { mark: row.mark, shipperName, timeline })
       const changed = planHash === null || planHash !== before.planHash
       if (changed) await supersedeRunning(tx, row.id)
-      const voided = changed && step.revision === before.revision ? await voidApprovals(tx, row, now) : null
+      const own = changed && step.revision === before.revision
+      const voided = own ? await endApprovals(tx, row, { by: actor.name, key: requestId, now }) : null
+      await writePlan(tx, row.id, plan, timeline, { at: now, by: actor.id })
+      await writeWords(tx, row.id, plan, { mark: row.mark, shipperName, timeline })
       return {
         result: {
           consignmentId: row.id,
@@ -155,21 +156,19 @@ async function supersedeRunning(tx: Transaction, consignmentId: number) {
   )
 }
 
-async function voidApprovals(tx: Transaction, row: Consignment, now: Date): Promise<string | null> {
-  const where = {
-    consignmentId: row.id,
-    revision: row.revision,
-    voidedAt: null,
-    decision: { [Op.ne]: 'returned' as const },
-  }
-  const signed = await models.Approval.findAll({
-    where,
-    attributes: ['crateRef', 'signerName'],
-    transaction: tx,
-  })
+async function endApprovals(
+  tx: Transaction,
+  row: Consignment,
+  { by, key, now }: { by: string; key: string; now: Date },
+): Promise<string | null> {
+  const signed = await standingApprovals(tx, row)
   if (signed.length === 0) return null
-  const reason = 'The plan was changed after it was signed.'
-  await models.Approval.update({ voidedAt: now, voidedReason: reason }, { where, transaction: tx })
+  await voidApprovals(tx, row, signed, {
+    at: now,
+    key,
+    voidedReason: 'The plan was changed after it was signed.',
+    because: `${by} changed the plan after it was signed`,
+  })
   const signers = [...new Set(signed.map(({ signerName }) => signerName))].join(' and ')
   const things = signed.length === 1 ? '1 approval' : `${signed.length} approvals`
   return `The plan was changed: ${things} by ${signers} ${signed.length === 1 ? 'is' : 'are'} void.`

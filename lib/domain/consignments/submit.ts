@@ -9,13 +9,14 @@ import { act } from '../act'
 import type { Done } from '../act'
 import { crateRefs, signedCrates } from '../approvals/signed-crates'
 import { authorize } from '../authorize'
+import { mailSubmitted } from '../mail/work-mails'
 import { absoluteBreaches, currentAssessment } from './current-assessment'
 import { move } from './move'
 import { findConsignment } from './visible'
 
 /**
  * Sends an assessed plan to the vet. A plan with a breach of law, of a carrier's rule or of a critical limit does not go.
- * Where every crate set-up is signed already for this very plan, it is approved at once.
+ * Where every crate set-up is signed already for this very plan, it is approved at once; else every vet gets a mail.
  */
 export function submitConsignment(
   actor: Actor,
@@ -43,6 +44,7 @@ export function submitConsignment(
         )
       }
       const state = (await signedAlready(tx, row)) ? await move(tx, row, 'approve') : moved
+      if (state === 'in_review') await mailSubmitted(tx, row, { now, key: requestId, by: actor.name })
       return { result: { state }, before, after: { state } }
     },
   )

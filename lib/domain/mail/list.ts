@@ -47,7 +47,6 @@ export async function loadMail(actor: Actor, { mailId }: { mailId: number }): Pr
   const papers = await models.Document.findAll({ where: { id: mail.attachments } })
   return {
     ...mailRow(mail, await marksOf([mail])),
-    written: deskMoment(mail.createdAt),
     messageId: mail.messageId,
     text: mail.text,
     attachments: papers.map(({ id, kind, revision, code }) => ({
@@ -98,6 +97,7 @@ function mailRow(mail: OutboxMessage, marks: ReadonlyMap<number, string>): MailR
     id: mail.id,
     state,
     at: deskMoment(momentOf(mail)),
+    written: deskMoment(mail.createdAt),
     mark: consignmentId === null ? null : (marks.get(consignmentId) ?? null),
     consignmentId,
     to: mail.toAddress,

@@ -1,7 +1,5 @@
 import 'server-only'
-import { env } from '@/lib/env'
 import { SteadfoldError } from '@/lib/errors'
-import { enqueue } from '@/lib/mail/outbox'
 import type { Actor } from '@/lib/policies/actor'
 import type { AskChange } from '@/lib/schemas/act'
 import { models } from '@/models'
@@ -9,6 +7,7 @@ import { act } from '../act'
 import type { Done } from '../act'
 import { authorize } from '../authorize'
 import { findConsignment } from '../consignments/visible'
+import { mailChangeAsked } from '../mail/work-mails'
 
 /** A shipper asks the desk for a change: kept with the consignment, and mailed to the desk. */
 export function askChange(actor: Actor, input: AskChange, now: Date): Promise<{ requestId: number }> {
@@ -28,35 +27,9 @@ export function askChange(actor: Actor, input: AskChange, now: Date): Promise<{ 
         { consignmentId, revision, userId: actor.id, subject, text, at: now },
         { transaction: tx },
       )
-      const lines = [
-        `${actor.name} asks for a change of ${row.mark}, revision ${revision}.`,
-        subject,
-        text,
-        `${env().appUrl}/consignments/${row.id}`,
-      ]
-      await enqueue(
-        tx,
-        {
-          to: deskAddress(),
-          subject: `${row.mark}: change asked for, ${subject}`,
-          text: lines.join('\n\n'),
-          html: lines.map((line) => `<p>${escaped(line)}</p>`).join('\n'),
-          consignmentId,
-          dedupeKey: `change-request:${asked.id}`,
-        },
-        now,
-      )
+      const occasion = { now, key: String(asked.id) }
+      await mailChangeAsked(tx, row, { ...occasion, askedBy: actor.name, about: subject, text, revision })
       return { result: { requestId: asked.id }, after: { subject, revision } }
     },
   )
-}
-
-/** The desk reads the address that mails come from. */
-function deskAddress(): string {
-  const { mailFrom } = env()
-  return /<([^>]+)>/.exec(mailFrom)?.[1] ?? mailFrom
-}
-
-function escaped(text: string): string {
-  return text.replace(/&/g, '&amp;').replace(/</g, '&lt;').replace(/>/g, '&gt;').replace(/\n/g, '<br>')
 }

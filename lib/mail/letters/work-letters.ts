@@ -16,13 +16,13 @@ interface Work {
   url: string
 }
 
-/** To the vets: a plan waits for review. */
-export function submittedLetter(work: Work & { submittedBy: string; leaves: Moment }): WrittenLetter {
-  const leaves = dayTime(work.leaves.ms, work.leaves.zone)
+/** To every vet: a plan waits for review. */
+export function submittedLetter(work: Work & { submittedBy: string; leaves: Moment | null }): WrittenLetter {
+  const leaves = work.leaves && dayTime(work.leaves.ms, work.leaves.zone)
   return short(work, {
-    subject: `${work.mark}, revision ${work.revision} waits for review. Leaves ${leaves}`,
+    subject: `${work.mark}, revision ${work.revision} waits for review${leaves ? `. Leaves ${leaves}` : ''}`,
     title: 'For review',
-    text: `${work.submittedBy} sent revision ${work.revision} for review. It leaves ${leaves}.`,
+    text: `${work.submittedBy} sent revision ${work.revision} for review.${leaves ? ` It leaves ${leaves}.` : ''}`,
     said: '',
     link: 'Open the review',
   })
@@ -43,12 +43,20 @@ export function returnedLetter(
 
 /** To the vet who signed and to the desk: an approval no longer holds. */
 export function approvalVoidedLetter(
-  work: Work & { crateMarks: string[]; reason: string; voidedAt: Moment },
+  work: Work & {
+    crateMarks: string[]
+    /** "Isla Quennell changed the plan" */
+    because: string
+    /** Why, in the words of whoever took it back; empty where nobody did. */
+    reason: string
+    voidedAt: Moment
+  },
 ): WrittenLetter {
+  const crates = work.crateMarks.join(', ')
   return short(work, {
-    subject: `${work.mark}: approval of ${work.crateMarks.join(', ')} no longer holds`,
+    subject: `${work.mark}: approval of ${crates} no longer holds`,
     title: 'Approval void',
-    text: `Since ${dayTime(work.voidedAt.ms, work.voidedAt.zone)} the approval of ${work.crateMarks.join(', ')} no longer holds. A paper that rests on it is void: don’t work from it.`,
+    text: `Since ${dayTime(work.voidedAt.ms, work.voidedAt.zone)} the approval of ${crates} no longer holds: ${work.because}. A paper that rests on it is void: don’t work from it.`,
     said: work.reason,
     link: 'Open the consignment',
   })

@@ -10,7 +10,7 @@ interface KeptMail {
 
 const address = () => process.env.E2E_MAIL_URL ?? 'http://127.0.0.1:8025'
 
-/** Waits until a mail whose subject begins so has arrived at the mail server, and gives its first attachment. */
+/** Waits until a mail with a paper, whose subject begins so, has arrived at the mail server, and gives its first attachment. */
 export async function mailedPdf(
   request: APIRequestContext,
   subjectStart: string,
@@ -20,10 +20,10 @@ export async function mailedPdf(
     .poll(
       async () => {
         const mails = (await (await request.get(`${address()}/mails`)).json()) as KeptMail[]
-        found = mails.find(({ subject }) => subject.startsWith(subjectStart))
+        found = mails.find((mail) => mail.attachments.length > 0 && mail.subject.startsWith(subjectStart))
         return found !== undefined
       },
-      { timeout: 60_000, message: `a mail whose subject begins “${subjectStart}”` },
+      { timeout: 60_000, message: `a mail with a paper whose subject begins “${subjectStart}”` },
     )
     .toBe(true)
   if (found === undefined) throw new Error('The mail went missing.')
