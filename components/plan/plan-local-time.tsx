@@ -28,6 +28,9 @@ export function PlanLocalTime({
       error={useFieldError(path)}
       onChange={field.onChange}
       onBlur={field.onBlur}
+      question={
+        <p className="text-small text-mute">The clock there shows this hour twice: the first is counted.</p>
+      }
     />
   )
 }

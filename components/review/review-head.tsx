@@ -1,6 +1,7 @@
 import { BoxedFacts, Fact } from '@/components/ui/boxed-facts'
 import { Mark } from '@/components/ui/mark'
 import { Stamp } from '@/components/ui/stamp'
+import { Temperature } from '@/components/ui/temperature'
 import { dayTime, duration } from '@/lib/views/format'
 import type { ReviewView } from '@/lib/views/review'
 
@@ -36,7 +37,14 @@ export function ReviewHead({ view }: { view: ReviewView }) {
             {chosen.animals.map((animal) => (
               <span key={animal.animalId} className="block">
                 <b>{animal.decidedWords}</b>
-                <span className="block text-small text-mute">{animal.trackWords}</span>
+                <span className="block text-small text-mute">
+                  {animal.margin.bodyC !== null && (
+                    <>
+                      Body <Temperature c={animal.margin.bodyC} kind="body-margin" />.{' '}
+                    </>
+                  )}
+                  {animal.trackWords}
+                </span>
               </span>
             ))}
           </span>

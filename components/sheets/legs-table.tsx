@@ -82,7 +82,7 @@ export function PaperLegs({
   const groups = Array.from({ length: Math.ceil(animals.length / 3) }, (_, index) => index * 3)
   return groups.map((from) => (
     <div key={from} className="mb-2 text-small [&_td]:!px-1.5 [&_td]:!py-1 [&_th]:!px-1.5">
-      <Ledger caption="Legs">
+      <Ledger caption="Legs" folds>
         <thead>
           <tr>
             <Head>Leg</Head>
@@ -105,16 +105,18 @@ export function PaperLegs({
                   </span>
                 </span>
               </Cell>
-              <Cell className="whitespace-nowrap">
+              <Cell label="Starts, h:min" className="whitespace-nowrap">
                 {localTime(leg.start.ms, leg.start.zone)}
                 <span className="block">{hourMin(leg.durationMin)}</span>
               </Cell>
-              {leg.cells.slice(from, from + 3).map((cell) => (
-                <Cell key={cell.animalId}>
+              {leg.cells.slice(from, from + 3).map((cell, column) => (
+                <Cell key={cell.animalId} label={animalLabel(animals[from + column])}>
                   <LegCellFigures cell={cell} outOfDate={outOfDate} />
                 </Cell>
               ))}
-              <Cell className="fig max-w-10">{leg.conditionNumbers.join(' ')}</Cell>
+              <Cell label="Conditions" className="fig max-w-10">
+                {leg.conditionNumbers.join(' ')}
+              </Cell>
             </tr>
           ))}
         </tbody>

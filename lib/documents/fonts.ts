@@ -1,35 +1,30 @@
-import path from 'node:path'
 import { Font } from '@react-pdf/renderer'
-import * as fontkit from 'fontkit'
 import { FACES, type FaceName, PAPER_FONTS } from '@/lib/tokens'
+import { faceFile, fontFile, forOneDocument, fontPath, type PaperFont } from './faces'
 
 /*
  * The paper's faces: full TrueType files, one for each weight. Subset files put other letters in place of those they lack
  * without a word, so glyphs are asked of the very file that is drawn with.
  */
 
-type Weight = (typeof PAPER_FONTS)[number]['weight']
-type FontFile = ReturnType<typeof open>
-
-const shared = globalThis as { steadfoldPaperFonts?: Map<string, FontFile> }
-
-/**
- * Makes the faces known to the renderer, opened anew: to be called before each document. Embedding a letter made of parts
- * (i is ı and a dot) leaves the parts in the font's cache without a character of their own, and every later document of
- * the process then drops its ı: “Şırnak” came out as “ırnak”. Words are never split at a line's end.
- */
+/** Makes the faces known to the renderer for one document: to be called before each. Words are never split at a line's end. */
 export function registerFreshFonts(): void {
   const known = Font.getRegisteredFonts()
   for (const { family } of Object.values(FACES)) delete known[family]
-  for (const { face, weight, style, file } of PAPER_FONTS) {
-    Font.register({ family: FACES[face].family, fontWeight: weight, fontStyle: style, src: fontPath(file) })
+  for (const font of PAPER_FONTS) {
+    const { family } = FACES[font.face]
+    Font.register({ family, fontWeight: font.weight, fontStyle: font.style, src: fontPath(font) })
+    const source = known[family]?.sources.at(-1)
+    if (source === undefined) throw new Error(`The renderer did not take ${font.file}.`)
+    source.data = forOneDocument(fontFile(font))
+    source.loadResultPromise = Promise.resolve()
   }
   Font.registerHyphenationCallback((word) => [word])
 }
 
 /** Letters of a text that a face cannot show. Any weight of a face has the same letters, so one is asked. */
 export function missingLetters(text: string, face: FaceName): string[] {
-  const font = fontOf(face, face === 'head' ? 700 : 400)
+  const font = faceFile(face, face === 'head' ? 700 : 400)
   const letters = new Set([...text.normalize('NFC')])
   return [...letters].filter((letter) => {
     const point = letter.codePointAt(0) ?? 0
@@ -38,14 +33,20 @@ export function missingLetters(text: string, face: FaceName): string[] {
 }
 
 /** Width of one line of text, in the unit of `size`. */
-export function textWidth(text: string, face: FaceName, weight: Weight, size: number): number {
-  const font = fontOf(face, weight)
+export function textWidth(text: string, face: FaceName, weight: PaperFont['weight'], size: number): number {
+  const font = faceFile(face, weight)
   const features: Record<string, boolean> = face === 'text' ? { tnum: true } : {}
   return (font.layout(text, features).advanceWidth / font.unitsPerEm) * size
 }
 
 /** How many lines a text takes in a width, broken at spaces only. */
-export function lineCount(text: string, face: FaceName, weight: Weight, size: number, width: number): number {
+export function lineCount(
+  text: string,
+  face: FaceName,
+  weight: PaperFont['weight'],
+  size: number,
+  width: number,
+): number {
   let lines = 1
   let used = 0
   const space = textWidth(' ', face, weight, size)
@@ -57,27 +58,4 @@ export function lineCount(text: string, face: FaceName, weight: Weight, size: nu
     } else used += (used > 0 ? space : 0) + wide
   }
   return lines
-}
-
-function fontOf(face: FaceName, weight: Weight): FontFile {
-  const found = PAPER_FONTS.find(
-    (font) => font.face === face && font.weight === weight && font.style === 'normal',
-  )
-  if (!found) throw new Error(`There is no paper font for ${face} ${weight}.`)
-  const fonts = (shared.steadfoldPaperFonts ??= new Map())
-  const known = fonts.get(found.file)
-  if (known) return known
-  const font = open(found.file)
-  fonts.set(found.file, font)
-  return font
-}
-
-function open(file: string) {
-  const font = fontkit.openSync(fontPath(file))
-  if (!('layout' in font)) throw new Error(`${file} is a collection, not one font.`)
-  return font
-}
-
-function fontPath(file: string): string {
-  return path.join(process.cwd(), 'fonts', 'pdf', file)
 }

@@ -4,7 +4,7 @@ import { lineCount } from '@/lib/documents/fonts'
 import { CONTENT_WIDTH } from '@/lib/documents/parts/paper'
 import { VerdictStamp } from '@/lib/documents/parts/stamp'
 import { Bold, Figure, INK, Mark, px, Words } from '@/lib/documents/parts/words'
-import { airMargin, minutesToSpare } from '@/lib/views/format'
+import { airMargin, bodyMargin, minutesToSpare } from '@/lib/views/format'
 import type { AnimalView, Margin } from '@/lib/views/sheet'
 
 const PER_ROW = 4
@@ -80,7 +80,7 @@ function AnimalBox({ animal, width, first }: { animal: AnimalView; width: number
       </Words>
       <Words size={10.5} line={13} style={{ marginTop: px(2) }}>
         {animal.overridden ? <Bold>Overridden. </Bold> : null}
-        {animal.trackWords}
+        {trackLine(animal)}
       </Words>
     </View>
   )
@@ -107,13 +107,17 @@ function boxHeight(animal: AnimalView, width: number): number {
   const inner = width - 2 * PAD - 2
   const decided = lineCount(animal.decidedWords, 'text', 700, 10.5, inner)
   const tracks = lineCount(
-    `${animal.overridden ? 'Overridden. ' : ''}${animal.trackWords}`,
+    `${animal.overridden ? 'Overridden. ' : ''}${trackLine(animal)}`,
     'text',
     400,
     10.5,
     inner,
   )
   return 5 + describeHeight(animal, width) + 5 + 21 + 27 + 2 + 13 * decided + 2 + 13 * tracks + 8
+}
+
+function trackLine({ margin: { bodyC }, trackWords }: AnimalView): string {
+  return [bodyC === null ? '' : `Body ${bodyMargin(bodyC, 'c')}.`, trackWords].filter(Boolean).join(' ')
 }
 
 export function chunk<T>(items: readonly T[], size: number): T[][] {

@@ -45,7 +45,13 @@ export function corridorPicture(
   const legs = charts.legs.map(chartLeg)
   const marks: Mark[] = [
     ...zones.flatMap((zone, index) =>
-      ruler(time, zone, rulerInput, { y: RULER + index * RULER, nameX: 0, size: 10.5, room: 44 }),
+      ruler(time, zone, rulerInput, {
+        y: RULER + index * RULER,
+        nameX: 0,
+        size: 10.5,
+        room: 44,
+        overhang: 2,
+      }),
     ),
     ...charts.legs.flatMap((leg) => legNumber(time, leg, legsY)),
   ]

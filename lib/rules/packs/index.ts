@@ -45,8 +45,13 @@ function silentSpecies(view: LawView): Finding[] {
       rule: `${pack.id}-species-not-held`,
       animalId: animal.id,
       crateId: crate.id,
-      asked: `The rules of ${list(pack.countries)} for ${animal.profile}.`,
-      note: `${pack.title} is held here for ${list(pack.profiles)} only, not for ${list(profiles)}: ask the authority.`,
+      asked: `The rules of ${pack.placeWords} for a ${speciesWords(animal.profile)}.`,
+      note: `${pack.title} is held here for ${list(pack.profiles.map(speciesWords))} only, not for ${list(profiles.map(speciesWords))}: ask the authority.`,
     }))
   })
+}
+
+/** "snub-nosed dog": a key is for the engine, never for people. */
+function speciesWords(profile: string): string {
+  return profile.replace(/-(?=[^-]*$)/, ' ')
 }

@@ -19,6 +19,8 @@ export interface RulePack {
   title: string
   /** Day the pack was last compared with its sources, ISO date. */
   asOf: string
+  /** Where it is law, in words: "the European Union". */
+  placeWords: string
   /** Country codes whose legs it reads. */
   countries: readonly string[]
   /** Species profiles it speaks of. */

@@ -35,6 +35,8 @@ export interface RulerLook {
   nameMin?: number
   size?: number
   below?: boolean
+  /** How far a label may hang over the end of the line, px; default 14. */
+  overhang?: number
   /** Steps narrower than this many px carry no label. */
   room?: number
 }
@@ -67,7 +69,8 @@ export function ruler(frame: TimeFrame, zone: string, input: RulerInput, look: R
     const own = zoneAt(input.zones, minute) === zone
     const half = textWidth(text, 'text', size, own ? 600 : 400) / 2
     // A label may hang over the end of the line by a little, never over its neighbour.
-    if (x - half < lastEnd + 6 || x - half < frame.x0 - 14 || x + half > frame.x1 + 14) continue
+    if (x - half < lastEnd + 6 || x - half < frame.x0 - 14 || x + half > frame.x1 + (look.overhang ?? 14))
+      continue
     lastEnd = x + half
     marks.push(
       words(x, below ? y + size + 5 : y - 8, text, {

@@ -65,11 +65,10 @@ function animalView(
     bodyLimits: profile?.limits ?? null,
     stamp: stampOf(verdict?.verdict, context, conditionsOn(conditionalLegs(animal.id, assessed))),
     margin: marginOf(shown),
-    decidedWords:
-      finding === undefined ? '' : [limitWords(finding), legsInWords(decidedLegs)].filter(Boolean).join(', '),
+    decidedWords: decidedWords(finding, shown, decidedLegs, journey),
     decidedLegs,
     variant: shown?.variant ?? null,
-    trackWords: shown === finding ? trackWords(finding) : narrowestWords(shown, journey),
+    trackWords: trackWords(shown),
     decidedAt: decidedAt(finding, assessed, journey),
     overridden: isOverridden(animal.id, assessed),
   }
@@ -79,12 +78,20 @@ function narrowestOf(animalId: string, assessed: Assessed | null): Finding | und
   return narrowest((assessed?.effective.findings ?? []).filter((one) => one.animalId === animalId))
 }
 
-/** What decides has no margin of its own: the figures are those of the narrowest body limit, and say so. */
-function narrowestWords(finding: Finding | undefined, journey: JourneyLeg[]): string {
+/** "alarm, leg 2"; what decides without a margin of its own is named after the limit the figures are to. */
+function decidedWords(
+  finding: Finding | undefined,
+  shown: Finding | undefined,
+  decidedLegs: number[],
+  journey: JourneyLeg[],
+): string {
   if (finding === undefined) return ''
-  const ordinals = journey.filter(({ leg }) => leg.id === finding.legId).map(({ ordinal }) => ordinal)
-  const where = [limitWords(finding), legsInWords(ordinals)].filter(Boolean).join(', ')
-  return `Narrowest: ${where}. ${trackWords(finding).replace(/ decides\.$/, '.')}`
+  const where = (words: string, ordinals: number[]) =>
+    [words, legsInWords(ordinals)].filter(Boolean).join(', ')
+  const decides = where(limitWords(finding), decidedLegs)
+  if (shown === finding || shown === undefined) return decides
+  const ordinals = journey.filter(({ leg }) => leg.id === shown.legId).map(({ ordinal }) => ordinal)
+  return `${where(limitWords(shown), ordinals)}. By ${decides}`
 }
 
 /** The verdict as a stamp; conditions count only where the verdict holds on them. */

@@ -3,7 +3,7 @@ import { bodyMargin } from '../format'
 import type { AnimalView } from '../sheet'
 import type { Assessed } from './assessed'
 import type { JourneyLeg } from './journey'
-import { capital, legsInWords, limitWords, marginOf, scheduleInWords, spareWords } from './words'
+import { capital, legsInWords, limitWords, marginOf, narrowest, scheduleInWords, spareWords } from './words'
 
 export interface Headline {
   headline: string
@@ -21,8 +21,10 @@ export function headlineOf(
   const { decidedBy, verdict } = effective.verdict
   const finding = decidedBy === undefined ? undefined : effective.findings[decidedBy]
   if (finding === undefined) return { headline: 'No finding decides.', headlineMore: [] }
+  const room = finding.marginMin === undefined ? narrowest(effective.findings) : undefined
   const more = [
-    whereAndBody(finding, journey),
+    room === undefined ? '' : leastToSpare(room, animals, journey, 'go', false),
+    whereAndBody(room ?? finding, journey),
     verdict === 'no-go'
       ? mayOverride(effective.findings)
       : verdict === 'conditional'
@@ -43,18 +45,22 @@ function leastToSpare(
   animals: AnimalView[],
   journey: JourneyLeg[],
   verdict: string,
+  /** False: the figures are of the narrowest limit, something else decides. */
+  decides = true,
 ): string {
   const animal = animals.find(({ animalId }) => animalId === finding.animalId)
   const who = animal === undefined ? '' : `${animal.name} (${animal.crateLetter})`
   const ordinals =
-    animal !== undefined && animal.decidedLegs.length > 0 ? animal.decidedLegs : ordinalsOf(finding, journey)
+    decides && animal !== undefined && animal.decidedLegs.length > 0
+      ? animal.decidedLegs
+      : ordinalsOf(finding, journey)
   const where = legsInWords(ordinals)
-  const decides = `${limitName(finding)} decides`
+  const decidedBy = `${limitName(finding)} decides`
   const { minutes, outsideAirC } = marginOf(finding)
   if (minutes === null && outsideAirC === null)
-    return `${[who, where, decides].filter(Boolean).join(', ')}: ${finding.asked}`
+    return `${[who, where, decidedBy].filter(Boolean).join(', ')}: ${finding.asked}`
   const spare = spareWords(marginOf(finding)).replace(/, /, ', outside air ')
-  if (verdict === 'no-go') return `${[who, where, decides].filter(Boolean).join(', ')}: ${spare}.`
+  if (verdict === 'no-go') return `${[who, where, decidedBy].filter(Boolean).join(', ')}: ${spare}.`
   return `Least to spare: ${spare}. ${[who, where, limitName(finding)].filter(Boolean).join(', ')}.`
 }
 

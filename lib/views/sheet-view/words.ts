@@ -1,5 +1,5 @@
 import type { Basis, Finding } from '@/lib/rules/result'
-import { airMargin, bodyMargin, bodyTemp, count, minutesToSpare, percent } from '../format'
+import { airMargin, bodyTemp, count, minutesToSpare, percent } from '../format'
 import type { Margin } from '../sheet'
 
 /** "A", "A and B", "A, B and C". */
@@ -88,18 +88,16 @@ export function scheduleInWords(
   return ordinal === undefined ? 'one leg at its worst delay' : `leg ${ordinal} at its worst delay`
 }
 
-/** "Body 0.4 °C. Heat-prone decides.", "Cold effort 42 %. Cold-prone decides." */
+/** "Heat-prone decides.", "Cold effort 42 %. Cold-prone decides." The body margin stands beside it, in the reader's unit. */
 export function trackWords(finding: Finding | undefined): string {
   if (finding === undefined) return ''
-  const { limitKind, marginBodyC, variant } = finding
-  const figures =
-    limitKind === 'cold-effort' || limitKind === 'other' || limitKind === undefined
-      ? valueWords(finding) && `${capital(limitWords(finding))} ${valueWords(finding)}.`
-      : marginBodyC === undefined
-        ? ''
-        : `Body ${bodyMargin(marginBodyC, 'c')}.`
+  const { limitKind, variant } = finding
+  const effort =
+    limitKind === 'alarm' || limitKind === 'critical' || valueWords(finding) === ''
+      ? ''
+      : `${capital(limitWords(finding))} ${valueWords(finding)}.`
   const track = variant === undefined ? '' : `${capital(variant)} decides.`
-  return [figures, track].filter(Boolean).join(' ')
+  return [effort, track].filter(Boolean).join(' ')
 }
 
 export function capital(words: string): string {

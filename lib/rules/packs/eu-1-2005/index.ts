@@ -24,6 +24,7 @@ function packOf(text: TransportRegulation): RulePack {
     id: text.id,
     title: text.title,
     asOf: '2024-11-15',
+    placeWords: text.placeWords,
     countries: text.countries,
     profiles: DOGS_AND_CATS,
     evaluate(view) {

@@ -6,6 +6,7 @@ const since = (text: string) => [{ from: '2007-01-05', text }]
 export interface TransportRegulation {
   id: string
   title: string
+  placeWords: string
   countries: readonly string[]
   sources: Record<'young' | 'pregnant' | 'sedatives' | 'food' | 'water' | 'air', RuleSource>
 }
@@ -14,43 +15,15 @@ export const EU_1_2005: TransportRegulation = regulation(
   'eu-1-2005',
   'Regulation (EC) No 1/2005',
   'Regulation (EC) No 1/2005',
-  [
-    ...[
-      'AT',
-      'BE',
-      'BG',
-      'HR',
-      'CY',
-      'CZ',
-      'DK',
-      'EE',
-      'FI',
-      'FR',
-      'DE',
-      'GR',
-      'HU',
-      'IE',
-      'IT',
-      'LV',
-      'LT',
-      'LU',
-      'MT',
-      'NL',
-      'PL',
-      'PT',
-      'RO',
-      'SK',
-      'SI',
-      'ES',
-      'SE',
-    ],
-  ],
+  'the European Union',
+  'AT BE BG HR CY CZ DK EE FI FR DE GR HU IE IT LV LT LU MT NL PL PT RO SK SI ES SE'.split(' '),
 )
 
 export const GB_1_2005: TransportRegulation = regulation(
   'gb-1-2005',
   'Regulation (EC) No 1/2005 as retained in Great Britain',
   'Retained Regulation (EC) No 1/2005',
+  'Great Britain',
   ['GB'],
 )
 
@@ -58,6 +31,7 @@ function regulation(
   id: string,
   title: string,
   cited: string,
+  placeWords: string,
   countries: readonly string[],
 ): TransportRegulation {
   const source = (rule: string, place: string, tag: RuleSource['tag']): RuleSource => ({
@@ -68,6 +42,7 @@ function regulation(
   return {
     id,
     title,
+    placeWords,
     countries,
     sources: {
       young: source('young', 'Annex I Chapter I 2', 'seen'),

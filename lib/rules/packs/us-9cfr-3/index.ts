@@ -17,6 +17,7 @@ export const US_9CFR_3: RulePack = {
   id: 'us-9cfr-3',
   title: '9 CFR Part 3 Subpart A',
   asOf: '2024-11-15',
+  placeWords: 'the United States',
   countries: COUNTRIES,
   profiles: PROFILES,
   evaluate(view) {
