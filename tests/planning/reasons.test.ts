@@ -68,6 +68,42 @@ describe('each single fault is one reason, at its place', () => {
       /pug is a snub-nosed breed/,
     ],
     [
+      'a sedative that stands only in a note',
+      (p) => (only(p.animals).medicines = 'Trazodone 100 mg at 08:00, Dr. A. Vane'),
+      'animals.0.medicines',
+      /“trazodone” stands under medicines. Set the flag sedated/,
+    ],
+    [
+      'sedated with nothing said of it',
+      (p) => only(p.animals).flags.push('sedated'),
+      'animals.0.medicines',
+      /put drug, dose, time and prescriber/,
+    ],
+    [
+      'sedated with “none” said of it',
+      (p) => Object.assign(only(p.animals), { flags: ['sedated'], medicines: 'None.' }),
+      'animals.0.medicines',
+      /put drug, dose, time and prescriber/,
+    ],
+    [
+      'fed after it left',
+      (p) => (only(p.animals).lastFedLocal = '2026-06-09T09:21'),
+      'animals.0.lastFedLocal',
+      /Corrie, last fed: 2026-06-09 09:21 lies after the journey leaves/,
+    ],
+    [
+      'watered last year',
+      (p) => (only(p.animals).lastWateredLocal = '2025-06-09T09:21'),
+      'animals.0.lastWateredLocal',
+      /more than 7 days before the journey leaves/,
+    ],
+    [
+      'fed on a day that isn’t there',
+      (p) => (only(p.animals).lastFedLocal = '2026-02-30T09:00'),
+      'animals.0.lastFedLocal',
+      /“2026-02-30 09:00” is not a date and a time/,
+    ],
+    [
       'an animal in no crate',
       (p) => p.animals.push({ ...newAnimal(p), name: 'Tansy', profileKey: 'rabbit', massKg: 2.6 }),
       'animals.1',
@@ -216,6 +252,38 @@ describe('a flight', () => {
       plan.legs = [leg(plan, 3)]
     })
     expect(reasons.map(({ path }) => path)).toEqual(['legs.0.flightPhase'])
+  })
+})
+
+describe('medicines', () => {
+  it.each(['', 'None', 'no medicines', 'No sedatives given', 'Not sedated', 'Carprofen 50 mg daily'])(
+    'let “%s” stand without the flag',
+    (medicines) => expect(after((p) => (only(p.animals).medicines = medicines))).toEqual([]),
+  )
+  it('let a sedative stand with the flag: the carrier’s rule then speaks', () => {
+    const reasons = after((p) =>
+      Object.assign(only(p.animals), { flags: ['sedated'], medicines: 'Acepromazine 20 mg, 08:00, A. Vane' }),
+    )
+    expect(reasons).toEqual([])
+  })
+})
+
+describe('a last meal on a night the clocks change', () => {
+  const at = (lastFedLocal: string, startLocal: string, endLocal: string) =>
+    after((plan) => {
+      plan.legs = [leg(plan, 0)]
+      Object.assign(leg(plan, 0), { startLocal, endLocal })
+      only(plan.animals).lastFedLocal = lastFedLocal
+    })
+  it('in the hour that never was is refused', () => {
+    const [reason] = at('2027-03-28T01:30', '2027-03-28T06:00', '2027-03-28T08:00')
+    expect(reason?.path).toBe('animals.0.lastFedLocal')
+    expect(reason?.message).toContain(
+      'never shows 2027-03-28 01:30. The next time it shows is 2027-03-28 02:00',
+    )
+  })
+  it('in the hour that comes twice is taken', () => {
+    expect(at('2026-10-25T01:30', '2026-10-25T06:00', '2026-10-25T08:00')).toEqual([])
   })
 })
 

@@ -126,6 +126,21 @@ describe('the scenario of a plan', () => {
     expect(animal).toMatchObject({ hoursSinceFed: 4, waterOfferedMin: [-30, 90] })
   })
 
+  it('counts a meal in an hour that came twice from the first of the two', () => {
+    const plan = glasgowToMuscat()
+    plan.legs = [at(plan.legs, 0)]
+    // 01:30 first comes at 00:30 UTC, in summer time; 06:00 in winter is 06:00 UTC.
+    Object.assign(at(plan.legs, 0), { startLocal: '2026-10-25T06:00', endLocal: '2026-10-25T08:00' })
+    at(plan.animals, 0).lastFedLocal = '2026-10-25T01:30'
+    expect(at(at(scenarioOf(plan).crates, 0).occupants, 0).hoursSinceFed).toBe(5.5)
+  })
+
+  it('leaves no meal out in silence', () => {
+    const plan = glasgowToMuscat()
+    at(plan.animals, 0).lastWateredLocal = '2026-06-09T10:00'
+    expect(() => scenarioOf(plan)).toThrow(RangeError)
+  })
+
   it('makes no scenario of a plan with a hole in it', () => {
     const plan = glasgowToMuscat()
     at(plan.animals, 0).massKg = null

@@ -20,11 +20,12 @@ export interface PlanningKnowledge {
  * place in the plan ("legs.2.surroundings.airTempC") and says one sentence.
  */
 export function reasonsNotAssessable(plan: Plan, { places, profiles }: PlanningKnowledge): Reason[] {
+  const timeline = timelineOf(plan, places)
   return [
     ...partyReasons(plan),
-    ...animalReasons(plan, profiles),
+    ...animalReasons(plan, profiles, timeline),
     ...crateReasons(plan),
-    ...legReasons(plan, timelineOf(plan, places)),
+    ...legReasons(plan, timeline),
     ...airReasons(plan),
   ]
 }

@@ -1,6 +1,7 @@
 import type { Plan, PlanAnimal, PlanLeg } from '@/lib/schemas/plan'
 import type { Activity, Animal, Coat } from '@/lib/thermal/scenario'
-import { resolveLocalTime } from '../local-time'
+import type { ResolvedTime } from '../local-time'
+import { lastTime } from '../meals'
 import type { Timeline } from '../timeline'
 
 /** One animal as the engine takes it, with the activity that people who did not see it must assume. */
@@ -55,34 +56,37 @@ function isStirring({ kind, flightPhase }: Pick<PlanLeg, 'kind' | 'flightPhase'>
 
 /** Meals and water before departure are told on the clock of the first place, those on the way by the planned stops. */
 function fedAndWatered(plan: Plan, animal: PlanAnimal, timeline: Timeline, departureMs: number) {
-  const fedMs = instantAtStart(animal.lastFedLocal, timeline)
-  const wateredMs = instantAtStart(animal.lastWateredLocal, timeline)
-  const hoursSinceFed = fedMs === null ? null : (departureMs - fedMs) / 3_600_000
-  const wateredMin = wateredMs === null ? null : (wateredMs - departureMs) / 60_000
-  const onTheWay = (wanted: 'water' | 'food') =>
-    plan.legs.flatMap((leg, index) => {
-      const startMs = timeline.legs[index]?.startMs
-      if (startMs == null) return []
-      const startMin = (startMs - departureMs) / 60_000
-      return leg.stops.filter(({ kind }) => kind === wanted).map(({ minute }) => startMin + minute)
-    })
-  const water = [...(wateredMin !== null && isBefore(wateredMin) ? [wateredMin] : []), ...onTheWay('water')]
-  const food = onTheWay('food')
+  const fed = minutesBefore(lastTime(animal, 'lastFedLocal', timeline), departureMs)
+  const watered = minutesBefore(lastTime(animal, 'lastWateredLocal', timeline), departureMs)
+  const water = [
+    ...(watered === null ? [] : [0 - watered]),
+    ...offeredOnTheWay(plan, 'water', timeline, departureMs),
+  ]
+  const food = offeredOnTheWay(plan, 'food', timeline, departureMs)
   return {
-    ...(hoursSinceFed !== null && hoursSinceFed >= 0 && hoursSinceFed <= 240 ? { hoursSinceFed } : {}),
+    ...(fed === null ? {} : { hoursSinceFed: fed / 60 }),
     ...(water.length === 0 ? {} : { waterOfferedMin: water.sort((a, b) => a - b) }),
     ...(food.length === 0 ? {} : { foodOfferedMin: food.sort((a, b) => a - b) }),
   }
 }
 
-const WEEK_MIN = 10_080
-
-function isBefore(minute: number): boolean {
-  return minute <= 0 && minute >= -WEEK_MIN
+function minutesBefore(time: ResolvedTime, departureMs: number): number | null {
+  if (time.kind === 'empty' || time.kind === 'unknown-zone') return null
+  if (time.kind !== 'instant' || time.instantMs > departureMs)
+    throw new RangeError('A last meal or drink lies at no time before the departure.')
+  return (departureMs - time.instantMs) / 60_000
 }
 
-function instantAtStart(local: string, timeline: Timeline): number | null {
-  if (timeline.departureZone === null) return null
-  const time = resolveLocalTime(local, timeline.departureZone, null)
-  return time.kind === 'instant' ? time.instantMs : null
+function offeredOnTheWay(
+  plan: Plan,
+  wanted: 'water' | 'food',
+  timeline: Timeline,
+  departureMs: number,
+): number[] {
+  return plan.legs.flatMap((leg, index) => {
+    const startMs = timeline.legs[index]?.startMs
+    if (startMs == null) return []
+    const startMin = (startMs - departureMs) / 60_000
+    return leg.stops.filter(({ kind }) => kind === wanted).map(({ minute }) => startMin + minute)
+  })
 }
