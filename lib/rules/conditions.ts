@@ -90,9 +90,10 @@ function heldText(surroundings: Surroundings): string {
       return `Air held at ${degrees(surroundings.airTempC)} throughout.`
     case 'enclosed': {
       const setPoint = heldSetPoint(surroundings)
+      // Fresh air nobody stated is asked for by a condition of its own.
       const air =
         surroundings.ventilationM3h === undefined
-          ? 'Fresh air of the space stated.'
+          ? 'Doors shut no longer than planned.'
           : `Fresh air ${signed(surroundings.ventilationM3h, 0)} m³/h kept running.`
       return `${setPoint}${air}`
     }
@@ -138,6 +139,14 @@ function asksSomething(finding: Finding): boolean {
   return finding.rule === 'ventilation-unknown' || (finding.status === 'condition' && !isNarrow(finding))
 }
 
+/** What somebody can do about a strain of the body: the finding itself states a fact, which nobody can confirm. */
+const WHAT_TO_DO: Readonly<Record<string, string>> = {
+  'cold-effort': 'Out of wind and wet, bedding dry, and no longer in the cold than planned.',
+  'carbon-dioxide': 'Openings of the crates kept free, nothing set against them, and fresh air kept running.',
+  'water-loss': 'Water offered at every stop planned, and who drank written down.',
+  'ventilation-unknown': 'Fresh air of the space stated in m³/h; until then leakage alone is counted.',
+}
+
 function ruleDraft(
   { rule, asked, legId, animalId, citation, basis }: Finding,
   { legs }: Scenario,
@@ -147,7 +156,9 @@ function ruleDraft(
   const ours = leg === undefined || leg.attended
   return {
     origin: 'rule',
-    text: basis === 'physiology' || citation === undefined ? asked : `${asked} ${citation}.`,
+    text:
+      WHAT_TO_DO[rule] ??
+      (basis === 'physiology' || citation === undefined ? asked : `${asked} ${citation}.`),
     legIds: legId === undefined ? [] : [legId],
     animalIds: animalId === undefined ? [] : [animalId],
     rules: [rule],

@@ -86,10 +86,10 @@ export function crateDrawing(
 ): Picture {
   const left = 34
   const gutter = 34
-  const pxPerCm = Math.min(
-    (width - left - gutter - 8) / (shape.lengthCm + shape.widthCm),
-    200 / shape.heightCm,
-    3,
+  // The width is 0 until the page was measured: nothing may then come out below nothing.
+  const pxPerCm = Math.max(
+    0.2,
+    Math.min((width - left - gutter - 8) / (shape.lengthCm + shape.widthCm), 200 / shape.heightCm, 3),
   )
   const long = shape.lengthCm * pxPerCm
   const wide = shape.widthCm * pxPerCm
