@@ -8,6 +8,7 @@ import type {
   ProfileValues,
   Scenario,
 } from '@/lib/thermal/scenario'
+import { flagsWithAge } from './ages'
 import { compare } from './wording'
 
 /** One animal entry with everything the rules ask of it. */
@@ -64,8 +65,9 @@ export function isAboard(subject: Subject, legIndex: number): boolean {
   return legIndex >= subject.firstLeg && legIndex <= subject.lastLeg
 }
 
-/** "snub-nosed" on a plain dog takes the snub-nosed row, flag kept for the findings. */
-function resolved(animal: Animal, rows: Readonly<Record<string, ProfileRow>>): Animal {
+/** "snub-nosed" on a plain dog takes the snub-nosed row, flag kept for the findings; age sets flags of its own. */
+function resolved(given: Animal, rows: Readonly<Record<string, ProfileRow>>): Animal {
+  const animal = { ...given, flags: flagsWithAge(given) }
   const own = `snub-nosed-${animal.profile}`
   return animal.flags.includes('snub-nosed') && rows[own] !== undefined ? { ...animal, profile: own } : animal
 }

@@ -251,6 +251,8 @@ export interface Animal {
   foodOfferedMin?: number[]
   acclimatedToC?: number
   flags: AnimalFlag[]
+  /** What it was given, in words; the rules ask a vet, no figure depends on it. */
+  medicines?: string
 }
 
 export interface Coat {

@@ -135,6 +135,19 @@ describe('the scenario of a plan', () => {
     expect(at(at(scenarioOf(plan).crates, 0).occupants, 0).hoursSinceFed).toBe(5.5)
   })
 
+  it('carries what was given to whoever judges it, and nothing where nothing was', () => {
+    const given = (medicines: string) => {
+      const plan = glasgowToMuscat()
+      at(plan.animals, 0).medicines = medicines
+      return at(at(scenarioOf(plan).crates, 0).occupants, 0).medicines
+    }
+    expect([given('Carprofen 50 mg'), given('None'), given('')]).toEqual([
+      'Carprofen 50 mg',
+      undefined,
+      undefined,
+    ])
+  })
+
   it('leaves no meal out in silence', () => {
     const plan = glasgowToMuscat()
     at(plan.animals, 0).lastWateredLocal = '2026-06-09T10:00'

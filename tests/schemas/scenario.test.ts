@@ -108,6 +108,20 @@ describe('what a scenario may not say', () => {
       'crates.0.medium',
       /only animals in air/,
     ],
+    [
+      'a tank of water',
+      (json) => (json.crates[0].water = { massKg: 40, tempC: 12 }),
+      'crates.0.water',
+      /Animals in water cannot be simulated yet/,
+    ],
+    [
+      'an animal in a huddle',
+      (json) => (json.crates[0].occupants[0].huddle = 3),
+      'crates.0.occupants.0.huddle',
+      /the species row decides/,
+    ],
+    ['members of an ensemble', (json) => (json.members = 300), 'members', /Ensembles cannot be run yet/],
+    ['a seed', (json) => (json.seed = 7), 'seed', /Ensembles cannot be run yet/],
     ['an ensemble', (json) => (json.ensemble = { members: 300 }), 'ensemble', /cannot be run yet/],
     [
       'a mass outside the profile',

@@ -2,6 +2,7 @@ import type { Plan, PlanAnimal, PlanLeg } from '@/lib/schemas/plan'
 import type { Activity, Animal, Coat } from '@/lib/thermal/scenario'
 import type { ResolvedTime } from '../local-time'
 import { lastTime } from '../meals'
+import { givenMedicines } from '../sedatives'
 import type { Timeline } from '../timeline'
 
 /** One animal as the engine takes it, with the activity that people who did not see it must assume. */
@@ -11,6 +12,7 @@ export function scenarioAnimal(
   timeline: Timeline,
   departureMs: number,
 ): Animal {
+  const medicines = givenMedicines(animal.medicines)
   if (animal.massKg === null) throw new RangeError(`${animal.name} has no mass.`)
   return {
     id: animal.id,
@@ -25,6 +27,7 @@ export function scenarioAnimal(
     activityDecayMin: 45,
     ...fedAndWatered(plan, animal, timeline, departureMs),
     flags: [...animal.flags].sort(),
+    ...(medicines === null ? {} : { medicines }),
   }
 }
 

@@ -1,6 +1,6 @@
 import { z } from 'zod'
 import type { Animal } from '@/lib/thermal/scenario'
-import { figure, figureOr, identifier, optionalFigure, word } from './figure'
+import { figure, figureOr, identifier, optionalFigure, word, words } from './figure'
 import type { Same } from './same'
 
 const ACTIVITIES = ['asleep', 'resting', 'alert', 'distressed'] as const
@@ -59,7 +59,7 @@ export const animalSchema = z.strictObject({
   lengthM: optionalFigure({ what: 'Body length', unit: 'm', min: 0.005, max: 10 }, 'from mass'),
   sex: word('Sex', ['male', 'female'])
     .optional()
-    .describe('Identifies the animal; no figure depends on it. Absent: unknown.'),
+    .describe('Read by rules on young animals with their mother; no figure depends on it. Absent: unknown.'),
   bodyTempC: optionalFigure(
     { what: 'Body temperature at loading', unit: '°C', min: 0, max: 45 },
     'the profile’s set-point, or the crate air for animals that do not regulate',
@@ -112,7 +112,10 @@ export const animalSchema = z.strictObject({
   flags: z
     .array(word('Flag', FLAGS))
     .default([])
-    .describe('What makes this animal need more care. Default none.'),
+    .describe('What makes this animal need more care; its age adds young and old. Default none.'),
+  medicines: words('Medicines', 300)
+    .optional()
+    .describe('What it was given: drug, dose, time, prescriber. Asks a vet. Absent: nothing.'),
 })
 
 const _animal: Same<z.output<typeof animalSchema>, Animal> = true
