@@ -4,6 +4,7 @@ import { glasgowMuscat } from './glasgow-muscat'
 import { glasgowValletta } from './glasgow-valletta'
 import { lauderKelso } from './lauder-kelso'
 import { peeblesUtrecht } from './peebles-utrecht'
+import { rexHome } from './rex-home'
 import { princetonSedona } from './princeton-sedona'
 import { balfronPeebles, obanCarlisle, peeblesBalfron } from './short-runs'
 
@@ -17,4 +18,5 @@ export const DEMO_CONSIGNMENTS: readonly DemoConsignment[] = [
   peeblesBalfron,
   obanCarlisle,
   collieHome,
+  rexHome,
 ]
