@@ -1,6 +1,7 @@
 'use client'
 
 import { useFormContext, useWatch } from 'react-hook-form'
+import { wearsCoat } from '@/lib/planning/coats'
 import type { Plan } from '@/lib/schemas/plan'
 import { figure } from '@/lib/views/format'
 import { FLAG_OPTIONS, SEX_OPTIONS, TEMPERAMENT_OPTIONS } from './option-words'
@@ -18,6 +19,7 @@ export function AnimalFields({ index }: { index: number }) {
   const massHint =
     species &&
     `${figure(species.values.massMinKg, 2)} to ${figure(species.values.massMaxKg, 2)} kg for this species`
+  const coated = species === undefined || wearsCoat(species.values)
   return (
     <div className="grid max-board:divide-y max-board:divide-rule board:grid-cols-3 board:divide-x board:divide-rule [&>*]:px-3.5 [&>*]:pb-3.5 [&>*]:pt-2.5">
       <div className="flex flex-col gap-2.5">
@@ -41,10 +43,14 @@ export function AnimalFields({ index }: { index: number }) {
       <div className="flex flex-col gap-2.5">
         <PlanNumber path={at('massKg')} label="Mass, each" unit="kg" hint={massHint} />
         <div className="grid grid-cols-2 gap-2.5">
-          <PlanNumber path={`animals.${index}.coat.depthMm`} label="Coat depth" unit="mm" />
-          <PlanNumber path={`animals.${index}.coat.wetPct`} label="Coat wet" unit="%" />
+          {coated && <PlanNumber path={`animals.${index}.coat.depthMm`} label="Coat depth" unit="mm" />}
+          <PlanNumber
+            path={`animals.${index}.coat.wetPct`}
+            label={coated ? 'Coat wet' : 'Skin wet'}
+            unit="%"
+          />
         </div>
-        <PlanTick path={`animals.${index}.coat.clipped`} label="Coat clipped" />
+        {coated && <PlanTick path={`animals.${index}.coat.clipped`} label="Coat clipped" />}
         <PlanSelect path={at('temperament')} label="Temperament" choices={TEMPERAMENT_OPTIONS} />
         <PlanTick path={at('crateTrained')} label="Crate-trained" />
         <PlanTicks path={at('flags')} label="What makes it susceptible" choices={FLAG_OPTIONS} />

@@ -1,6 +1,6 @@
 'use client'
 
-import { useFormContext } from 'react-hook-form'
+import { useFormContext, useWatch } from 'react-hook-form'
 import { SelectField } from '@/components/forms/select-field'
 import type { Plan } from '@/lib/schemas/plan'
 import { BEDDING_OPTIONS, FLOOR_OPTIONS, FORM_OPTIONS, ONTO_OPTIONS, WALL_OPTIONS } from './option-words'
@@ -10,6 +10,8 @@ import { planPathId } from './plan-path'
 
 /** Size, walls, floor, bedding and water of one crate. */
 export function CrateFields({ index }: { index: number }) {
+  const { control } = useFormContext<Plan>()
+  const bedding = useWatch({ control, name: `crates.${index}.bedding.material` })
   const at = <F extends keyof Plan['crates'][number]>(field: F) => `crates.${index}.${field}` as const
   return (
     <div className="flex flex-col gap-2.5">
@@ -30,8 +32,12 @@ export function CrateFields({ index }: { index: number }) {
       </div>
       <div className="grid grid-cols-2 gap-2.5 desk:grid-cols-4">
         <PlanSelect path={`crates.${index}.bedding.material`} label="Bedding" choices={BEDDING_OPTIONS} />
-        <PlanNumber path={`crates.${index}.bedding.depthMm`} label="Deep" unit="mm" />
-        <PlanNumber path={`crates.${index}.bedding.wetPct`} label="Wet" unit="%" />
+        {bedding !== 'none' && (
+          <>
+            <PlanNumber path={`crates.${index}.bedding.depthMm`} label="Deep" unit="mm" />
+            <PlanNumber path={`crates.${index}.bedding.wetPct`} label="Wet" unit="%" />
+          </>
+        )}
         <PlanNumber path={at('waterContainerL')} label="Water" unit="L" />
       </div>
     </div>

@@ -38,7 +38,7 @@ export function LegSurroundings({ index }: { index: number }) {
       />
       {type === 'controlled' && <ControlledFields index={index} />}
       {type === 'open-air' && (
-        <WeatherRows base={`legs.${index}.surroundings`} words={`Weather on leg ${index + 1}`} />
+        <WeatherRows base={`legs.${index}.surroundings`} words={`Weather on leg ${index + 1}`} reach="open" />
       )}
       {type === 'enclosed' && <EnclosedFields index={index} />}
       <Offered words={stillOffered(leg)} />
@@ -81,7 +81,7 @@ function ControlledFields({ index }: { index: number }) {
               Take out
             </button>
           </p>
-          <WeatherRows base={`${base}.outside`} words={`Air outside on leg ${index + 1}`} />
+          <WeatherRows base={`${base}.outside`} words={`Air outside on leg ${index + 1}`} reach="held" />
         </div>
       )}
     </>

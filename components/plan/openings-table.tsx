@@ -126,7 +126,10 @@ function OpeningCells({
       </td>
       {figures.map(([field, what]) => (
         <td key={field} className="min-w-[3.75rem] border-t border-hair px-0.5 py-1 align-top">
-          <PlanNumber bare path={at(field)} label={words(what)} unit="" />
+          {/* A roof has no floor to stand above. */}
+          {(field !== 'sillHeightCm' || opening?.face !== 'top') && (
+            <PlanNumber bare path={at(field)} label={words(what)} unit="" />
+          )}
         </td>
       ))}
       <td className="fig whitespace-nowrap border-t border-hair px-1.5 text-right text-small">

@@ -1,5 +1,6 @@
 'use client'
 
+import type { ReactNode } from 'react'
 import { useFieldArray, useFormContext } from 'react-hook-form'
 import { Ledger, Head } from '@/components/ui/ledger'
 import { MAX_WEATHER_ROWS } from './limits'
@@ -10,16 +11,25 @@ import type { PlanPath } from './plan-fields'
 /** Where open air stands in the plan: a leg's own surroundings, or what lies outside them. */
 export type AirBase = `legs.${number}.surroundings` | `legs.${number}.surroundings.outside`
 
-const HEADS = [
-  ['Minute', 'min'],
-  ['Air', ''],
-  ['Humidity', '%'],
-  ['Wind', 'm/s'],
-  ['Sun', 'W/m²'],
-] as const
+/** What of the weather reaches the crates: in the open all of it, round a closed space no wind, round a held room no sun. */
+export type WeatherReach = 'open' | 'closed' | 'held'
+
+const COLUMNS = [
+  { field: 'minute', head: 'Minute', sign: 'min', reaches: ['open', 'closed', 'held'] },
+  { field: 'airTempC', head: 'Air', sign: '', reaches: ['open', 'closed', 'held'] },
+  { field: 'relHumidityPct', head: 'Humidity', sign: '%', reaches: ['open', 'closed', 'held'] },
+  { field: 'windMs', head: 'Wind', sign: 'm/s', reaches: ['open'] },
+  { field: 'solarWm2', head: 'Sun', sign: 'W/m²', reaches: ['open', 'closed'] },
+] as const satisfies readonly {
+  field: string
+  head: string
+  sign: string
+  reaches: readonly WeatherReach[]
+}[]
 
 /** Open air as people read it from a forecast: a row for each moment, straight lines between, the last row holds on. */
-export function WeatherRows({ base, words }: { base: AirBase; words: string }) {
+export function WeatherRows({ base, words, reach }: { base: AirBase; words: string; reach: WeatherReach }) {
+  const columns = COLUMNS.filter(({ reaches }) => (reaches as readonly WeatherReach[]).includes(reach))
   const { control, getValues } = useFormContext<Plan>()
   // The union of surroundings has rows on one branch only; the caller stands on that branch.
   const name = `${base}.rows` as 'legs.0.surroundings.outside.rows'
@@ -40,7 +50,7 @@ export function WeatherRows({ base, words }: { base: AirBase; words: string }) {
       <Ledger caption={words}>
         <thead>
           <tr>
-            {HEADS.map(([head, sign]) => (
+            {columns.map(({ head, sign }) => (
               <Head key={head} numeric className="!px-1.5">
                 {head} <span className="font-normal">{sign}</span>
               </Head>
@@ -53,31 +63,14 @@ export function WeatherRows({ base, words }: { base: AirBase; words: string }) {
         <tbody>
           {fields.map((field, row) => (
             <tr key={field.rowKey} className="align-top">
-              <WeatherCell>
-                <PlanNumber
-                  bare
-                  path={at(row, 'minute')}
-                  label={<Ears>Row {row + 1}, minute</Ears>}
-                  unit=""
-                />
-              </WeatherCell>
-              <WeatherCell>
-                <PlanTemperature bare path={at(row, 'airTempC')} label={<Ears>Row {row + 1}, air</Ears>} />
-              </WeatherCell>
-              <WeatherCell>
-                <PlanNumber
-                  bare
-                  path={at(row, 'relHumidityPct')}
-                  label={<Ears>Row {row + 1}, humidity</Ears>}
-                  unit=""
-                />
-              </WeatherCell>
-              <WeatherCell>
-                <PlanNumber bare path={at(row, 'windMs')} label={<Ears>Row {row + 1}, wind</Ears>} unit="" />
-              </WeatherCell>
-              <WeatherCell>
-                <PlanNumber bare path={at(row, 'solarWm2')} label={<Ears>Row {row + 1}, sun</Ears>} unit="" />
-              </WeatherCell>
+              {columns.map(({ field: key, head }) => (
+                <td key={key} className="border-t border-hair px-0.5 py-1 align-top">
+                  <WeatherFigure
+                    path={at(row, key)}
+                    label={<Ears words={`Row ${row + 1}, ${head.toLowerCase()}`} />}
+                  />
+                </td>
+              ))}
               <td className="border-t border-hair px-1.5 py-1 text-right">
                 {fields.length > 1 && (
                   <button
@@ -99,16 +92,22 @@ export function WeatherRows({ base, words }: { base: AirBase; words: string }) {
             Add a row
           </button>
         )}
-        <PlanNumber className="w-28" path={`${base}.shadePct` as PlanPath} label="Shade" unit="%" />
+        {reach !== 'held' && (
+          <PlanNumber className="w-28" path={`${base}.shadePct` as PlanPath} label="Shade" unit="%" />
+        )}
       </div>
     </div>
   )
 }
 
-function WeatherCell({ children }: { children: React.ReactNode }) {
-  return <td className="w-[19%] border-t border-hair px-0.5 py-1 align-top">{children}</td>
+function WeatherFigure({ path, label }: { path: PlanPath; label: ReactNode }) {
+  return path.endsWith('TempC') ? (
+    <PlanTemperature bare path={path} label={label} />
+  ) : (
+    <PlanNumber bare path={path} label={label} unit="" />
+  )
 }
 
-function Ears({ children }: { children: React.ReactNode }) {
-  return <span className="sr-only">{children}</span>
+function Ears({ words }: { words: string }) {
+  return <span className="sr-only">{words}</span>
 }

@@ -82,6 +82,68 @@ describe('the scenario of a plan', () => {
     expect(a?.type === 'enclosed' && b?.type === 'enclosed' && a.compartmentId === b.compartmentId).toBe(true)
   })
 
+  it('lets a van that comes from a heated shed start as warm as it is outside, unless somebody typed its air', () => {
+    const vanAfterShed = (initialAirTempC: number | null) => {
+      const plan = glasgowToMuscat()
+      const [van, ramp] = [at(plan.legs, 5), at(plan.legs, 4)]
+      if (van.surroundings.type !== 'enclosed') throw new Error('No van.')
+      Object.assign(ramp, {
+        kind: 'shed',
+        flightPhase: null,
+        surroundings: {
+          type: 'controlled',
+          airTempC: 24,
+          relHumidityPct: 40,
+          airSpeedMs: 0.1,
+          outside: null,
+        },
+      })
+      van.surroundings.initialAirTempC = initialAirTempC
+      plan.legs = [{ ...ramp, startLocal: '2026-06-09T23:00' }, van]
+      return at(scenarioOf(plan).legs, 1).surroundings
+    }
+    expect(vanAfterShed(null)).not.toHaveProperty('initialAirTempC')
+    expect(vanAfterShed(38)).toMatchObject({ initialAirTempC: 38 })
+    expect(vanAfterShed(38)).not.toHaveProperty('wallTempC')
+  })
+
+  it('leaves out what the form does not ask for: air that is carried over, wind round a van, sun round a shed', () => {
+    const plan = glasgowToMuscat()
+    const arrival = at(plan.legs, 4).surroundings
+    if (arrival.type !== 'enclosed') throw new Error('No hold.')
+    // Left over from before the flight was held at 18 °C: the engine would start from the flight’s air all the same.
+    arrival.initialAirTempC = 33
+    const airborne = at(plan.legs, 3)
+    const sunny = {
+      type: 'open-air' as const,
+      shadePct: 40,
+      rows: [{ minute: 0, airTempC: 17, relHumidityPct: 50, windMs: 9, solarWm2: 400 }],
+    }
+    arrival.outside = sunny
+    if (airborne.surroundings.type === 'controlled') airborne.surroundings.outside = sunny
+    const { legs } = scenarioOf(plan)
+    expect(at(legs, 4).surroundings).toMatchObject({
+      initialAirTempC: 18,
+      outside: { shadePct: 40, series: [{ windMs: 0, solarWm2: 400 }] },
+    })
+    expect(at(legs, 3).surroundings).toMatchObject({
+      outside: { shadePct: 0, series: [{ windMs: 0, solarWm2: 0 }] },
+    })
+  })
+
+  it('gives no depth to bedding that is not there, nor a coat to a snake', () => {
+    const plan = glasgowToMuscat()
+    at(plan.crates, 0).bedding = { material: 'none', depthMm: 40, wetPct: 50 }
+    Object.assign(at(plan.animals, 0), {
+      profileKey: 'ball-python',
+      massKg: 1.5,
+      coat: { depthMm: 12, clipped: true, wetPct: 30 },
+    })
+    const crate = at(scenarioOf(plan).crates, 0)
+    expect(crate.bedding).toEqual({ material: 'none', depthMm: 0, wetPct: 0 })
+    expect(at(crate.occupants, 0).coat).toEqual({ wetPct: 30 })
+  })
+
   it('counts weather from departure and holds its last row past every delay and what is looked at beyond', () => {
     const plan = glasgowToMuscat()
     const ramp = at(plan.legs, 1)

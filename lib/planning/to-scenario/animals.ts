@@ -1,7 +1,9 @@
 import type { Plan, PlanAnimal, PlanLeg } from '@/lib/schemas/plan'
 import type { Activity, Animal, Coat } from '@/lib/thermal/scenario'
 import type { ResolvedTime } from '../local-time'
+import { wearsCoat } from '../coats'
 import { lastTime } from '../meals'
+import type { ProfileInForce } from '../reasons'
 import { givenMedicines } from '../sedatives'
 import type { Timeline } from '../timeline'
 
@@ -9,6 +11,7 @@ import type { Timeline } from '../timeline'
 export function scenarioAnimal(
   plan: Plan,
   animal: PlanAnimal,
+  profile: ProfileInForce | undefined,
   timeline: Timeline,
   departureMs: number,
 ): Animal {
@@ -21,7 +24,7 @@ export function scenarioAnimal(
     count: animal.count,
     ...(animal.ageDays === null ? {} : { ageDays: animal.ageDays }),
     ...(animal.sex === 'unknown' ? {} : { sex: animal.sex }),
-    coat: coatOf(animal),
+    coat: coatOf(animal, profile),
     activity: 'resting',
     activityByLeg: activityByLeg(plan.legs, animal),
     activityDecayMin: 45,
@@ -31,7 +34,9 @@ export function scenarioAnimal(
   }
 }
 
-function coatOf({ coat }: PlanAnimal): Coat {
+/** Scales have no depth and are not clipped; wet they may be. */
+function coatOf({ coat }: PlanAnimal, profile: ProfileInForce | undefined): Coat {
+  if (profile !== undefined && !wearsCoat(profile.values)) return { wetPct: coat.wetPct }
   return {
     ...(coat.depthMm === null ? {} : { depthMm: coat.depthMm }),
     clipped: coat.clipped,

@@ -1,18 +1,26 @@
 import type { Plan, PlanAnimal, PlanCrate, PlanOpening } from '@/lib/schemas/plan'
 import type { Crate, Opening } from '@/lib/thermal/scenario'
 import { crateMark } from '../crate-mark'
+import type { ProfileInForce } from '../reasons'
 import type { Timeline } from '../timeline'
 import { scenarioAnimal } from './animals'
 
 /** The crates with who is inside, metres for centimetres, sorted by id. */
-export function scenarioCrates(plan: Plan, mark: string, timeline: Timeline, departureMs: number): Crate[] {
+export function scenarioCrates(
+  plan: Plan,
+  mark: string,
+  profiles: readonly ProfileInForce[],
+  timeline: Timeline,
+  departureMs: number,
+): Crate[] {
   const animals = new Map(plan.animals.map((animal) => [animal.id, animal]))
   return plan.crates
     .map((crate) =>
       scenarioCrate(crate, mark, (id) => {
         const animal = animals.get(id)
         if (animal === undefined) throw new RangeError(`Crate ${crate.letter} holds an unknown animal.`)
-        return scenarioAnimal(plan, animal, timeline, departureMs)
+        const profile = profiles.find(({ key }) => key === animal.profileKey)
+        return scenarioAnimal(plan, animal, profile, timeline, departureMs)
       }),
     )
     .sort(byId)
@@ -38,7 +46,8 @@ function scenarioCrate(
     openings: crate.openings.map((opening) => scenarioOpening(crate, opening)),
     byLeg: [],
     floor: { material: crate.floorMaterial, thicknessMm: crate.floorThicknessMm, onto: crate.floorOnto },
-    bedding: crate.bedding,
+    // What a depth or a wetness of no bedding would be, nobody can say: the form hides them.
+    bedding: crate.bedding.material === 'none' ? { ...crate.bedding, depthMm: 0, wetPct: 0 } : crate.bedding,
     medium: 'air',
     occupants: crate.occupants.map(occupant).sort(byId),
   }

@@ -28,7 +28,7 @@ export function toScenario(plan: Plan, { mark, places, profiles }: ScenarioParts
     limits: [],
     context: { jurisdictions: [], carriers: [], papers: [], purpose: plan.purpose },
     legs: scenarioLegs(plan, timeline, departureMs),
-    crates: scenarioCrates(plan, mark, timeline, departureMs),
+    crates: scenarioCrates(plan, mark, profiles, timeline, departureMs),
   }
 }
 

@@ -6,6 +6,7 @@ import type {
   Surroundings,
   WeatherPoint,
 } from '@/lib/thermal/scenario'
+import { airStart, firstInSpace } from '../spaces'
 
 type PlanEnclosed = Extract<PlanSurroundings, { type: 'enclosed' }>
 type PlanControlled = Extract<PlanSurroundings, { type: 'controlled' }>
@@ -26,7 +27,7 @@ export function scenarioSurroundings(
   if (air === undefined) throw new RangeError(`There is no leg ${index + 1}.`)
   switch (air.type) {
     case 'open-air':
-      return openAir(air, minutes)
+      return openAir(air, minutes, { wind: true, sun: true })
     case 'controlled':
       return controlled(air, minutes)
     case 'enclosed':
@@ -43,18 +44,26 @@ function controlled(air: PlanControlled, minutes: LegMinutes): ControlledAir {
     airSpeedMs: air.airSpeedMs,
     surfaceTempC: airTempC,
     outsideCo2Ppm: OUTDOOR_CO2_PPM,
-    ...(air.outside === null ? {} : { outside: openAir(air.outside, minutes) }),
+    ...(air.outside === null ? {} : { outside: openAir(air.outside, minutes, { wind: false, sun: false }) }),
   }
 }
 
-function openAir(air: PlanOpenAir, { startMin, untilMin }: LegMinutes): OpenAir {
+/**
+ * Round a closed space no wind is felt, and round a room held at a set-point no sun either: the form does not ask for them
+ * there, and what is left over from other surroundings does not count.
+ */
+function openAir(
+  air: PlanOpenAir,
+  { startMin, untilMin }: LegMinutes,
+  counts: { wind: boolean; sun: boolean },
+): OpenAir {
   const series = air.rows.map((row): WeatherPoint => ({
     minute: startMin + row.minute,
     airTempC: known(row.airTempC),
     relHumidityPct: known(row.relHumidityPct),
-    windMs: row.windMs ?? 0,
+    windMs: counts.wind ? (row.windMs ?? 0) : 0,
     // Empty sun counts as none; by day the rules then say that nobody gave it.
-    solarWm2: row.solarWm2 ?? 0,
+    solarWm2: counts.sun ? (row.solarWm2 ?? 0) : 0,
   }))
   const last = series.at(-1)
   const held = last !== undefined && series.length > 1 && last.minute < untilMin
@@ -62,7 +71,7 @@ function openAir(air: PlanOpenAir, { startMin, untilMin }: LegMinutes): OpenAir 
     type: 'open-air',
     series: held ? [...series, { ...last, minute: untilMin }] : series,
     source: 'typed',
-    shadePct: air.shadePct,
+    shadePct: counts.sun ? air.shadePct : 0,
     groundAlbedo: 0.2,
     windHeightM: 10,
   }
@@ -84,9 +93,9 @@ function enclosed(
     solarApertureM2: space.solarApertureM2,
     solarTransmittance: 0.6,
     crateAirSpeedMs: space.crateAirSpeedMs,
-    ...startOf(legs[index - 1]?.surroundings, space),
+    ...startOf(legs, index, space),
     ...conditioningOf(space),
-    outside: openAir(space.outside, minutes),
+    outside: openAir(space.outside, minutes, { wind: false, sun: true }),
     ...compartment(legs, index, space),
   }
 }
@@ -103,30 +112,27 @@ function conditioningOf({ conditioning }: PlanEnclosed) {
 }
 
 /** A hold that was kept at a set-point in the air begins its wait on the ground at that set-point, walls too. */
-function startOf(before: PlanSurroundings | undefined, space: PlanEnclosed) {
-  if (space.initialAirTempC !== null) return { initialAirTempC: space.initialAirTempC }
-  if (before?.type !== 'controlled' || space.spaceName === '') return {}
-  const airTempC = known(before.airTempC)
-  return {
-    initialAirTempC: airTempC,
-    initialRelHumidityPct: known(before.relHumidityPct),
-    wallTempC: airTempC,
+function startOf(legs: readonly PlanLeg[], index: number, { initialAirTempC }: PlanEnclosed) {
+  const before = legs[index - 1]?.surroundings
+  switch (airStart(legs, index)) {
+    case 'own':
+      return initialAirTempC === null ? {} : { initialAirTempC }
+    case 'carried':
+      return {}
+    case 'flight': {
+      if (before?.type !== 'controlled') return {}
+      const airTempC = known(before.airTempC)
+      return {
+        initialAirTempC: airTempC,
+        initialRelHumidityPct: known(before.relHumidityPct),
+        wallTempC: airTempC,
+      }
+    }
   }
 }
 
-/**
- * Only neighbouring legs in one space share its air. A van that comes back two flights later is another van, whatever it
- * is called.
- */
 function compartment(legs: readonly PlanLeg[], index: number, { spaceName }: PlanEnclosed) {
-  if (spaceName === '') return {}
-  let first = index
-  while (sameSpace(legs[first - 1], spaceName)) first -= 1
-  return { compartmentId: `space-${legs[first]?.id ?? ''}` }
-}
-
-function sameSpace(leg: PlanLeg | undefined, spaceName: string): boolean {
-  return leg?.surroundings.type === 'enclosed' && leg.surroundings.spaceName === spaceName
+  return spaceName === '' ? {} : { compartmentId: `space-${legs[firstInSpace(legs, index)]?.id ?? ''}` }
 }
 
 /** Global mean of outdoor air; NOAA Global Monitoring Laboratory gives 422 to 425 ppm for 2023 to 2024. */

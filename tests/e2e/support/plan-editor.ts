@@ -93,7 +93,6 @@ async function typeLeg(page: Page, plan: TypedPlan) {
   const air = {
     'Row 1, air': plan.outsideAirC,
     'Row 1, humidity': '70',
-    'Row 1, wind': '3',
     'Row 1, sun': '50',
   }
   for (const [label, value] of Object.entries(air)) await leg.getByLabel(label, { exact: true }).fill(value)
