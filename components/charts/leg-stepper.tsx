@@ -73,7 +73,7 @@ function StepperCell({
       </span>
       <svg aria-hidden="true" height="16" className="mt-2 block w-full border-l border-ink bg-band">
         {/* Drawn wider than any cell and cut by it. */}
-        <Marks marks={[hatch(leg.pattern, { x: 0, y: 0, width: 130, height: 16 })]} />
+        <Marks marks={[hatch(leg.pattern, { x: 0, y: 0, width: 1200, height: 16 })]} />
       </svg>
       {chosen && <span aria-hidden="true" className="absolute inset-x-0 bottom-0 h-1.5 bg-hand" />}
     </button>

@@ -151,7 +151,7 @@ export function utcOffset(ms: number, zone: string): string {
 export function zoneWithOffset(ms: number, zone: string): string {
   const name = zoneName(ms, zone)
   const offset = utcOffset(ms, zone)
-  return name === offset ? name : `${name}${NBSP}(${offset})`
+  return name === offset ? name : `${name} (${offset})`
 }
 
 /** "03:09 GST". */

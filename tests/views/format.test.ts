@@ -112,7 +112,7 @@ describe('times', () => {
 
   it('say zone and offset', () => {
     expect(format.localTime(landing, 'Asia/Muscat')).toBe(`03:09${NBSP}GST`)
-    expect(format.localTimeWithOffset(landing, 'Asia/Muscat')).toBe(`03:09${NBSP}GST${NBSP}(UTC+4)`)
+    expect(format.localTimeWithOffset(landing, 'Asia/Muscat')).toBe(`03:09${NBSP}GST (UTC+4)`)
     expect(format.dayTime(landing, 'Europe/London')).toBe(`Wed${NBSP}10${NBSP}Jun 00:09${NBSP}BST`)
     expect(format.localTime(landing, 'Asia/Kathmandu')).toBe(`04:54${NBSP}UTC+5:45`)
   })
