@@ -71,32 +71,32 @@ function Row({
         aria-current={chosen ? 'true' : undefined}
         className="aria-[current]:bg-handwash aria-[current]:[&>td:first-child]:shadow-[inset_4px_0_0_var(--hand)]"
       >
-        <Cell label="Row" numeric>
+        <Cell label="Row" inline numeric>
           {count(row.id)}
         </Cell>
-        <Cell label="When" className="whitespace-nowrap">
+        <Cell inline className="whitespace-nowrap">
           {dayDate(row.at.ms, row.at.zone)} <span className="fig text-small">{clockWithSeconds(row)}</span>
         </Cell>
-        <Cell label="Who">
+        <Cell>
           {row.who}
           {row.role && <span className="text-mute">, {row.role}</span>}
         </Cell>
-        <Cell label="What" attention={row.refused}>
+        <Cell attention={row.refused}>
           <span className="fig text-small">{row.verb}</span>
           <span className="text-mute"> {row.subject}</span>
           {row.note && <span className="block text-small text-mute">{row.note}</span>}
         </Cell>
-        <Cell label="Mark">
+        <Cell inline>
           {row.mark && (
             <Link href={hrefOfConsignment(row)} className="text-ink">
               <Mark size="s">{row.mark}</Mark>
             </Link>
           )}
         </Cell>
-        <Cell label="From where" className="fig text-small">
+        <Cell label="From" inline className="fig text-small">
           {row.from}
         </Cell>
-        <Cell label="Before, after">
+        <Cell label="Before, after" inline>
           {opens ? (
             <Link href={hrefOf(chosen ? null : row)} scroll={false} className="link">
               {chosen ? 'Close' : 'Open'}

@@ -27,10 +27,12 @@ export function ApprovalsPart({ approvals }: { approvals: readonly ApprovalLine[
       <tbody>
         {approvals.map((line) => (
           <tr key={line.approvalId}>
-            <RowHead>
+            <RowHead inline>
               <span className="crate text-mark-s">{line.crateMark}</span>
             </RowHead>
-            <Cell label="Revision">{line.revision}</Cell>
+            <Cell label="Revision" inline>
+              {line.revision}
+            </Cell>
             <Cell label="Decision">
               <Lines
                 first={DECISION_WORDS[line.decision]}

@@ -90,7 +90,7 @@ function AssessedParts({
         title="Legs"
         words="In the frame minutes to spare, beside it outside air; below the limit that decides, then body"
       >
-        <LegsTable legs={sheet.legs} animals={sheet.animals} outOfDate={outOfDate} />
+        <LegsTable legs={sheet.legs} animals={sheet.animals} animalId={animalId} outOfDate={outOfDate} />
       </Section>
       <Section id="findings" title="Findings" words={`${sheet.findings.length}, the deciding ones first`}>
         <FindingsInTwo findings={sheet.findings} />

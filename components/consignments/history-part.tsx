@@ -85,10 +85,10 @@ function HistoryTable({ caption, runs }: { caption: string; runs: readonly Run[]
       <tbody>
         {runs.map(({ line, times }) => (
           <tr key={line.id}>
-            <Cell className="whitespace-nowrap text-small">
+            <Cell inline className="whitespace-nowrap text-small">
               {dayDate(line.at.ms, line.at.zone)}, {localTime(line.at.ms, line.at.zone)}
             </Cell>
-            <Cell>{line.who}</Cell>
+            <Cell inline>{line.who}</Cell>
             <Cell attention={line.refused}>
               {verbWords(line)}
               {times > 1 && `, ${times} times`}

@@ -4,6 +4,7 @@ import { Stamp } from '@/components/ui/stamp'
 import { Temperature } from '@/components/ui/temperature'
 import { dayTime, duration } from '@/lib/views/format'
 import type { ReviewView } from '@/lib/views/review'
+import type { AnimalView } from '@/lib/views/sheet'
 
 /** Which crate, which animals, which journey, and the verdict with this set-up. */
 export function ReviewHead({ view }: { view: ReviewView }) {
@@ -18,9 +19,11 @@ export function ReviewHead({ view }: { view: ReviewView }) {
         {chosen.animals.map((animal) => (
           <span key={animal.animalId} className="block">
             <b>{animal.name}</b>, {animal.describes}
-            {animal.flagWords !== 'None' && (
-              <span className="block text-small text-mute">{animal.flagWords}</span>
-            )}
+            {healthLines(animal).map((line) => (
+              <span key={line} className="block text-small text-mute">
+                {line}
+              </span>
+            ))}
           </span>
         ))}
       </Fact>
@@ -52,4 +55,14 @@ export function ReviewHead({ view }: { view: ReviewView }) {
       </Fact>
     </BoxedFacts>
   )
+}
+
+/** What a vet asks of the animal before looking at figures. */
+function healthLines({ flagWords, mannerWords, medicines, examinedWords }: AnimalView): string[] {
+  return [
+    flagWords === 'None' ? '' : flagWords,
+    mannerWords,
+    medicines === '' ? '' : `Medicines: ${medicines}`,
+    examinedWords === '' ? 'Last examination not given' : `Last examined ${examinedWords}`,
+  ].filter(Boolean)
 }

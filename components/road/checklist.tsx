@@ -15,6 +15,7 @@ import { itemStates, legTally } from './item-states'
 import { JourneyActs } from './journey-acts'
 import type { JourneyActions, RequestIds } from './journey-acts'
 import { LegHead } from './leg-head'
+import { LegNotes } from './leg-notes'
 import { OwnLegs } from './own-legs'
 import { SignalLine } from './signal-line'
 import { StopLimits } from './stop-limits'
@@ -59,6 +60,7 @@ export function Checklist({
       <StopLimits stops={leg.stops} />
       <EnduranceTable rows={leg.endurance} />
       <EarlySigns leg={leg} />
+      <LegNotes leg={leg} />
       <CallBar calls={view.calls} />
       <div className="border-b-2 border-ink px-4 pb-2 pt-3.5">
         <h2 className="text-section">

@@ -78,6 +78,7 @@ function LegForm({ view, leg, sheet }: { view: ChecklistView; leg: ChecklistLeg;
       </div>
       <Stops leg={leg} mark={view.mark} />
       <Signs leg={leg} />
+      <Notes leg={leg} />
       <LegFormItems leg={leg} crates={view.crates} />
       <Calls calls={view.calls} />
       <dl className="mt-2 grid grid-cols-[1.2fr_1fr_1fr_1.1fr] border border-ink [&>div+div]:border-l [&>div+div]:border-rule [&>div]:pb-5">
@@ -188,6 +189,19 @@ function Signs({ leg }: { leg: ChecklistLeg }) {
           </li>
         ))}
       </ul>
+    </section>
+  )
+}
+
+function Notes({ leg }: { leg: ChecklistLeg }) {
+  if (leg.notes.length === 0) return null
+  return (
+    <section className="mt-1.5 break-inside-avoid border border-ink px-2.5 py-1">
+      {leg.notes.map(({ head, text }) => (
+        <p key={head} className="[overflow-wrap:anywhere]">
+          <b>{head}:</b> {text}
+        </p>
+      ))}
     </section>
   )
 }

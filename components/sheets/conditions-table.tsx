@@ -26,8 +26,10 @@ export function ConditionsTable({
       <tbody>
         {conditions.map((condition) => (
           <tr key={condition.conditionId}>
-            <RowHead className="font-head text-sub font-bold">{condition.number}</RowHead>
-            <Cell label="Leg" className="whitespace-nowrap">
+            <RowHead inline className="font-head text-sub font-bold">
+              {condition.number}
+            </RowHead>
+            <Cell label="Leg" inline className="whitespace-nowrap">
               {condition.legWords}
             </Cell>
             <Cell>{condition.text}</Cell>

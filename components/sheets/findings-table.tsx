@@ -54,9 +54,11 @@ export function FindingsTable({
       <tbody>
         {shown.map((finding) => (
           <tr key={finding.number} id={`finding-${finding.number}`}>
-            <RowHead className="font-head text-sub font-bold">{finding.number}</RowHead>
-            <Cell label="Basis">{finding.basisWords}</Cell>
-            <Cell label="Who, leg">{finding.whoLegWords}</Cell>
+            <RowHead inline className="font-head text-sub font-bold">
+              {finding.number}
+            </RowHead>
+            <Cell inline>{finding.basisWords}</Cell>
+            <Cell inline>{finding.whoLegWords}</Cell>
             <Cell className="max-w-[34rem]">
               {finding.asked}
               {finding.note !== '' && finding.note !== finding.asked && (

@@ -1,4 +1,5 @@
 import { Cell, Head, Ledger, Row, RowHead } from '@/components/ui/ledger'
+import { join } from '@/components/ui/join'
 import { TemperatureChip } from '@/components/ui/temperature'
 import { PatternSwatch } from '@/components/charts/pattern-swatch'
 import { dayDate, hourMin, localTime } from '@/lib/views/format'
@@ -9,10 +10,13 @@ import { LegCellFigures } from './margin-figures'
 export function LegsTable({
   legs,
   animals,
+  animalId = null,
   outOfDate,
 }: {
   legs: readonly LegView[]
   animals: readonly AnimalView[]
+  /** The animal in hand: on a phone it is the only one shown. */
+  animalId?: string | null
   outOfDate: boolean
 }) {
   return (
@@ -48,14 +52,18 @@ export function LegsTable({
                 )}
               </span>
             </Cell>
-            <Cell label="From, to" className="whitespace-nowrap text-small">
+            <Cell className="whitespace-nowrap text-small">
               <LegTimes leg={leg} />
             </Cell>
-            <Cell label="h:min" numeric>
+            <Cell className="max-desk:hidden!" numeric>
               {hourMin(leg.durationMin)}
             </Cell>
             {leg.cells.map((cell, column) => (
-              <Cell key={cell.animalId} label={animalLabel(animals[column])}>
+              <Cell
+                key={cell.animalId}
+                label={animalLabel(animals[column])}
+                className={join(animalId !== null && cell.animalId !== animalId && 'max-desk:hidden!')}
+              >
                 <LegCellFigures cell={cell} outOfDate={outOfDate} />
               </Cell>
             ))}
@@ -81,7 +89,7 @@ export function PaperLegs({
 }) {
   const groups = Array.from({ length: Math.ceil(animals.length / 3) }, (_, index) => index * 3)
   return groups.map((from) => (
-    <div key={from} className="mb-2 text-small [&_td]:!px-1.5 [&_td]:!py-1 [&_th]:!px-1.5">
+    <div key={from} className="mb-2 text-small desk:[&_td]:!px-1.5 desk:[&_td]:!py-1 desk:[&_th]:!px-1.5">
       <Ledger caption="Legs" folds>
         <thead>
           <tr>

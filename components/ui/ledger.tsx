@@ -62,18 +62,20 @@ export function Head({
 
 /**
  * A body cell; `numeric` sets figures right in Mono; `attention` is the double rule of something to be put right; `label`
- * names the cell where its table is folded.
+ * names the cell where its table is folded, and `inline` cells share a line there.
  */
 export function Cell({
   numeric = false,
   attention = false,
   label,
+  inline = false,
   className,
   ...rest
-}: { numeric?: boolean; attention?: boolean; label?: string } & ComponentProps<'td'>) {
+}: { numeric?: boolean; attention?: boolean; label?: string; inline?: boolean } & ComponentProps<'td'>) {
   return (
     <td
       data-label={label}
+      data-inline={inline || undefined}
       {...rest}
       className={join(
         'border-t border-hair px-2.5 py-[7px] align-middle',
@@ -88,12 +90,14 @@ export function Cell({
 /** The cell that names its row. */
 export function RowHead({
   attention = false,
+  inline = false,
   className,
   ...rest
-}: { attention?: boolean } & ComponentProps<'th'>) {
+}: { attention?: boolean; inline?: boolean } & ComponentProps<'th'>) {
   return (
     <th
       scope="row"
+      data-inline={inline || undefined}
       {...rest}
       className={join(
         'border-t border-hair px-2.5 py-[7px] text-left align-middle font-normal',
