@@ -65,6 +65,8 @@ export interface ChecklistLeg {
   signs: { crateLetter: string; text: string }[]
   cautions: string[]
   conditionWords: string
+  /** What the plan says of turning back, of where the animals go if the leg cannot go on, and besides. */
+  notes: { head: string; text: string }[]
   items: ChecklistItem[]
 }
 

@@ -99,6 +99,10 @@ export interface AnimalView {
   /** "snub-nosed, juvenile", or "None". */
   flagWords: string
   medicines: string
+  /** "calm, crate-trained": what the activity of the run rests on. */
+  mannerWords: string
+  /** "7 Jun 2026 by A. Vane"; empty where nobody said. */
+  examinedWords: string
   lastFed: Moment | null
   lastWatered: Moment | null
   bodyLimits: BodyLimits | null

@@ -21,6 +21,9 @@ export interface Step {
   service?: string
   delay?: readonly [typicalMin: number, worstMin: number]
   stops?: PlanLeg['stops']
+  lastPointOfReturn?: string
+  fallback?: string
+  note?: string
 }
 
 /** The legs of a journey that starts at one instant, each ending where and when the next begins. */
@@ -55,9 +58,9 @@ export function journey(start: Date, ids: PlaceIds, steps: readonly Step[]): Pla
       delayTypicalMin: step.delay?.[0] ?? offered.delayTypicalMin,
       delayWorstMin: step.delay?.[1] ?? offered.delayWorstMin,
       stops: [...(step.stops ?? [])],
-      lastPointOfReturn: '',
-      fallback: '',
-      note: '',
+      lastPointOfReturn: step.lastPointOfReturn ?? '',
+      fallback: step.fallback ?? '',
+      note: step.note ?? '',
     }
   })
 }

@@ -60,6 +60,19 @@ describe('a driver’s runs', () => {
     expect(await listRuns(place.as('otherDriver'), NOW)).toEqual([])
   })
 
+  it('tell the driver what the plan says for when a leg can’t go on, and nothing where it says nothing', async () => {
+    Object.assign(place.plan.legs[0] ?? {}, {
+      lastPointOfReturn: 'The services',
+      fallback: 'Kennels, all hours',
+    })
+    const { consignmentId } = await released(place, NOW)
+    const view = await loadRun(place.as('driver'), { consignmentId }, NOW)
+    expect(view.legs[0]?.notes).toEqual([
+      { head: 'Last point of return', text: 'The services' },
+      { head: 'If you can’t go on', text: 'Kennels, all hours' },
+    ])
+  })
+
   it('show own legs alone, with what to do and whom to ring', async () => {
     const { consignmentId } = await released(place, NOW)
     const view = await loadRun(place.as('driver'), { consignmentId }, NOW)

@@ -46,7 +46,7 @@ function animalRow(animal: AnimalView): LedgerRow {
       WIDTH.mass,
     ],
     [animal.identification === '' ? 'none given' : animal.identification, WIDTH.identification],
-    [[animal.coatWords, animal.flagWords, animal.medicines].filter(Boolean).join('. '), WIDTH.coat],
+    [healthWords(animal), WIDTH.coat],
     [fedWords(animal.lastFed, animal.lastWatered), FED],
   ]
   const lines = Math.max(
@@ -65,6 +65,12 @@ function animalRow(animal: AnimalView): LedgerRow {
       ...texts.slice(1).map(([text]) => text),
     ],
   }
+}
+
+/** "45 mm, dry. elderly. Carprofen 50 mg. Examined 7 Jun 2026 by A. Vane." */
+function healthWords({ coatWords, flagWords, medicines, examinedWords }: AnimalView): string {
+  const examined = examinedWords === '' ? '' : `Examined ${examinedWords}`
+  return [coatWords, flagWords, medicines, examined].filter(Boolean).join('. ')
 }
 
 /** "06:30, 13:10 BST", with the day where the two differ in it. */

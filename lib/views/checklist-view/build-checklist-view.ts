@@ -1,4 +1,5 @@
 import { checklistItems, ownLegs } from '@/lib/planning/checklist'
+import type { PlanLeg } from '@/lib/schemas/plan'
 import type { ConsignmentState } from '@/lib/states/consignment'
 import type { ChecklistEndurance, ChecklistLeg, ChecklistStop, ChecklistView, EntryView } from '../checklist'
 import type { CallView } from '../manifest'
@@ -82,8 +83,17 @@ function checklistLeg(leg: LegView, sheet: SheetView, facts: ChecklistFacts): Ch
       leg.conditionNumbers.length === 0
         ? ''
         : `Conditions ${leg.conditionNumbers.join(', ')} of the manifest`,
+    notes: typed === undefined ? [] : notesOf(typed),
     items: typed === undefined ? [] : checklistItems(plan, typed, facts.driver.id, ours),
   }
+}
+
+function notesOf({ lastPointOfReturn, fallback, note }: PlanLeg): ChecklistLeg['notes'] {
+  return [
+    { head: 'Last point of return', text: lastPointOfReturn },
+    { head: 'If you can’t go on', text: fallback },
+    { head: 'Note', text: note },
+  ].filter(({ text }) => text !== '')
 }
 
 function stopsOn(crate: SheetView['stopLimits'][number], legId: string, sheet: SheetView): ChecklistStop[] {

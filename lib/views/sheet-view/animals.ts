@@ -1,7 +1,7 @@
 import type { Finding } from '@/lib/rules/result'
 import type { PlanAnimal } from '@/lib/schemas/plan'
 import { resolveLocalTime } from '@/lib/planning/local-time'
-import { figure, kilograms } from '../format'
+import { dayDateYear, figure, kilograms } from '../format'
 import type { AnimalView, Moment, Stamp } from '../sheet'
 import type { Assessed } from './assessed'
 import type { ProfileFact, SheetFacts } from './facts'
@@ -60,6 +60,8 @@ function animalView(
     coatWords: coatWords(animal),
     flagWords: animal.flags.length === 0 ? 'None' : animal.flags.join(', '),
     medicines: animal.medicines,
+    mannerWords: mannerWords(animal),
+    examinedWords: examinedWords(animal),
     lastFed: momentOf(animal.lastFedLocal, firstZone),
     lastWatered: momentOf(animal.lastWateredLocal, firstZone),
     bodyLimits: profile?.limits ?? null,
@@ -181,4 +183,14 @@ function momentOf(local: string, zone: string): Moment | null {
   return time.kind === 'doubled' && time.choices[0] !== undefined
     ? { ms: time.choices[0].instantMs, zone }
     : null
+}
+
+function mannerWords({ temperament, crateTrained }: PlanAnimal): string {
+  const temper = temperament === 'unknown' ? 'temperament not known' : temperament
+  return `${temper}, ${crateTrained ? 'crate-trained' : 'not crate-trained'}`
+}
+
+function examinedWords({ examinedOn, examinedBy }: PlanAnimal): string {
+  const day = examinedOn === '' ? '' : dayDateYear(Date.parse(`${examinedOn}T12:00Z`), 'UTC')
+  return [day, examinedBy === '' ? '' : `by ${examinedBy}`].filter(Boolean).join(' ')
 }

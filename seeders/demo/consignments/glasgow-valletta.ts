@@ -97,6 +97,10 @@ export const glasgowValletta: DemoConsignment = {
           inCharge: DESK,
           ...(driverId !== undefined && { driverId }),
           stops: [{ minute: 60, kind: 'look' }],
+          lastPointOfReturn:
+            'The services before the bridge: after them there is no turning until the airport.',
+          fallback:
+            'Inverlomond Boarding, +44 141 496 0178, rung at any hour; vet on call there until 23:00.',
         },
         {
           kind: 'shed',
