@@ -117,6 +117,7 @@ function* withMargins(
     outsideAirC,
     spareMin: spare.get(animalId),
     overrideRefused: overrideRefusal(animalId, legIds, judged.side, base),
+    legs,
   })
 }
 
@@ -128,7 +129,7 @@ function planFindings(
 ): Finding[] {
   const crates = subjects.flatMap((subject) =>
     scenario.legs.flatMap((leg, index) =>
-      isAboard(subject, index) ? crateFindings(subject, leg, base) : [],
+      isAboard(subject, index) ? crateFindings(subject, leg, scenario.legs, base) : [],
     ),
   )
   const rules =

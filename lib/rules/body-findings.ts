@@ -1,8 +1,9 @@
+import type { Leg } from '@/lib/thermal'
 import { type BaseRuns, type Side, foundIn } from './base-runs'
 import type { BodyJudgement } from './body-judgement'
 import type { BodyLimit } from './body-limits'
 import type { Finding } from './result'
-import { degrees, minutes, percent, scheduleWords, signed } from './wording'
+import { degrees, minutes, percent, rowWords, scheduleWords, signed } from './wording'
 
 export interface BodyMargins {
   /** Minutes the leg could last longer; only asked for a limit that is kept. */
@@ -10,6 +11,8 @@ export interface BodyMargins {
   outsideAirC: number
   /** Why the kind of finding that could be overridden may not be. */
   overrideRefused: string | undefined
+  /** The journey, for naming its legs. */
+  legs: readonly Leg[]
 }
 
 /** A judgement of the body with its margins, as a finding. */
@@ -39,7 +42,7 @@ export function bodyFinding(judged: BodyJudgement, margins: BodyMargins): Findin
     asked: askedOf(limit, side, bound),
     note: noteOf(judged, margins),
     sourceTag: 'judgement',
-    citation: `Species row ${subject.animal.profile}, version ${subject.row.version}`,
+    citation: rowWords({ profile: subject.animal.profile, version: subject.row.version }),
     overridable: mayOverride && margins.overrideRefused === undefined,
     ...(mayOverride &&
       margins.overrideRefused !== undefined && { overrideRefusedBecause: margins.overrideRefused }),
@@ -91,7 +94,7 @@ function noteOf(judged: BodyJudgement, margins: BodyMargins): string {
     limit.kind === 'cold-effort'
       ? `Keeping warm takes up to ${percent(extremes.coldEffort.maxPct)}, body down to ${degrees(extremes.lowestCoreC)}`
       : `Body ${side === 'high' ? 'up to' : 'down to'} ${degrees(limit.value(extremes))}`
-  const where = `${variant} animal, ${scheduleWords(scheduleId)}`
+  const where = `${variant} animal, ${scheduleWords(scheduleId, margins.legs)}`
   if (status === 'breach')
     return `${figure} (${where}): ${minutes(Math.ceil(judged.minutesPast))} of the leg past the limit.`
   const air = `${signed(margins.outsideAirC, 1)} °C ${side === 'high' ? 'warmer' : 'colder'}`

@@ -3,7 +3,7 @@ import { type BaseRuns, type Found, foundIn, proneOf, worstBy } from './base-run
 import { overrideRefusal } from './body-findings'
 import type { Finding } from './result'
 import type { Subject } from './subject'
-import { degrees, percent, scheduleWords } from './wording'
+import { degrees, percent, rowWords, scheduleWords } from './wording'
 
 /** Water lost by breath and skin, % of body mass. [judgement] */
 export const WATER_LOSS_CONDITION_PCT = 5
@@ -19,23 +19,26 @@ const EFFORT_NOTE_PCT = 60
 const ZONE_EFFORT_PCT = 5
 
 /** What one leg says of one animal besides its body limits: carbon dioxide, water, the air backstop, and notes. */
-export function crateFindings(subject: Subject, leg: Leg, base: BaseRuns): Finding[] {
+export function crateFindings(subject: Subject, leg: Leg, legs: readonly Leg[], base: BaseRuns): Finding[] {
   const prone = foundIn(proneOf(base.planned), subject.animal.id, leg.id)
   const typical = foundIn(base.planned, subject.animal.id, leg.id).filter(
     ({ variant }) => variant === 'typical',
   )
   const about = { animalId: subject.animal.id, crateId: subject.crate.id, legId: leg.id }
+  const when = ({ scheduleId }: Found) => scheduleWords(scheduleId, legs)
   return [
-    ...carbonDioxide(prone, about),
-    ...waterLoss(prone, about),
-    ...airBackstop(subject, prone, about),
+    ...carbonDioxide(prone, about, when),
+    ...waterLoss(prone, about, when),
+    ...airBackstop(subject, prone, about, when),
     ...notes(typical, about),
   ].map((finding) => refusable(finding, subject, base))
 }
 
 type About = Pick<Finding, 'animalId' | 'crateId' | 'legId'>
+/** The schedule of a run in words. */
+type When = (found: Found) => string
 
-function carbonDioxide(found: readonly Found[], about: About): Finding[] {
+function carbonDioxide(found: readonly Found[], about: About, when: When): Finding[] {
   const worst = worstBy(
     found,
     ({ extremes: { co2OverMin: over, co2MaxPpm } }) =>
@@ -53,7 +56,7 @@ function carbonDioxide(found: readonly Found[], about: About): Finding[] {
     value: worst.extremes.co2MaxPpm,
     unit: 'ppm',
     sourceTag: 'judgement' as const,
-    note: `Crate air reaches ${worst.extremes.co2MaxPpm.toFixed(0)} ppm of carbon dioxide (${worst.variant} animal, ${scheduleWords(worst.scheduleId)}).`,
+    note: `Crate air reaches ${worst.extremes.co2MaxPpm.toFixed(0)} ppm of carbon dioxide (${worst.variant} animal, ${when(worst)}).`,
   }
   if (over30000 > 0)
     return [
@@ -87,7 +90,7 @@ function carbonDioxide(found: readonly Found[], about: About): Finding[] {
   ]
 }
 
-function waterLoss(found: readonly Found[], about: About): Finding[] {
+function waterLoss(found: readonly Found[], about: About, when: When): Finding[] {
   const worst = worstBy(found, ({ extremes }) => extremes.waterLossPctMass)
   if (worst === undefined) return []
   const value = worst.extremes.waterLossPctMass
@@ -107,7 +110,7 @@ function waterLoss(found: readonly Found[], about: About): Finding[] {
       value,
       unit: '% of mass',
       asked: `Water lost under ${percent(limit)} of body mass.`,
-      note: `Loses ${value.toFixed(1)} % of its mass as water by the end of the leg (${worst.variant} animal, ${scheduleWords(worst.scheduleId)}).`,
+      note: `Loses ${value.toFixed(1)} % of its mass as water by the end of the leg (${worst.variant} animal, ${when(worst)}).`,
       sourceTag: 'judgement',
       overridable: status === 'breach',
     },
@@ -119,6 +122,7 @@ function airBackstop(
   { airLowC, airHighC, row, animal }: Subject,
   found: readonly Found[],
   about: About,
+  when: When,
 ): Finding[] {
   const hottest = worstBy(found, ({ extremes }) => extremes.crateAirMaxC)
   const coldest = worstBy(found, ({ extremes }) => -extremes.crateAirMinC)
@@ -135,8 +139,8 @@ function airBackstop(
     value,
     unit: '°C',
     asked: `Crate air ${side === 'high' ? 'at most' : 'at least'} ${degrees(limit)} at any time.`,
-    note: `Crate air ${side === 'high' ? 'up to' : 'down to'} ${degrees(value)} (${scheduleWords(at.scheduleId)}).`,
-    citation: `Species row ${animal.profile}, version ${row.version}, or the limit the house put in its place`,
+    note: `Crate air ${side === 'high' ? 'up to' : 'down to'} ${degrees(value)} (${when(at)}).`,
+    citation: `${rowWords({ profile: animal.profile, version: row.version })}, or the limit the house put in its place`,
     sourceTag: 'judgement',
     overridable: true,
   })

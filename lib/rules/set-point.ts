@@ -20,7 +20,7 @@ export function setPointFindings(scenario: Scenario, base: BaseRuns): Finding[] 
     if (machine === undefined) return []
     return drivenSides(machine).flatMap((side) => {
       const worst = furthest(leg, index, side, machine.setPointC, base)
-      return worst === undefined ? [] : [notHeld(leg, side, machine.setPointC, worst)]
+      return worst === undefined ? [] : [notHeld(scenario, leg, side, machine.setPointC, worst)]
     })
   })
 }
@@ -68,7 +68,13 @@ function furthest(
   return worst !== undefined && worst.pastC > HELD_WITHIN_C ? worst : undefined
 }
 
-function notHeld(leg: Leg, side: Side, setPointC: number, { tempC, scheduleId }: Furthest): Finding {
+function notHeld(
+  { legs }: Scenario,
+  leg: Leg,
+  side: Side,
+  setPointC: number,
+  { tempC, scheduleId }: Furthest,
+): Finding {
   const way = side === 'high' ? 'up to' : 'down to'
   return {
     rule: 'set-point-not-held',
@@ -81,7 +87,7 @@ function notHeld(leg: Leg, side: Side, setPointC: number, { tempC, scheduleId }:
     value: tempC,
     unit: '°C',
     asked: `Air of the space ${side === 'high' ? 'cooled' : 'heated'} to ${degrees(setPointC)}.`,
-    note: `The machine does not hold its set-point: computed air ${way} ${degrees(tempC)} after the first ${minutes(PULL_DOWN_MIN)} (${scheduleWords(scheduleId)}).`,
+    note: `The machine does not hold its set-point: computed air ${way} ${degrees(tempC)} after the first ${minutes(PULL_DOWN_MIN)} (${scheduleWords(scheduleId, legs)}).`,
     sourceTag: 'judgement',
     overridable: false,
   }

@@ -22,7 +22,7 @@ function subjectOf() {
 }
 
 const statusOf = (rule: string, heat: Partial<LegExtremes>) =>
-  crateFindings(subjectOf(), leg, baseRuns({ heat })).find((finding) => finding.rule === rule)
+  crateFindings(subjectOf(), leg, [leg], baseRuns({ heat })).find((finding) => finding.rule === rule)
 
 describe('carbon dioxide', () => {
   const over = (over5000: number, over15000 = 0, over30000 = 0) =>
@@ -168,7 +168,7 @@ describe('who may not override', () => {
   it('and a finding without a side is refused by either', () => {
     const heat = { waterLossPctMass: 9 }
     const at = (base: ReturnType<typeof baseRuns>) =>
-      crateFindings(subjectOf(), leg, base).find(({ rule }) => rule === 'water-loss')
+      crateFindings(subjectOf(), leg, [leg], base).find(({ rule }) => rule === 'water-loss')
     expect(at(baseRuns({ heat }))).toMatchObject({ status: 'breach', overridable: true })
     expect(at(baseRuns({ heat, colder: { crossedMin: { criticalLow: 90 } } }))).toMatchObject({
       overridable: false,
@@ -183,7 +183,7 @@ describe('notes', () => {
       crateHumidityMaxPct: 71,
       heatEffort: { maxPct: 60, maxMin: 5, longestOver40Min: 0, longestOver60Min: 0 },
     }
-    const notes = crateFindings(subjectOf(), leg, baseRuns({ typical })).filter(
+    const notes = crateFindings(subjectOf(), leg, [leg], baseRuns({ typical })).filter(
       ({ status }) => status === 'note',
     )
     expect(notes.map(({ rule }) => rule).sort()).toEqual(['heat-effort', 'humidity', 'thermoneutral-zone'])
@@ -193,6 +193,7 @@ describe('notes', () => {
     const notes = crateFindings(
       subjectOf(),
       leg,
+      [leg],
       baseRuns({
         typical: {
           crateHumidityMaxPct: 70,

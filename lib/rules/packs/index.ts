@@ -1,6 +1,6 @@
 import type { Finding } from '../result'
 import { isAboard } from '../subject'
-import { list } from '../wording'
+import { list, speciesWords } from '../wording'
 import { type LawView, type RulePack, legsUnder } from './pack'
 import { EU_PACK, GB_PACK } from './eu-1-2005'
 import { US_9CFR_3 } from './us-9cfr-3'
@@ -49,9 +49,4 @@ function silentSpecies(view: LawView): Finding[] {
       note: `${pack.title} is held here for ${list(pack.profiles.map(speciesWords))} only, not for ${list(profiles.map(speciesWords))}: ask the authority.`,
     }))
   })
-}
-
-/** "snub-nosed dog": a key is for the engine, never for people. */
-function speciesWords(profile: string): string {
-  return profile.replace(/-(?=[^-]*$)/, ' ')
 }

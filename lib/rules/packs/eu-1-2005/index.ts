@@ -120,7 +120,7 @@ function interval(
     value: gapMin,
     scheduleId,
     ...(breached && { minute: fromMin + everyMin }),
-    note: `Longest without ${what}: ${minutes(Math.ceil(gapMin))}, ${scheduleWords(scheduleId)}.`,
+    note: `Longest without ${what}: ${minutes(Math.ceil(gapMin))}, ${scheduleWords(scheduleId, view.scenario.legs)}.`,
   })
 }
 

@@ -39,6 +39,6 @@ function interval(view: LawView, subject: Subject, what: 'food' | 'water', every
     value: gapMin,
     scheduleId,
     ...(breached && { minute: fromMin + everyMin }),
-    note: `Longest without ${what}: ${minutes(Math.ceil(gapMin))}, ${scheduleWords(scheduleId)}.`,
+    note: `Longest without ${what}: ${minutes(Math.ceil(gapMin))}, ${scheduleWords(scheduleId, view.scenario.legs)}.`,
   })
 }

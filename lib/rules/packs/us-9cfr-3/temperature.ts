@@ -89,7 +89,7 @@ function readLeg(
   const either = spansBeyond(points, side, looseC)
   const asked = `Air outside the crate ${side === 'high' ? 'not above' : 'not below'} ${fahrenheit(limit.f)} for more than ${minutes(rule.clockMin)}${limit.acclimated ? ', as the acclimation certificate states' : ''}.`
   const shared = { scheduleId, limit: limit.f, value: valueF, unit: '°F', asked }
-  const heat = `${fahrenheit(valueF)} outside the crate, ${scheduleWords(scheduleId)}`
+  const heat = `${fahrenheit(valueF)} outside the crate, ${scheduleWords(scheduleId, view.scenario.legs)}`
   const over = longestBy(both, fromMin, toMin)
   if (over > rule.clockMin + TOLERANCE_MIN)
     return {
