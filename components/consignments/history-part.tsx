@@ -1,30 +1,7 @@
 import { Cell, Head, Ledger } from '@/components/ui/ledger'
 import type { HistoryLine } from '@/lib/views/desk-page'
 import { dayDate, localTime } from '@/lib/views/format'
-
-const VERB_WORDS: Record<string, string> = {
-  'consignment.create': 'Began the consignment',
-  'consignment.save': 'Saved the plan',
-  'consignment.assess': 'Asked for an assessment',
-  'assessment.record': 'Assessed',
-  'assessment.fail': 'The assessment stopped',
-  'consignment.submit': 'Sent it to the vet',
-  'approval.approve': 'Signed',
-  'approval.return': 'Returned it',
-  'approval.withdraw': 'Withdrew an approval',
-  'consignment.release': 'Asked for the release',
-  'consignment.released': 'Released',
-  'consignment.depart': 'Departed',
-  'consignment.deliver': 'Delivered',
-  'consignment.stop': 'Broke the journey off',
-  'consignment.cancel': 'Cancelled',
-  'consignment.confirm-air': 'Said that the air still holds',
-  'consignment.confirm-condition': 'Wrote down an answer to a condition',
-  'consignment.record-instruction': 'Wrote down an instruction',
-  'consignment.acknowledge': 'Acknowledged',
-  'consignment.ask-change': 'Asked for a change',
-  'document.download': 'Opened a paper',
-}
+import { verbWords } from './history-words'
 
 /** Lines that stand open; older ones fold away. */
 const NEWEST = 8
@@ -99,10 +76,4 @@ function HistoryTable({ caption, runs }: { caption: string; runs: readonly Run[]
       </tbody>
     </Ledger>
   )
-}
-
-function verbWords({ verb, refused }: HistoryLine): string {
-  const plain = verb.replace(/\.refused$/, '')
-  const words = VERB_WORDS[plain] ?? plain.replace('.', ', ').replaceAll('-', ' ')
-  return refused ? `Refused: ${words.charAt(0).toLowerCase()}${words.slice(1)}` : words
 }

@@ -1,11 +1,13 @@
 import { beforeEach, describe, expect, it } from 'vitest'
 import { approveCrates } from '@/lib/domain/approvals/approve'
+import { approvalLines } from '@/lib/domain/approvals/lines'
 import { loadReview } from '@/lib/domain/approvals/load-review'
 import { reviewQueue } from '@/lib/domain/approvals/queue'
 import { returnCrates } from '@/lib/domain/approvals/return'
 import { withdrawApproval } from '@/lib/domain/approvals/withdraw'
 import { recordAssessment } from '@/lib/domain/assessments/record'
 import { assessConsignment } from '@/lib/domain/consignments/assess'
+import { saveConsignment } from '@/lib/domain/consignments/save'
 import { submitConsignment } from '@/lib/domain/consignments/submit'
 import { models } from '@/models'
 import { emptyTables } from '../support/db'
@@ -269,6 +271,20 @@ describe('returning and withdrawing', () => {
 })
 
 describe('what the vet sees', () => {
+  it('calls a decision by the mark it was signed under, whatever the plan calls the crate since', async () => {
+    const { consignmentId, mark, version } = await inReview(place, NOW)
+    await approveCrates(place.as('vet'), await signature(place, consignmentId), NOW)
+    const plan = structuredClone(place.plan)
+    plan.crates.forEach((crate) => (crate.letter = crate.letter === 'A' ? 'X' : 'Y'))
+    plan.crates.pop()
+    plan.animals.pop()
+    await saveConsignment(place.as('dispatcher'), { ...act(), consignmentId, version, plan }, later(5))
+    const lines = await approvalLines(await load(consignmentId))
+    expect(lines.map(({ crateMark }) => crateMark)).toEqual([`${mark}-B`, `${mark}-A`])
+    const view = await loadReview(place.as('vet'), { consignmentId, crateId: null }, NOW)
+    expect(view.voided.map(({ crateMarks }) => crateMarks)).toEqual([[`${mark}-B`], [`${mark}-A`]])
+  })
+
   it('lists crate set-ups that wait, and opens one with who may sign', async () => {
     const { consignmentId, mark } = await inReview(place, NOW)
     const queue = await reviewQueue(place.as('vet'), NOW)

@@ -3,6 +3,7 @@ import type { ApprovalLine } from '@/lib/views/desk-page'
 import { models } from '@/models'
 import type { Approval, Consignment } from '@/models'
 import { deskMoment } from '../firm'
+import { signedMarks } from './signed-marks'
 
 /** Every decision of a vet on this consignment, newest first, with what became of it and why. */
 export async function approvalLines(row: Consignment): Promise<ApprovalLine[]> {
@@ -10,16 +11,11 @@ export async function approvalLines(row: Consignment): Promise<ApprovalLine[]> {
     where: { consignmentId: row.id },
     order: [['id', 'DESC']],
   })
-  const crates = await models.Crate.findAll({
-    where: { consignmentId: row.id },
-    attributes: ['ref', 'letter'],
-  })
-  const letters = new Map(crates.map(({ ref, letter }) => [ref, letter]))
+  const marks = await signedMarks(approvals)
   return approvals.map((approval) => ({
     approvalId: approval.id,
     revision: approval.revision,
-    // A crate taken out of the plan since keeps the name it was signed under.
-    crateMark: `${row.mark}-${letters.get(approval.crateRef) ?? approval.crateRef}`,
+    crateMark: marks.get(approval.id) ?? '',
     decision: approval.decision,
     signerName: approval.signerName,
     registration: `${approval.registrationNumber}, ${approval.registrationCountry}`,

@@ -11,6 +11,7 @@ import { authorize } from '../authorize'
 import { sheetFacts } from '../consignments/sheet-facts'
 import { findConsignment } from '../consignments/visible'
 import { FIRM_ZONE } from '../firm'
+import { signedMarks } from './signed-marks'
 import { registrationTrouble } from './signer'
 
 /** One crate set-up under review, with the pictures, the findings and everything signed before. */
@@ -22,11 +23,12 @@ export async function loadReview(
   authorize(actor, 'approval.queue')
   const { row } = await findConsignment(actor, consignmentId)
   const approvals = await models.Approval.findAll({ where: { consignmentId }, order: ['id'] })
+  const marks = await signedMarks(approvals)
   const view = buildReviewView({
     sheet: await sheetFacts(row, { which: 'working', tracks: true, now }),
     chosenCrateId: crateId,
     signer: await signerView(actor, now),
-    decisions: approvals.map(decisionFact),
+    decisions: approvals.map((approval) => decisionFact(approval, marks.get(approval.id) ?? '')),
     travelling: row.inForceState !== null && row.inForceState !== 'released',
   })
   if (view === null) throw new SteadfoldError('not_found', 'This consignment has no crate.')
@@ -54,11 +56,12 @@ async function signerView(actor: Actor, now: Date): Promise<SignerView> {
   }
 }
 
-function decisionFact(approval: Approval): DecisionFact {
+function decisionFact(approval: Approval, crateMark: string): DecisionFact {
   return {
     approvalId: approval.id,
     revision: approval.revision,
     crateId: approval.crateRef,
+    crateMark,
     decision: approval.decision,
     statement: approval.statement,
     reasons: approval.reasons,

@@ -1,10 +1,10 @@
 import 'server-only'
 import { Op } from 'sequelize'
 import type { Transaction } from 'sequelize'
-import { crateMark } from '@/lib/planning/crate-mark'
 import { models } from '@/models'
 import type { Approval, Consignment } from '@/models'
 import { mailApprovalsVoid } from '../mail/work-mails'
+import { signedMarks } from './signed-marks'
 
 /** What ended an approval, as its row and its mails say it. */
 export interface Ending {
@@ -19,7 +19,7 @@ export interface Ending {
   withdrawn?: { byId: number; reason: string }
 }
 
-/** Ends approvals that stand, and tells their vets and the desk by mail. Call it before the crates' rows change. */
+/** Ends approvals that stand, and tells their vets and the desk by mail. */
 export async function voidApprovals(
   tx: Transaction,
   row: Consignment,
@@ -30,11 +30,8 @@ export async function voidApprovals(
     { voidedAt: at, voidedReason: voidedReason.slice(0, 500), withdrawn: withdrawn !== undefined },
     { where: { id: approvals.map(({ id }) => id), voidedAt: null }, transaction: tx },
   )
-  const marks = await crateMarks(tx, row)
-  const ended = approvals.map(({ signerId, crateRef }) => ({
-    signerId,
-    crateMark: marks.get(crateRef) ?? crateMark(row.mark, crateRef),
-  }))
+  const marks = await signedMarks(approvals, tx)
+  const ended = approvals.map(({ id, signerId }) => ({ signerId, crateMark: marks.get(id) ?? '' }))
   const reason = withdrawn?.reason ?? ''
   await mailApprovalsVoid(tx, row, ended, { now: at, key, because, reason, byId: withdrawn?.byId ?? null })
 }
@@ -46,13 +43,4 @@ export function standingApprovals(tx: Transaction, { id, revision }: Consignment
     order: ['id'],
     transaction: tx,
   })
-}
-
-async function crateMarks(tx: Transaction, { id, mark }: Consignment): Promise<Map<string, string>> {
-  const crates = await models.Crate.findAll({
-    where: { consignmentId: id },
-    attributes: ['ref', 'letter'],
-    transaction: tx,
-  })
-  return new Map(crates.map(({ ref, letter }) => [ref, crateMark(mark, letter)]))
 }

@@ -11,6 +11,8 @@ export interface DecisionFact {
   approvalId: number
   revision: number
   crateId: string
+  /** As it was signed, whatever the plan calls it since. */
+  crateMark: string
   decision: SignedApproval['decision']
   statement: string
   reasons: string
@@ -84,14 +86,13 @@ function signedApproval(
   sheet: SheetView,
 ): SignedApproval {
   const zone = facts.firm.zone
-  const letter = facts.plan.crates.find(({ id }) => id === fact.crateId)?.letter ?? '?'
   const overrides = sheet.overrides.filter(
     ({ vetName, signedAt }) => vetName === fact.signerName && signedAt.ms === fact.signedAtMs,
   )
   return {
     approvalId: fact.approvalId,
     revision: fact.revision,
-    crateMarks: [crateMark(facts.consignment.mark, letter)],
+    crateMarks: [fact.crateMark],
     decision: fact.decision,
     meaning: meaningOf(fact),
     statement: fact.statement,
