@@ -60,6 +60,11 @@ const config = [
     },
   },
   {
+    // The type checker sees no .mjs file.
+    files: ['**/*.mjs'],
+    rules: { 'no-undef': 'error' },
+  },
+  {
     files: ['lib/thermal/**', 'lib/rules/**', 'lib/planning/**', 'lib/species/**'],
     rules: {
       'no-restricted-globals': ['error', 'process', 'fetch', 'setTimeout', 'window', 'document'],

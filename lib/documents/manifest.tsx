@@ -1,11 +1,10 @@
-import { Document } from '@react-pdf/renderer'
 import { dayDate, dayDateYear, duration, localTimeWithOffset } from '@/lib/views/format'
 import type { ManifestView } from '@/lib/views/manifest'
 import { printedCode } from './code'
-import { type Block, flow } from './flow'
+import type { Block } from './flow'
 import { factsHeight, Facts } from './parts/facts'
-import { madeWords } from './parts/made-words'
-import { CONTENT_WIDTH, Paper, roomOn } from './parts/paper'
+import { CONTENT_WIDTH } from './parts/paper'
+import { sheetsOf } from './parts/sheets'
 import { stampRow } from './parts/stamp-row'
 import { callTable, handlingList, handoverTable } from './manifest/acts'
 import { animalTable } from './manifest/animal-table'
@@ -20,37 +19,10 @@ const TITLE = 'Manifest'
 
 /** The manifest as a document, and how many sheets were planned. Facts come first; the acts begin on a sheet of their own. */
 export function manifest(view: ManifestView, slack = 1) {
-  const sheets = flow(blocksOf(view), (sheet) => roomOn(sheet) * slack)
+  const { mark, revision, revisionWords, edgeWords, firm, made } = view
   const code = printedCode(view.documentCode)
-  const document = (
-    <Document
-      title={`${view.mark} manifest, revision ${view.revision}`}
-      author={view.firm.name}
-      subject={TITLE}
-      keywords={`Document code ${code}`}
-      creator="Steadfold"
-      producer="Steadfold"
-      language="en-GB"
-    >
-      {sheets.map((children, index) => (
-        <Paper
-          key={index}
-          mark={view.mark}
-          title={TITLE}
-          revision={view.revision}
-          revisionWords={view.revisionWords}
-          edgeWords={view.edgeWords}
-          code={code}
-          madeWords={madeWords(view.made)}
-          sheet={index + 1}
-          sheets={sheets.length}
-        >
-          {children}
-        </Paper>
-      ))}
-    </Document>
-  )
-  return { document, sheets: sheets.length }
+  const head = { title: TITLE, mark, revision, revisionWords, edgeWords, code, firmName: firm.name, made }
+  return sheetsOf(head, blocksOf(view), slack)
 }
 
 function blocksOf(view: ManifestView): Block[] {

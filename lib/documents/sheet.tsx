@@ -1,11 +1,10 @@
-import { Document } from '@react-pdf/renderer'
 import { dayDate, duration, localTime, localTimeWithOffset } from '@/lib/views/format'
 import type { SheetView } from '@/lib/views/sheet'
 import { printedCode } from './code'
-import { type Block, flow } from './flow'
+import type { Block } from './flow'
 import { Facts, factsHeight } from './parts/facts'
-import { madeWords } from './parts/made-words'
-import { CONTENT_WIDTH, Paper, roomOn } from './parts/paper'
+import { CONTENT_WIDTH } from './parts/paper'
+import { sheetsOf } from './parts/sheets'
 import { stampRow } from './parts/stamp-row'
 import { animalBoxes } from './sheet/animal-boxes'
 import { conditionTable } from './sheet/condition-table'
@@ -20,37 +19,10 @@ const TITLE = 'Go/no-go sheet'
 
 /** The go/no-go sheet as a document, and how many sheets were planned. `slack` under 1 plans less on each sheet. */
 export function goNoGoSheet(view: SheetView, slack = 1) {
-  const sheets = flow(blocksOf(view), (sheet) => roomOn(sheet) * slack)
+  const { mark, revision, revisionWords, edgeWords, firm, made } = view
   const code = view.documentCode === null ? 'none' : printedCode(view.documentCode)
-  const document = (
-    <Document
-      title={`${view.mark} ${TITLE.toLowerCase()}, revision ${view.revision}`}
-      author={view.firm.name}
-      subject={TITLE}
-      keywords={view.documentCode === null ? '' : `Document code ${code}`}
-      creator="Steadfold"
-      producer="Steadfold"
-      language="en-GB"
-    >
-      {sheets.map((children, index) => (
-        <Paper
-          key={index}
-          mark={view.mark}
-          title={TITLE}
-          revision={view.revision}
-          revisionWords={view.revisionWords}
-          edgeWords={view.edgeWords}
-          code={code}
-          madeWords={madeWords(view.made)}
-          sheet={index + 1}
-          sheets={sheets.length}
-        >
-          {children}
-        </Paper>
-      ))}
-    </Document>
-  )
-  return { document, sheets: sheets.length }
+  const head = { title: TITLE, mark, revision, revisionWords, edgeWords, code, firmName: firm.name, made }
+  return sheetsOf(head, blocksOf(view), slack)
 }
 
 function blocksOf(view: SheetView): Block[] {

@@ -1,7 +1,7 @@
 import { animal, crate, slatted } from '../animals'
 import { journey, outside, van } from '../journey'
 import type { DemoConsignment } from './common'
-import { dateIn, DESK, hoursFrom, localAt } from './common'
+import { dateIn, DESK, hoursFrom, localAt, HALLMYRE, MOSS_END } from './common'
 
 const large = [92, 61, 68] as const
 
@@ -16,18 +16,8 @@ export const collieHome: DemoConsignment = {
     return {
       shipperId: shippers['0412'] ?? 0,
       purpose: 'private',
-      consignor: {
-        name: 'Hallmyre Kennels and Stables',
-        address: 'Hallmyre, Peebles',
-        telephone: '+44 141 496 0211',
-        email: 'yard@hallmyre.example',
-      },
-      consignee: {
-        name: 'Moss End Kennels',
-        address: '3 Mill Brae, Balfron',
-        telephone: '+44 141 496 0207',
-        email: 'kennels@moss-end.example',
-      },
+      consignor: HALLMYRE,
+      consignee: MOSS_END,
       emergencyContact: { name: 'Jorun Strand-Ekdahl', telephone: '+44 7700 900562' },
       handlingNote: '',
       animals: [

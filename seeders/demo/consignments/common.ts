@@ -58,3 +58,17 @@ export const DUNMUIR = ['Dunmuir Freight Handling', '+44 141 496 0315'] as const
 export const SKERROW = ['Skerrow Air Cargo', '+44 141 496 0342'] as const
 export const QURM = ['Qurm Ground Handling', '+44 7700 900166'] as const
 export const SALINA = ['Salina Bay Handling', '+44 7700 900266'] as const
+
+/* Two parties that most of the invented journeys run between. */
+export const MOSS_END = {
+  name: 'Moss End Kennels',
+  address: '3 Mill Brae, Balfron',
+  telephone: '+44 141 496 0207',
+  email: 'kennels@moss-end.example',
+}
+export const HALLMYRE = {
+  name: 'Hallmyre Kennels and Stables',
+  address: 'Hallmyre, Peebles',
+  telephone: '+44 141 496 0211',
+  email: 'yard@hallmyre.example',
+}

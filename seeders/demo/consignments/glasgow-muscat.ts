@@ -1,7 +1,7 @@
 import { animal, crate, slatted } from '../animals'
 import { held, holdShut, journey, outside, van } from '../journey'
 import type { DemoConsignment } from './common'
-import { dateIn, dayAt, DESK, DUNMUIR, localAt, QURM, SKERROW } from './common'
+import { dateIn, dayAt, DESK, DUNMUIR, localAt, QURM, SKERROW, MOSS_END } from './common'
 
 const small = [66, 46, 51] as const
 const large = [92, 61, 68] as const
@@ -25,12 +25,7 @@ export const glasgowMuscat: DemoConsignment = {
     return {
       shipperId: shippers['0412'] ?? 0,
       purpose: 'commercial',
-      consignor: {
-        name: 'Moss End Kennels',
-        address: '3 Mill Brae, Balfron',
-        telephone: '+44 141 496 0207',
-        email: 'kennels@moss-end.example',
-      },
+      consignor: MOSS_END,
       consignee: {
         name: 'Wadi Sahm Sanctuary',
         address: 'Wadi Sahm, Ad Dakhiliyah',

@@ -1,7 +1,7 @@
 import { animal, crate, slatted } from '../animals'
 import { held, holdShut, journey, outside, van } from '../journey'
 import type { DemoConsignment } from './common'
-import { dateIn, DESK, DUNMUIR, hoursFrom, localAt, SALINA, SKERROW } from './common'
+import { dateIn, DESK, DUNMUIR, hoursFrom, localAt, SALINA, SKERROW, MOSS_END } from './common'
 
 const large = [92, 61, 68] as const
 const low = [56, 40, 41] as const
@@ -24,12 +24,7 @@ export const glasgowValletta: DemoConsignment = {
     return {
       shipperId: shippers['0412'] ?? 0,
       purpose: 'commercial',
-      consignor: {
-        name: 'Moss End Kennels',
-        address: '3 Mill Brae, Balfron',
-        telephone: '+44 141 496 0207',
-        email: 'kennels@moss-end.example',
-      },
+      consignor: MOSS_END,
       consignee: {
         name: 'Bajja House Boarding',
         address: '11 Triq il-Qroll, Marsaxlokk',

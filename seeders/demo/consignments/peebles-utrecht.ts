@@ -1,7 +1,7 @@
 import { animal, crate } from '../animals'
 import { journey, outside, van } from '../journey'
 import type { DemoConsignment } from './common'
-import { dateIn, DESK, hoursFrom, localAt } from './common'
+import { dateIn, DESK, hoursFrom, localAt, HALLMYRE } from './common'
 
 const stall = [240, 90, 230] as const
 
@@ -24,12 +24,7 @@ export const peeblesUtrecht: DemoConsignment = {
     return {
       shipperId: shippers['0431'] ?? 0,
       purpose: 'commercial',
-      consignor: {
-        name: 'Hallmyre Kennels and Stables',
-        address: 'Hallmyre, Peebles',
-        telephone: '+44 141 496 0211',
-        email: 'yard@hallmyre.example',
-      },
+      consignor: HALLMYRE,
       consignee: {
         name: 'Weidehof stables',
         address: 'Weidelaan 12, Utrecht',

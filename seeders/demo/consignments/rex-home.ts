@@ -1,7 +1,7 @@
 import { animal, crate, slatted } from '../animals'
 import { journey, outside, van } from '../journey'
 import type { DemoConsignment } from './common'
-import { dateIn, dayAt, DESK, localAt } from './common'
+import { dateIn, dayAt, DESK, localAt, HALLMYRE, MOSS_END } from './common'
 
 const low = [56, 40, 41] as const
 
@@ -19,18 +19,8 @@ export const rexHome: DemoConsignment = {
     return {
       shipperId: shippers['0431'] ?? 0,
       purpose: 'private',
-      consignor: {
-        name: 'Moss End Kennels',
-        address: '3 Mill Brae, Balfron',
-        telephone: '+44 141 496 0207',
-        email: 'kennels@moss-end.example',
-      },
-      consignee: {
-        name: 'Hallmyre Kennels and Stables',
-        address: 'Hallmyre, Peebles',
-        telephone: '+44 141 496 0211',
-        email: 'yard@hallmyre.example',
-      },
+      consignor: MOSS_END,
+      consignee: HALLMYRE,
       emergencyContact: { name: 'Matteo Ferrand-Ito', telephone: '+44 7700 900633' },
       handlingNote: 'Travels in his own fleece.',
       animals: [
