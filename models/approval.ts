@@ -40,6 +40,8 @@ export class Approval extends Model<InferAttributes<Approval>, InferCreationAttr
   declare assessmentId: number
   declare decision: ApprovalDecision
   declare conditions: ApprovalCondition[]
+  /** Signs the driver is told to ring for. */
+  declare earlySigns: CreationOptional<string[]>
   declare reasons: CreationOptional<string>
   declare examined: boolean
   declare statement: string
@@ -67,6 +69,7 @@ export function initApproval(sequelize: Sequelize): typeof Approval {
       assessmentId: link(),
       decision: oneOf(APPROVAL_DECISIONS),
       conditions: json('conditions', z.array(vetConditionSchema)),
+      earlySigns: withDefault(json('earlySigns', z.array(z.string())), []),
       reasons: withDefault(text(2000), ''),
       examined: yesNo(),
       statement: longText(),

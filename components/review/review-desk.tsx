@@ -7,6 +7,7 @@ import { useActionForm } from '@/components/hooks/use-action-form'
 import type { ActionResult } from '@/lib/errors'
 import type { ApproveCrates, ReturnCrates } from '@/lib/schemas/approval'
 import type { ReviewCrate, ReviewView } from '@/lib/views/review'
+import { EarlySigns } from './early-signs'
 import { DecisionPart } from './decision-part'
 import { FindingsPart } from './findings-part'
 import { approvalOf, returnOf, reviewFormSchema } from './review-form-schema'
@@ -48,6 +49,9 @@ export function ReviewDesk({
       crateIds: [chosen.crateId],
       overrides: findings.map(() => ({ on: false, reason: '' })),
       conditions: [],
+      signs: crates.flatMap(({ crateId, earlySigns }) =>
+        earlySigns.map((text) => ({ on: true, crateId, text })),
+      ),
       reasons: '',
       examined: '',
       password: '',
@@ -84,6 +88,11 @@ export function ReviewDesk({
           form={state}
           conditions={sheet.conditions}
           legs={sheet.legs}
+          closed={view.closedWords !== ''}
+        />
+        <EarlySigns
+          form={state}
+          crates={crates.filter((crate) => crateIds.includes(crate.crateId))}
           closed={view.closedWords !== ''}
         />
         <DecisionPart form={state} view={view} findings={covered} all={findings} />

@@ -10,6 +10,7 @@ export const DECISIONS = ['approve', 'return'] as const
 export type Decision = (typeof DECISIONS)[number]
 
 const overrideRowSchema = z.object({ on: z.boolean(), reason: z.string() })
+const signRowSchema = z.object({ on: z.boolean(), crateId: z.string(), text: z.string().max(200) })
 const conditionRowSchema = vetConditionSchema.extend({ legId: z.string() })
 
 /**
@@ -22,6 +23,7 @@ export const reviewFormSchema = z
     crateIds: z.array(itemId).min(1, { error: 'Crates: choose at least one.' }),
     overrides: z.array(overrideRowSchema),
     conditions: z.array(conditionRowSchema),
+    signs: z.array(signRowSchema),
     reasons: z.string(),
     examined: z.string(),
     password: z.string(),
@@ -61,6 +63,9 @@ export function approvalOf(values: ReviewForm, subject: ReviewSubject, requestId
     password: values.password,
     examined: values.examined === 'yes',
     conditions: values.conditions.map((row) => ({ ...row, legId: row.legId === '' ? null : row.legId })),
+    earlySigns: values.signs
+      .filter(({ on, crateId, text }) => on && text.trim() !== '' && values.crateIds.includes(crateId))
+      .map(({ crateId, text }) => ({ crateId, text: text.trim() })),
     overrides: chosenOverrides(values, subject.findings).flatMap(({ finding, reason }) =>
       concernedIndexes(finding, subject.coverage, values.crateIds).map((findingIndex) => ({
         findingIndex,

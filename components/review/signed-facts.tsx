@@ -31,6 +31,11 @@ export function SignedFacts({ approval, act }: { approval: SignedApproval; act?:
           {approval.statement}
           {approval.reasons && <span className="mt-1 block font-semibold">{approval.reasons}</span>}
         </Fact>
+        {approval.earlySigns.length > 0 && (
+          <Fact caption="The driver rings at" whole className="desk:col-span-2">
+            {approval.earlySigns.join('. ')}.
+          </Fact>
+        )}
         {approval.overrides.map((override) => (
           <Fact key={override.findingIndex} caption="Overridden by name" whole className="desk:col-span-2">
             <b>{override.findingWords}.</b> {override.reason}

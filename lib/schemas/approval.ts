@@ -13,6 +13,9 @@ export const vetConditionSchema = z.object({
   party: text('Asked of', 120),
 })
 
+/** What the driver is told to ring for, chosen by the vet for a crate. */
+export const earlySignSchema = z.object({ crateId: itemId, text: requiredText('Early sign', 200) })
+
 /** Overriding names one finding of the assessment by its place in it, and says why. */
 export const overrideSchema = z.object({
   findingIndex: z.number().int().nonnegative(),
@@ -29,6 +32,7 @@ export const approveSchema = consignmentActSchema.extend({
   password: typedPassword,
   examined: z.boolean(),
   conditions: z.array(vetConditionSchema).max(30, { error: 'Conditions: put at most 30.' }),
+  earlySigns: z.array(earlySignSchema).max(80, { error: 'Early signs: put at most 80.' }).optional(),
   overrides: z.array(overrideSchema).max(60, { error: 'Overrides: put at most 60.' }),
 })
 export type ApproveCrates = z.infer<typeof approveSchema>

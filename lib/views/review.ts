@@ -47,6 +47,8 @@ export interface ReviewCrate {
   animals: AnimalView[]
   stamp: Stamp
   decision: ReviewQueueRow['decision']
+  /** Signs offered for the species in it. */
+  earlySigns: string[]
 }
 
 /** Who would sign, from the record an admin checked. */
@@ -81,6 +83,8 @@ export interface SignedApproval {
   voidedReason: string
   withdrawn: boolean
   overrides: OverrideView[]
+  /** What the driver is told to ring for. */
+  earlySigns: string[]
   /** True while the signer, or another vet, may take it back. */
   withdrawable: boolean
 }

@@ -5,9 +5,11 @@ import { answerCondition } from '@/lib/domain/consignments/answer-condition'
 import { assessConsignment } from '@/lib/domain/consignments/assess'
 import { createConsignment } from '@/lib/domain/consignments/create'
 import { deliverConsignment, departConsignment } from '@/lib/domain/consignments/depart'
+import { readPlan } from '@/lib/domain/consignments/read-plan'
 import { submitConsignment } from '@/lib/domain/consignments/submit'
 import { releaseConsignment } from '@/lib/domain/release/release'
 import type { Actor } from '@/lib/policies/actor'
+import { earlySignsOf } from '@/lib/species/early-signs'
 import { runNextJob } from '@/lib/workers/run-job'
 import { plainAssessor } from '@/lib/workers/assessor'
 import { models } from '@/models'
@@ -102,9 +104,21 @@ async function decide(demo: DemoConsignment, world: DemoWorld, consignmentId: nu
         legId: null,
         party: 'Corran Animal Couriers',
       })),
+      earlySigns: await offeredSigns(consignmentId),
       overrides: [],
     },
     at,
+  )
+}
+
+/** The demo's vet keeps every sign that is offered. */
+async function offeredSigns(consignmentId: number) {
+  const row = await models.Consignment.findByPk(consignmentId, { rejectOnEmpty: true })
+  const plan = await readPlan(row)
+  return plan.crates.flatMap(({ id, occupants }) =>
+    plan.animals
+      .filter((animal) => occupants.includes(animal.id))
+      .flatMap(({ profileKey }) => earlySignsOf(profileKey).map((text) => ({ crateId: id, text }))),
   )
 }
 

@@ -111,6 +111,7 @@ describe('a vet’s signature', () => {
       examined: true,
     })
     expect(a?.statement).toContain('I have examined the animal')
+    expect([a?.earlySigns, b?.earlySigns]).toEqual([['Pants in A'], ['Pants in B']])
     expect(b?.statement).toContain('I have not examined the animal')
     expect(b?.statement).toContain('not a certificate of fitness to travel')
   })

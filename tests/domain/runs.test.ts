@@ -78,6 +78,10 @@ describe('a driver’s runs', () => {
     const view = await loadRun(place.as('driver'), { consignmentId }, NOW)
     expect(view.legs.map(({ legId }) => legId)).toEqual(['leg-1'])
     expect(view).toMatchObject({ revision: 1, mayDepart: true, mayDeliver: false })
+    expect(view.legs[0]?.signs).toEqual([
+      { crateLetter: 'A', text: 'Pants in A' },
+      { crateLetter: 'B', text: 'Pants in B' },
+    ])
     const keys = view.legs[0]?.items.map(({ key }) => key)
     expect(keys).toEqual(
       expect.arrayContaining(['openings-crate-1', 'set-point', 'reading-start', 'look-end', 'handover']),

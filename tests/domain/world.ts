@@ -237,6 +237,7 @@ export async function signature(
     password: PASSWORD,
     examined: true,
     conditions: [],
+    earlySigns: place.plan.crates.map(({ id, letter }) => ({ crateId: id, text: `Pants in ${letter}` })),
     overrides: [],
     ...more,
   }

@@ -56,6 +56,7 @@ test('one consignment goes the whole way', async ({ browser, request }) => {
 
   const road = await open(browser, 'driver')
   await road.page.goto(`/runs/${id}`)
+  await expect(road.page.getByRole('region', { name: 'Early signs' })).toContainText('Panting')
   await road.page.getByRole('button', { name: 'We have left' }).click()
   await expect(road.page.getByRole('button', { name: 'Delivered' })).toBeVisible()
   await road.page.getByRole('checkbox', { name: /^Item 1: / }).click()

@@ -99,6 +99,9 @@ async function insertApproval(
       assessmentId,
       decision: input.conditions.length > 0 ? 'approved_with_conditions' : 'approved',
       conditions: input.conditions,
+      earlySigns: (input.earlySigns ?? [])
+        .filter(({ crateId }) => crateId === crateRef)
+        .map(({ text }) => text),
       examined: input.examined,
       statement: approvalStatement(input),
       signerId,

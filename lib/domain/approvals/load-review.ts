@@ -75,5 +75,6 @@ function decisionFact(approval: Approval, crateMark: string): DecisionFact {
     voidedReason: approval.voidedReason ?? '',
     withdrawn: approval.withdrawn,
     conditionCount: approval.conditions.length,
+    earlySigns: approval.earlySigns,
   }
 }

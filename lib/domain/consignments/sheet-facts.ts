@@ -147,6 +147,7 @@ function approvalFact(approval: Approval): ApprovalFact {
     checkedWords: 'Record checked by an admin',
     signedAtMs: approval.signedAt.getTime(),
     inForce: stands(approval),
+    earlySigns: approval.earlySigns,
     overrides: (approval.overrides ?? []).map((override) => ({
       findingRule: override.findingRule,
       animalId: override.animalRef,

@@ -75,7 +75,7 @@ function checklistLeg(leg: LegView, sheet: SheetView, facts: ChecklistFacts): Ch
     endurance: sheet.endurance
       .filter(({ legId }) => legId === leg.legId)
       .map((row) => enduranceOn(row, sheet)),
-    signs: [],
+    signs: signsOf(facts.sheet),
     cautions: leg.cells.some(({ verdict }) => verdict === 'no-go')
       ? ['This leg is NO-GO for an animal aboard: ring the desk before moving.']
       : [],
@@ -159,3 +159,14 @@ function callsOf({ firm, plan }: SheetFacts): CallView[] {
 
 /** The states in which a run is on a driver's list. */
 export const OPEN_RUN_STATES: readonly ConsignmentState[] = ['released', 'under_way']
+
+/** Signs the vet chose when signing, by crate. */
+function signsOf({ plan, approvals }: SheetFacts): ChecklistLeg['signs'] {
+  return plan.crates.flatMap(({ id, letter }) => {
+    const signed = approvals.filter(({ crateId, inForce }) => inForce && crateId === id)
+    return [...new Set(signed.flatMap(({ earlySigns }) => earlySigns))].map((text) => ({
+      crateLetter: letter,
+      text,
+    }))
+  })
+}

@@ -1,4 +1,5 @@
 import { crateMark } from '@/lib/planning/crate-mark'
+import { earlySignsOf } from '@/lib/species/early-signs'
 import { STATE_WORDS } from '@/lib/states/consignment'
 import { crateStamp } from '../crate-stamp'
 import type { ReviewCrate, ReviewView, SignedApproval, SignerView } from '../review'
@@ -26,6 +27,7 @@ export interface DecisionFact {
   voidedReason: string
   withdrawn: boolean
   conditionCount: number
+  earlySigns: readonly string[]
 }
 
 export interface ReviewFacts {
@@ -51,6 +53,7 @@ export function buildReviewView(facts: ReviewFacts): ReviewView | null {
       animals,
       stamp: crateStamp(animals),
       decision: decisionOn(plan.id, facts),
+      earlySigns: earlySignsIn(plan.occupants, facts.sheet),
     }
   })
   const chosen =
@@ -72,6 +75,11 @@ export function buildReviewView(facts: ReviewFacts): ReviewView | null {
     voided: newestFirst(approvals.filter(({ voidedAt }) => voidedAt !== null)),
     closedWords: closedWords(facts, chosen),
   }
+}
+
+function earlySignsIn(occupants: readonly string[], { plan }: SheetFacts): string[] {
+  const aboard = plan.animals.filter(({ id }) => occupants.includes(id))
+  return [...new Set(aboard.flatMap(({ profileKey }) => earlySignsOf(profileKey)))]
 }
 
 function decisionOn(crateId: string, { decisions, sheet }: ReviewFacts): ReviewCrate['decision'] {
@@ -107,6 +115,7 @@ function signedApproval(
     voidedReason: fact.voidedReason,
     withdrawn: fact.withdrawn,
     overrides,
+    earlySigns: [...fact.earlySigns],
     withdrawable: fact.voidedAtMs === null && fact.decision !== 'returned' && !travelling,
   }
 }

@@ -66,6 +66,8 @@ export interface ApprovalFact {
   signedAtMs: number
   /** False once voided or withdrawn. */
   inForce: boolean
+  /** What the driver is told to ring for. */
+  earlySigns: readonly string[]
   overrides: readonly OverrideFact[]
 }
 
