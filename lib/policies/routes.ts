@@ -18,12 +18,9 @@ export const ROUTE_POLICIES = {
   '/consignments/new': ['dispatcher'],
   '/consignments/[consignmentId]': DESK,
   '/consignments/[consignmentId]/plan': DESK,
-  '/consignments/[consignmentId]/assessment': DESK,
   '/consignments/[consignmentId]/sheet': DESK,
-  '/consignments/[consignmentId]/history': DESK,
   '/species': DESK,
   '/species/[key]': DESK,
-  '/crate-models': DESK,
 
   '/review': ['vet'],
   '/review/[consignmentId]': ['vet'],
@@ -36,7 +33,6 @@ export const ROUTE_POLICIES = {
 
   '/admin': ['admin'],
   '/admin/users': ['admin'],
-  '/admin/places': ['admin'],
   '/admin/mail': ['admin'],
   '/admin/audit': ['admin'],
   '/admin/certificate': ['admin'],
