@@ -22,8 +22,19 @@ export function describedBy({
   return join(hint ? `${id}-hint` : '', error ? `${id}-error` : '') || undefined
 }
 
-/** Label above, hint under it, the control, and below it the error with its double rule. */
-export function Field({ id, label, hint, error, className, children }: FieldFace & { children: ReactNode }) {
+/**
+ * Label above, hint under it, the control, and below it the error with its double rule. A `bare` field stands in a ledger
+ * cell, too narrow for a sentence: its row says what is wrong, under the same id.
+ */
+export function Field({
+  id,
+  label,
+  hint,
+  error,
+  className,
+  bare = false,
+  children,
+}: FieldFace & { bare?: boolean; children: ReactNode }) {
   return (
     <div className={join('flex min-w-0 flex-col gap-0.5', className)}>
       <label htmlFor={id} className="text-small font-semibold">
@@ -35,7 +46,7 @@ export function Field({ id, label, hint, error, className, children }: FieldFace
         </span>
       )}
       {children}
-      {error && <Attention id={`${id}-error`}>{error}</Attention>}
+      {error && !bare && <Attention id={`${id}-error`}>{error}</Attention>}
     </div>
   )
 }

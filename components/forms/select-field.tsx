@@ -27,7 +27,7 @@ export function SelectField({
     bare?: boolean
   }) {
   return (
-    <Field {...{ id, label, hint, error, className }}>
+    <Field {...{ id, label, hint, error, className, bare }}>
       <InputBox error={Boolean(error)} disabled={rest.disabled} bare={bare}>
         <select
           {...rest}

@@ -20,7 +20,7 @@ export function TextInput({
   ...rest
 }: FieldFace & Native<'input'> & { unit?: ReactNode; bare?: boolean }) {
   return (
-    <Field {...{ id, label, hint, error, className }}>
+    <Field {...{ id, label, hint, error, className, bare }}>
       <InputBox error={Boolean(error)} unit={unit} disabled={rest.disabled} bare={bare}>
         <input
           {...rest}
@@ -49,7 +49,7 @@ export function NumberInput({
   ...rest
 }: FieldFace & Native<'input'> & { unit?: ReactNode; bare?: boolean }) {
   return (
-    <Field {...{ id, label, hint, error, className }}>
+    <Field {...{ id, label, hint, error, className, bare }}>
       <InputBox error={Boolean(error)} unit={unit} disabled={rest.disabled} bare={bare}>
         <input
           inputMode="decimal"

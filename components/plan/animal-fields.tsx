@@ -57,10 +57,8 @@ export function AnimalFields({ index }: { index: number }) {
       </div>
       <div className="flex flex-col gap-2.5">
         <PlanText path={at('medicines')} label="Medicines" hint="Drug, dose, time, prescriber." />
-        <div className="grid grid-cols-2 gap-2.5">
-          <PlanText path={at('examinedOn')} label="Examined on" type="date" />
-          <PlanText path={at('examinedBy')} label="Examined by" />
-        </div>
+        <PlanText path={at('examinedOn')} label="Examined on" type="date" className="max-w-[12rem]" />
+        <PlanText path={at('examinedBy')} label="Examined by" />
         <PlanLocalTime path={at('lastFedLocal')} label="Last fed" />
         <PlanLocalTime path={at('lastWateredLocal')} label="Last watered" />
       </div>

@@ -30,7 +30,7 @@ export function ClimateControlFields({ index }: { index: number }) {
       />
       {on && (
         <>
-          <div className="grid grid-cols-3 gap-2.5">
+          <div className="grid grid-cols-2 gap-2.5 desk:grid-cols-3">
             <PlanTemperature path={`${base}.setPointC`} label="Set-point" />
             <PlanNumber path={`${base}.coolingW`} label="Cooling" unit="W" />
             <PlanNumber path={`${base}.heatingW`} label="Heating" unit="W" />

@@ -16,7 +16,9 @@ export function CrateFields({ index }: { index: number }) {
   return (
     <div className="flex flex-col gap-2.5">
       <div className="grid grid-cols-2 gap-2.5 desk:grid-cols-[1.7fr_1.3fr_1fr_1fr_1fr]">
-        <ModelField index={index} />
+        <div className="max-desk:col-span-2">
+          <ModelField index={index} />
+        </div>
         <PlanSelect path={at('form')} label="Form" choices={FORM_OPTIONS} />
         <PlanNumber path={at('lengthCm')} label="Long, inside" unit="cm" />
         <PlanNumber path={at('widthCm')} label="Wide" unit="cm" />

@@ -18,7 +18,7 @@ export function EnclosedFields({ index }: { index: number }) {
   const start = airStart(legs, index)
   return (
     <>
-      <div className="grid grid-cols-3 gap-2.5">
+      <div className="grid grid-cols-2 gap-2.5 desk:grid-cols-3">
         <PlanNumber path={`${base}.volumeM3`} label="Volume" unit="m³" />
         <PlanNumber path={`${base}.heatTransferWK`} label="Through walls" unit="W/K" />
         <PlanNumber path={`${base}.interiorMassKJK`} label="Inside mass" unit="kJ/K" />

@@ -18,6 +18,9 @@ import {
 
 /** What a field is called and which unit stands in it, by the last words of its path. */
 const FIELDS: Record<string, [words: string, unit?: string]> = {
+  animals: ['Animals'],
+  crates: ['Crates'],
+  legs: ['Legs'],
   shipperId: ['Shipper'],
   purpose: ['Purpose'],
   handlingNote: ['Handling note'],
@@ -130,6 +133,8 @@ export function fieldWords(plan: Plan, path: string): string {
 }
 
 function labelOf(keys: readonly string[]): string {
+  // A whole animal, crate, leg or row: whose it is says enough.
+  if (keys.length > 1 && /^\d+$/.test(keys.at(-1) ?? '')) return ''
   const named = keys.filter((key) => !/^\d+$/.test(key))
   return FIELDS[named.slice(-2).join('.')]?.[0] ?? FIELDS[named.at(-1) ?? '']?.[0] ?? ''
 }

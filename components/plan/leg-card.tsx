@@ -25,7 +25,7 @@ export function LegCard({
     <div
       role="group"
       aria-label={`Leg ${index + 1}, ${legName(leg)}`}
-      className="grid border-2 border-ink bg-sheet max-board:divide-y max-board:divide-rule board:grid-cols-[1.1fr_1.02fr_1.34fr_.94fr] board:divide-x board:divide-rule"
+      className="grid border-2 border-ink bg-sheet max-board:divide-y max-board:divide-rule board:grid-cols-[1fr_1fr_1.3fr_1fr] board:divide-x board:divide-rule"
     >
       <LegPart
         head={

@@ -14,7 +14,7 @@ export function LegCharge({ index }: { index: number }) {
   return (
     <div className="flex flex-col gap-2.5">
       <PlanText path={`legs.${index}.partyInCharge`} label="Party in charge" />
-      <div className="grid grid-cols-2 gap-2.5">
+      <div className="grid grid-cols-[1.4fr_1fr] gap-2.5 max-desk:grid-cols-1">
         <PlanText path={`legs.${index}.partyTelephone`} label="Telephone" type="tel" />
         <PlanText path={`legs.${index}.partyHours`} label="Hours" />
       </div>

@@ -25,23 +25,23 @@ export function LegJourney({ index }: { index: number }) {
         <KindField index={index} />
         <PlanNumber path={`legs.${index}.pressureKPa`} label="Pressure" unit="kPa" />
       </div>
-      <div className="grid grid-cols-2 gap-2.5" onFocus={from.remember}>
+      <div onFocus={from.remember}>
         <PlanRecordSelect
           path={`legs.${index}.fromPlaceId`}
           label="From"
           records={catalogues.places}
           onChosen={from.follow}
         />
-        <span className="contents" onFocus={to.remember}>
-          <PlanRecordSelect
-            path={`legs.${index}.toPlaceId`}
-            label="To"
-            records={catalogues.places}
-            onChosen={to.follow}
-          />
-        </span>
       </div>
-      <div className="grid grid-cols-2 gap-2.5">
+      <div onFocus={to.remember}>
+        <PlanRecordSelect
+          path={`legs.${index}.toPlaceId`}
+          label="To"
+          records={catalogues.places}
+          onChosen={to.follow}
+        />
+      </div>
+      <div className="grid grid-cols-[1.4fr_1fr] gap-2.5">
         <PlanText path={`legs.${index}.carrier`} label="Carrier" />
         <PlanText path={`legs.${index}.serviceNumber`} label="Number" />
       </div>

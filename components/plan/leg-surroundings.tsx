@@ -53,7 +53,7 @@ function ControlledFields({ index }: { index: number }) {
   const outside = air?.type === 'controlled' ? air.outside : null
   return (
     <>
-      <div className="grid grid-cols-3 gap-2.5">
+      <div className="grid grid-cols-2 gap-2.5 desk:grid-cols-3">
         <PlanTemperature path={`${base}.airTempC`} label="Air" />
         <PlanNumber path={`${base}.relHumidityPct`} label="Humidity" unit="%" />
         <PlanNumber path={`${base}.airSpeedMs`} label="Air at crates" unit="m/s" />

@@ -34,12 +34,13 @@ export function LegsPart({ chosen, onChoose }: { chosen: number; onChoose: (inde
   const flight = flightAround(legs, index)
   return (
     <section id="legs" aria-labelledby="legs-title" className="mt-6">
-      <div className="mb-2 flex flex-wrap items-baseline gap-x-4 gap-y-1 border-t-2 border-ink pt-2">
+      <div className="mb-2 flex flex-wrap items-center gap-x-4 gap-y-1 border-t-2 border-ink pt-2">
         <h2 id="legs-title" className="text-section">
           Legs
         </h2>
         <p className="text-small text-mute">
-          True time scale. Where two legs meet, changing one end moves the other with it.
+          <span className="max-desk:hidden">True time scale. </span>Where two legs meet, changing one end
+          moves the other with it.
         </p>
         <span className="ml-auto">{legs.length < MAX_LEGS && <AddLeg after={index + 1} onAdd={add} />}</span>
       </div>

@@ -8,35 +8,44 @@ import { clock, dayDate, hourMin, zoneName } from '@/lib/views/format'
 import { PATTERN_OF_KIND } from '@/components/charts/pattern-of-kind'
 import { legName } from './option-words'
 import { usePlanLegs } from './plan-timeline'
-import { rulerLayout, rulerTicks } from './ruler-layout'
+import { figuresUnder, rulerLayout, rulerTicks } from './ruler-layout'
 import type { RulerLayout } from './ruler-layout'
 
-const LEFT = 48
 const BAR = { top: 46, height: 40 }
+/** Rows of words under the bar: numbers of legs too narrow to hold theirs, then gaps. */
+const NUMBERS_Y = BAR.top + BAR.height + 14
+const GAPS_Y = BAR.top + BAR.height + 30
+/** Least room for the figure of a leg inside its bar, and between two figures under it. */
+const FIGURE_PX = 22
 
 /** All legs on one true time scale, on the clocks of both ends of the journey; time that belongs to no leg stands open. */
 export function LegsRuler({ chosen, onChoose }: { chosen: number; onChoose: (index: number) => void }) {
   const { legs, timeline } = usePlanLegs()
   const frame = useRef<HTMLDivElement>(null)
   const width = useWidth(frame)
-  const inner = width - LEFT - 8
-  const layout = width > 0 ? rulerLayout(timeline.legs, inner) : null
   const zones = [...new Set([timeline.departureZone, timeline.arrivalZone])].filter((zone) => zone !== null)
+  const departureMs = timeline.departureMs ?? 0
+  const longest = Math.max(0, ...zones.map((zone) => zoneName(departureMs, zone).length))
+  // Room for the zone's name and half the figures of a tick that stands at the very start.
+  const left = longest * 8 + 30
+  const inner = width - left - 8
+  const layout = width > 0 ? rulerLayout(timeline.legs, inner) : null
   return (
     <div ref={frame} className="mb-1 max-desk:hidden">
       {layout !== null && (
-        <svg width={width} height={108} role="img" aria-label={summary(legs.length, layout)}>
+        <svg width={width} height={122} role="img" aria-label={summary(legs.length, layout)}>
           {zones.map((zone, row) => (
             <ZoneRuler
               key={zone}
               layout={layout}
               zone={zone}
               y={14 + row * 18}
+              left={left}
               inner={inner}
               first={row === 0}
             />
           ))}
-          <g transform={`translate(${LEFT} 0)`}>
+          <g transform={`translate(${left} 0)`}>
             {layout.legs.map(({ index, fromPx, toPx }) => {
               const leg = legs[index]
               if (leg === undefined) return null
@@ -54,6 +63,28 @@ export function LegsRuler({ chosen, onChoose }: { chosen: number; onChoose: (ind
                 </g>
               )
             })}
+            {figuresUnder(layout.legs, FIGURE_PX).map(({ index, atPx, legPx }) => (
+              <g key={index} onClick={() => onChoose(index)} className="cursor-pointer">
+                <line
+                  x1={legPx}
+                  x2={atPx}
+                  y1={BAR.top + BAR.height}
+                  y2={NUMBERS_Y - 10}
+                  strokeWidth="1"
+                  className="stroke-rule"
+                />
+                <text
+                  x={atPx}
+                  y={NUMBERS_Y}
+                  textAnchor="middle"
+                  fontSize="14"
+                  fontWeight="700"
+                  style={{ fontFamily: 'var(--f-head)' }}
+                >
+                  {index + 1}
+                </text>
+              </g>
+            ))}
             {layout.gaps.map((gap) => (
               <g key={gap.after}>
                 <rect
@@ -66,7 +97,7 @@ export function LegsRuler({ chosen, onChoose }: { chosen: number; onChoose: (ind
                 />
                 <text
                   x={(gap.fromPx + gap.toPx) / 2}
-                  y={BAR.top + BAR.height + 17}
+                  y={GAPS_Y}
                   textAnchor="middle"
                   fontSize="12"
                   fontWeight="600"
@@ -101,21 +132,16 @@ function LegLabel({ box, index, name }: { box: Bar; index: number; name: string 
   const room = Math.floor((box.width - 22) / 7.2)
   const words = room >= name.length ? name : ''
   const width = words === '' ? 8 + short.length * 9 : 22 + name.length * 6.8
-  if (box.width < width + 6) return null
+  if (box.width < FIGURE_PX) return null
+  const x = words === '' ? box.x + (box.width - width) / 2 : box.x + 6
   return (
     <>
-      <rect x={box.x + 6} y={box.y + 11} width={width} height={18} className="fill-sheet" />
-      <text
-        x={box.x + 10}
-        y={box.y + 25}
-        fontSize="14"
-        fontWeight="700"
-        style={{ fontFamily: 'var(--f-head)' }}
-      >
+      <rect x={x} y={box.y + 11} width={width} height={18} className="fill-sheet" />
+      <text x={x + 4} y={box.y + 25} fontSize="14" fontWeight="700" style={{ fontFamily: 'var(--f-head)' }}>
         {short}
       </text>
       {words !== '' && (
-        <text x={box.x + 23} y={box.y + 25} fontSize="12">
+        <text x={x + 17} y={box.y + 25} fontSize="12">
           {words}
         </text>
       )}
@@ -127,12 +153,14 @@ function ZoneRuler({
   layout,
   zone,
   y,
+  left,
   inner,
   first,
 }: {
   layout: RulerLayout
   zone: string
   y: number
+  left: number
   inner: number
   first: boolean
 }) {
@@ -142,15 +170,15 @@ function ZoneRuler({
       <text x={0} y={y} fontSize="12" fontWeight={first ? 600 : 400}>
         {zoneName(layout.startMs, zone)}
       </text>
-      <line x1={LEFT} x2={LEFT + inner} y1={y + 5} y2={y + 5} strokeWidth="1" className="stroke-rule" />
+      <line x1={left} x2={left + inner} y1={y + 5} y2={y + 5} strokeWidth="1" className="stroke-rule" />
       {ticks.map((ms) => {
         const words = clock(ms, zone)
-        const x = LEFT + layout.at(ms)
+        const x = left + layout.at(ms)
         return (
           <g key={ms}>
             <line x1={x} x2={x} y1={y + 2} y2={y + 8} strokeWidth="1" className="stroke-ink" />
             <text
-              x={Math.min(x, LEFT + inner - 16)}
+              x={Math.min(x, left + inner - 16)}
               y={y}
               textAnchor="middle"
               fontSize="12"

@@ -1,7 +1,7 @@
 'use client'
 
 import { useFormContext, useFormState } from 'react-hook-form'
-import { Button, Key } from '@/components/ui/button'
+import { Button, Key, buttonClass } from '@/components/ui/button'
 import { ErrorSummary } from '@/components/ui/error-summary'
 import { Hole } from '@/components/ui/holes'
 import { Notice } from '@/components/ui/notice'
@@ -34,7 +34,7 @@ export function PlanCommands({
   return (
     <>
       <div className="flex flex-wrap items-center gap-x-4 gap-y-2 py-2">
-        <SavingLine savedAtMs={savedAtMs} zone={zone} saving={saving} />
+        <SavingLine isNew={mark === null} savedAtMs={savedAtMs} zone={zone} saving={saving} />
         <nav aria-label="Parts of the plan" className="flex flex-wrap gap-x-4 text-small">
           {PLAN_PARTS.map((part) => (
             <button key={part} type="button" className="link max-desk:min-h-11" onClick={() => onPart(part)}>
@@ -45,16 +45,30 @@ export function PlanCommands({
         </nav>
         <span className="ml-auto flex flex-wrap items-center gap-2">
           <Button type="submit" refused={pending === 'save' ? 'Saving' : undefined}>
-            {pending === 'save' ? 'Saving' : 'Save the plan'} <Key>Enter</Key>
+            {pending === 'save' ? 'Saving' : 'Save the plan'}
+            <span className="max-desk:hidden">
+              <Key>Enter</Key>
+            </span>
           </Button>
-          <Button
-            first
-            onClick={onAssess}
-            aria-describedby={problems.length > 0 ? 'why' : undefined}
-            refused={pending === 'assess' ? 'Asking for the assessment' : undefined}
-          >
-            {pending === 'assess' ? 'Asking' : `Assess ${mark ?? 'this plan'}`}
-          </Button>
+          {problems.length > 0 ? (
+            // Dotted, since nothing can be assessed; pressed, it leads to what stands in the way.
+            <button
+              type="button"
+              className={buttonClass({ refused: true })}
+              aria-describedby="why-title"
+              onClick={onAssess}
+            >
+              Assess {mark ?? 'this plan'}
+            </button>
+          ) : (
+            <Button
+              first
+              onClick={onAssess}
+              refused={pending === 'assess' ? 'Asking for the assessment' : undefined}
+            >
+              {pending === 'assess' ? 'Asking' : `Assess ${mark ?? 'this plan'}`}
+            </Button>
+          )}
         </span>
       </div>
       <Failure saving={saving} />
@@ -70,10 +84,12 @@ export function PlanCommands({
 }
 
 function SavingLine({
+  isNew,
   savedAtMs,
   zone,
   saving,
 }: {
+  isNew: boolean
   savedAtMs: number | null
   zone: string
   saving: PlanSaving
@@ -83,7 +99,9 @@ function SavingLine({
   const { pending, keptAtMs } = saving
   return (
     <span role="status" className="flex flex-wrap items-center gap-x-2 text-small text-mute">
-      <Hole state={pending === 'save' ? 'dashed' : isDirty ? 'open' : 'filled'} />
+      <Hole
+        state={pending === 'save' ? 'dashed' : isDirty || (isNew && savedAtMs === null) ? 'open' : 'filled'}
+      />
       {pending === 'save' ? (
         <b className="text-ink">Saving</b>
       ) : keptAtMs !== null ? (
@@ -100,6 +118,8 @@ function SavingLine({
         </>
       ) : savedAtMs !== null ? (
         <b className="text-ink">Saved {localTime(savedAtMs, zone)}.</b>
+      ) : isNew ? (
+        'Nothing saved yet.'
       ) : (
         'As saved.'
       )}

@@ -24,10 +24,11 @@ export function PlanFolds({
 }) {
   const { control } = useFormContext<Plan>()
   const plan = useWatch({ control }) as Plan
-  const problems = useProblems()
+  const { problems } = usePlanPage()
+  const all = useProblems()
   const part = (name: Exclude<PlanPart, 'legs'>, words: ReactNode) => {
     const open = opened.includes(name)
-    const wrong = problems.filter((problem) => !problem.empty && spotOf(problem.path).part === name)
+    const wrong = all.filter(({ path }) => problems.at(path) !== undefined && spotOf(path).part === name)
     return (
       <Fold
         key={name}
@@ -73,10 +74,15 @@ function WrongFields({ problems, plan }: { problems: readonly Problem[]; plan: P
       </div>
     ) : (
       <p key={path} className="dbl mt-1.5 pl-2 text-small font-semibold">
-        <button type="button" className="link" onClick={() => goTo(path)}>
+        <button
+          type="button"
+          className="link text-left max-desk:flex max-desk:min-h-11 max-desk:items-center"
+          onClick={() => goTo(path)}
+        >
           {fieldWords(plan, path)}
         </button>
-        : {message}
+        <span className="max-desk:hidden">: </span>
+        {message}
       </p>
     ),
   )
@@ -88,7 +94,10 @@ function PartiesLine({ plan }: { plan: Plan }) {
   const { consignor, consignee, emergencyContact } = plan
   return (
     <span>
-      {consignor.name || 'No consignor'} to {consignee.name || 'no consignee'}. Shipper: {shipper}. Emergency:{' '}
+      {consignor.name === '' && consignee.name === ''
+        ? 'No consignor and no consignee'
+        : `${consignor.name || 'No consignor'} to ${consignee.name || 'no consignee'}`}
+      . Shipper: {shipper}. Emergency:{' '}
       {[emergencyContact.name, emergencyContact.telephone].filter(Boolean).join(', ') || 'nobody named'}
     </span>
   )

@@ -90,6 +90,8 @@ export class PlanProblems {
   /** From now on every missing field says so itself. */
   ask(): void {
     this.asked = true
+    // A new list, so that whoever shows it draws it again.
+    this.list = [...this.list]
     this.tell()
   }
 

@@ -5,6 +5,7 @@ import { Notice } from '@/components/ui/notice'
 import type { Plan } from '@/lib/schemas/plan'
 import { fieldWords, ownerWords } from './field-words'
 import { usePlanPage, useProblems } from './plan-context'
+import { withoutOwner } from './reason-words'
 
 /** Every reason why the plan cannot be assessed, all at once, each with a way to its field. */
 export function PlanReasons() {
@@ -23,25 +24,32 @@ export function PlanReasons() {
     <div id="why" tabIndex={-1} className="outline-none">
       <Notice
         title={
-          problems.length === 1
-            ? '1 reason it can’t be assessed yet'
-            : `${problems.length} reasons it can’t be assessed yet`
+          <span id="why-title">
+            {problems.length === 1
+              ? '1 reason it can’t be assessed yet'
+              : `${problems.length} reasons it can’t be assessed yet`}
+          </span>
         }
       >
-        <ol className="mt-1.5 max-h-[26rem] list-none overflow-y-auto">
+        <ol className="mt-1.5 list-none board:max-h-[26rem] board:overflow-y-auto">
           {problems.map(({ path, message }, index) => {
             const words = fieldWords(getValues(), path)
             return (
               <li
                 key={`${path} ${message}`}
-                className="grid grid-cols-[28px_1fr] border-t border-hair py-[5px] max-desk:py-2"
+                className="grid grid-cols-[28px_1fr] border-t border-hair py-[5px] max-desk:items-baseline max-desk:py-1"
               >
                 <span className="font-head font-bold">{index + 1}</span>
                 <span>
-                  <button type="button" className="link text-left" onClick={() => goTo(path)}>
+                  <button
+                    type="button"
+                    className="link text-left max-desk:flex max-desk:min-h-11 max-desk:items-center"
+                    onClick={() => goTo(path)}
+                  >
                     {words === '' ? 'The plan' : words}
                   </button>
-                  : {withoutOwner(message, ownerWords(getValues(), path))}
+                  <span className="max-desk:hidden">: </span>
+                  {withoutOwner(message, words, ownerWords(getValues(), path))}
                 </span>
               </li>
             )
@@ -50,11 +58,4 @@ export function PlanReasons() {
       </Notice>
     </div>
   )
-}
-
-/** The link says whose it is already: "Leg 6, telephone" needs no second "Leg 6 (flight):". */
-function withoutOwner(message: string, owner: string): string {
-  if (owner === '' || !message.startsWith(owner)) return message
-  const rest = message.slice(owner.length).replace(/^(?: \([^)]*\))?[,:]? ?/, '')
-  return rest === '' ? message : rest
 }

@@ -70,3 +70,23 @@ export function rulerTicks(
     ticks.push(ms)
   return ticks
 }
+
+export interface FigureUnder {
+  index: number
+  /** Where the figure stands, and the middle of its leg. */
+  atPx: number
+  legPx: number
+}
+
+/** Legs narrower than their number: it stands under the bar instead, pushed right to keep clear of the one before. */
+export function figuresUnder(legs: readonly RulerLeg[], figurePx: number): FigureUnder[] {
+  let free = 0
+  return legs
+    .filter(({ fromPx, toPx }) => toPx - fromPx < figurePx)
+    .map(({ index, fromPx, toPx }) => {
+      const legPx = (fromPx + toPx) / 2
+      const atPx = Math.max(legPx, free)
+      free = atPx + figurePx
+      return { index, atPx, legPx }
+    })
+}

@@ -1,12 +1,15 @@
 'use client'
 
+import { Fragment } from 'react'
 import type { ReactNode } from 'react'
 import { useFieldArray, useFormContext } from 'react-hook-form'
 import { Ledger, Head } from '@/components/ui/ledger'
+import { CellLabel } from './cell-label'
 import { MAX_WEATHER_ROWS } from './limits'
 import type { Plan } from '@/lib/schemas/plan'
 import { PlanNumber, PlanTemperature } from './plan-fields'
 import type { PlanPath } from './plan-fields'
+import { RowErrors } from './row-errors'
 
 /** Where open air stands in the plan: a leg's own surroundings, or what lies outside them. */
 export type AirBase = `legs.${number}.surroundings` | `legs.${number}.surroundings.outside`
@@ -47,7 +50,7 @@ export function WeatherRows({ base, words, reach }: { base: AirBase; words: stri
   }
   return (
     <div>
-      <Ledger caption={words}>
+      <Ledger caption={words} folds>
         <thead>
           <tr>
             {columns.map(({ head, sign }) => (
@@ -62,27 +65,34 @@ export function WeatherRows({ base, words, reach }: { base: AirBase; words: stri
         </thead>
         <tbody>
           {fields.map((field, row) => (
-            <tr key={field.rowKey} className="align-top">
-              {columns.map(({ field: key, head }) => (
-                <td key={key} className="border-t border-hair px-0.5 py-1 align-top">
-                  <WeatherFigure
-                    path={at(row, key)}
-                    label={<Ears words={`Row ${row + 1}, ${head.toLowerCase()}`} />}
-                  />
-                </td>
-              ))}
-              <td className="border-t border-hair px-1.5 py-1 text-right">
-                {fields.length > 1 && (
-                  <button
-                    type="button"
-                    className="link text-small max-desk:min-h-11"
-                    onClick={() => remove(row)}
+            <Fragment key={field.rowKey}>
+              <tr className="align-top max-desk:!grid max-desk:grid-cols-2 max-desk:items-end max-desk:px-2">
+                {columns.map(({ field: key, head, sign }) => (
+                  <td
+                    key={key}
+                    style={{ width: `${92 / columns.length}%` }}
+                    className="border-t border-hair px-0.5 py-1 align-top max-desk:!w-auto max-desk:!px-1"
                   >
-                    Out<span className="sr-only">: take out row {row + 1}</span>
-                  </button>
-                )}
-              </td>
-            </tr>
+                    <WeatherFigure
+                      path={at(row, key)}
+                      label={<CellLabel row={`Row ${row + 1}`} words={head.toLowerCase()} unit={sign} />}
+                    />
+                  </td>
+                ))}
+                <td className="border-t border-hair px-1.5 py-1 text-right">
+                  {fields.length > 1 && (
+                    <button
+                      type="button"
+                      className="link text-small max-desk:min-h-11"
+                      onClick={() => remove(row)}
+                    >
+                      Out<span className="sr-only">: take out row {row + 1}</span>
+                    </button>
+                  )}
+                </td>
+              </tr>
+              <RowErrors paths={columns.map(({ field: key }) => at(row, key))} columns={columns.length + 1} />
+            </Fragment>
           ))}
         </tbody>
       </Ledger>
@@ -106,8 +116,4 @@ function WeatherFigure({ path, label }: { path: PlanPath; label: ReactNode }) {
   ) : (
     <PlanNumber bare path={path} label={label} unit="" />
   )
-}
-
-function Ears({ words }: { words: string }) {
-  return <span className="sr-only">{words}</span>
 }

@@ -19,7 +19,7 @@ export function Fold({
   error?: ReactNode
 }) {
   return (
-    <div className="grid grid-cols-[1fr_auto] items-start gap-x-3 px-3 py-[7px] desk:grid-cols-[104px_1fr_auto]">
+    <div className="grid grid-cols-[1fr_auto] items-start gap-x-3 px-3 py-[7px] max-desk:items-center desk:grid-cols-[104px_1fr_auto]">
       <h3 className="text-sub">{name}</h3>
       <div className="max-desk:order-last max-desk:col-span-2">
         {children}
