@@ -1,4 +1,5 @@
 import type { AirStop, StopLimitView } from '@/lib/views/sheet'
+import { overriddenLimitWords } from '@/lib/views/sheet-view/stops'
 import { Mark } from '@/components/ui/mark'
 
 /** Air at which a crate is stopped for and the desk is rung, above first. The strictest of the legs it can meet. */
@@ -27,6 +28,7 @@ export function StopLimits({
             <StopFigure words="above" c={limit.strictest.aboveC} f={limit.strictest.aboveF} />
             <StopFigure words="below" c={limit.strictest.belowC} f={limit.strictest.belowF} />
             <OtherLegs limit={limit} />
+            <p className="text-small text-mute empty:hidden">{overriddenLimitWords(limit)}</p>
           </div>
         ))}
       </div>

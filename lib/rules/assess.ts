@@ -63,7 +63,7 @@ export function* assessSteps(
   const base = yield* makeBaseRuns(prepared, runner, readsEnclosedAir(prepared.scenario))
   const bodies = yield* bodyFindings(prepared, base, runner)
   const findings = ordered([...bodies, ...planFindings(prepared, base, bodies)], prepared)
-  const { stopLimits, endurance } = yield* legFigures(prepared, runner)
+  const { stopLimits, endurance } = yield* legFigures(prepared, runner, bodies)
   const verdicts = decide(findings, passagesOf(prepared))
   return {
     schema: 'steadfold/result@1',
@@ -150,13 +150,14 @@ function planFindings(
 function* legFigures(
   prepared: Prepared,
   runner: Runner,
+  bodies: readonly Finding[],
 ): Steps<{ stopLimits: StopLimit[]; endurance: Endurance[] }> {
   const { legs } = prepared.scenario
   runner.stage('Endurance and stop limits', legs.length * EXPECTED.figures)
   const stopLimits: StopLimit[] = []
   const endurance: Endurance[] = []
   for (const index of legs.keys()) {
-    stopLimits.push(...(yield* stopLimitsOf(prepared, runner, index)))
+    stopLimits.push(...(yield* stopLimitsOf(prepared, runner, index, bodies)))
     endurance.push(...(yield* enduranceOf(prepared, runner, index)))
   }
   return { stopLimits, endurance }

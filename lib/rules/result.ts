@@ -78,6 +78,11 @@ export interface StopLimit {
   legId: string
   aboveC: number | null
   belowC: number | null
+  /**
+   * What takes its place once a vet has overridden the alarm (cold effort) of this leg on that side: air that keeps the
+   * critical limit, 3 °C to the safe side. Only where an override is possible.
+   */
+  ifOverridden?: { aboveC?: number | null; belowC?: number | null }
 }
 
 export interface Assessment extends Simulation {

@@ -1,8 +1,8 @@
 import { type Run, type Variant, holdLegAt, stateAt, withDelays, lengthenLeg } from '@/lib/thermal'
-import { PRONE, type Side } from './base-runs'
-import { decidingLimits } from './body-limits'
+import { GO_MARGIN_C, PRONE, type Side } from './base-runs'
+import { type BodyLimit, decidingLimits } from './body-limits'
 import { worstScheduleOf } from './minutes-to-spare'
-import type { StopLimit } from './result'
+import type { Finding, StopLimit } from './result'
 import { type Runner, type Steps, extremesOf } from './runner'
 import { type Prepared, type Subject, isAboard } from './subject'
 
@@ -14,9 +14,14 @@ const WARMEST_C = 55
 /**
  * Per animal: the highest and the lowest whole °C of steady air outside the crate, at the leg's humidity, at which the
  * susceptible animal, from its state at the leg's start, keeps its alarm (60 % cold effort) to the leg's end at worst
- * delay plus an hour. null where no air does.
+ * delay plus an hour. null where no air does. Where a vet may override the alarm, also what then takes its place.
  */
-export function* stopLimitsOf(prepared: Prepared, runner: Runner, legIndex: number): Steps<StopLimit[]> {
+export function* stopLimitsOf(
+  prepared: Prepared,
+  runner: Runner,
+  legIndex: number,
+  findings: readonly Finding[],
+): Steps<StopLimit[]> {
   const leg = prepared.scenario.legs[legIndex]
   if (leg === undefined) return []
   const holds = {
@@ -25,11 +30,45 @@ export function* stopLimitsOf(prepared: Prepared, runner: Runner, legIndex: numb
   }
   const limits: StopLimit[] = []
   for (const subject of prepared.subjects.filter((one) => isAboard(one, legIndex))) {
-    const aboveC = yield* extreme(subject, leg.id, 'high', holds.high)
-    const belowC = yield* extreme(subject, leg.id, 'low', holds.low)
-    limits.push({ animalId: subject.animal.id, legId: leg.id, aboveC, belowC })
+    const { kept: upper, critical: hottest } = decidingLimits('high', subject)
+    const { kept: lower, critical: coldest } = decidingLimits('low', subject)
+    const at = { animalId: subject.animal.id, legId: leg.id }
+    const aboveC = yield* extreme(subject, leg.id, upper, holds.high)
+    const belowC = yield* extreme(subject, leg.id, lower, holds.low)
+    const ifOverridden = {
+      ...(mayBeOverridden(findings, at, 'high') && {
+        aboveC: yield* withMargin(subject, leg.id, hottest, holds.high),
+      }),
+      ...(mayBeOverridden(findings, at, 'low') && {
+        belowC: yield* withMargin(subject, leg.id, coldest, holds.low),
+      }),
+    }
+    const some = Object.keys(ifOverridden).length > 0
+    limits.push({ ...at, aboveC, belowC, ...(some && { ifOverridden }) })
   }
   return limits
+}
+
+function mayBeOverridden(
+  findings: readonly Finding[],
+  { animalId, legId }: Pick<StopLimit, 'animalId' | 'legId'>,
+  side: Side,
+): boolean {
+  return findings.some(
+    (finding) =>
+      finding.animalId === animalId &&
+      finding.legId === legId &&
+      finding.side === side &&
+      finding.status === 'breach' &&
+      finding.overridable,
+  )
+}
+
+/** The air that keeps the limit, moved by the model's proven error to the safe side. */
+function* withMargin(subject: Subject, legId: string, limit: BodyLimit, hold: Holding): Steps<number | null> {
+  const airTempC = yield* extreme(subject, legId, limit, hold)
+  if (airTempC === null) return null
+  return limit.side === 'high' ? airTempC - GO_MARGIN_C : airTempC + GO_MARGIN_C
 }
 
 type Holding = (airTempC: number) => Steps<Run>
@@ -61,11 +100,11 @@ function* holding(prepared: Prepared, runner: Runner, legIndex: number, side: Si
 }
 
 /** Halves the span between an air that is kept and one that is not, from the middle of the range outward. */
-function* extreme(subject: Subject, legId: string, side: Side, hold: Holding): Steps<number | null> {
-  const { kept } = decidingLimits(side, subject)
+function* extreme(subject: Subject, legId: string, limit: BodyLimit, hold: Holding): Steps<number | null> {
+  const { side } = limit
   function* keeps(airTempC: number): Steps<boolean> {
     const extremes = extremesOf(yield* hold(airTempC), subject.animal.id, legId)
-    return extremes !== undefined && kept.pastFrom(extremes) === undefined
+    return extremes !== undefined && limit.pastFrom(extremes) === undefined
   }
   const outward = side === 'high' ? 1 : -1
   const far = side === 'high' ? WARMEST_C : COLDEST_C

@@ -202,7 +202,7 @@ export interface StopLimitView {
   /** "2441-A" */
   crateMark: string
   strictest: AirStop
-  byLeg: (AirStop & { legId: string; ordinal: number; plannedInside: boolean })[]
+  byLeg: (AirStop & { legId: string; ordinal: number; plannedInside: boolean; overridden: boolean })[]
 }
 
 /** Whole °C of air outside the crate, and the same in °F rounded to the safe side (upper down, lower up). */

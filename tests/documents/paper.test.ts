@@ -95,6 +95,7 @@ describe('stop limits on paper', () => {
           ordinal,
           aboveC: 20 + ordinal,
           plannedInside: ordinal === 1,
+          overridden: false,
         })),
       }
       const text = (

@@ -33,6 +33,7 @@ test('a vet overrides a finding by name, and the paper says who and why', async 
   await expect(desk.page.getByRole('img', { name: /^Verdict: go with conditions/i }).first()).toBeVisible()
   await expect(desk.page.getByText(/Overridden/).first()).toBeVisible()
   await expect(desk.page.getByText(/Sunniva Halloway-Odu/).first()).toBeVisible()
+  await expect(desk.page.getByText(/overridden by the vet: 3.°C inside/)).toBeVisible()
   await desk.page.getByRole('button', { name: `Release ${mark}` }).click()
   await desk.page
     .getByRole('dialog')

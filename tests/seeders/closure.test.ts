@@ -2,33 +2,15 @@ import { describe, expect, it } from 'vitest'
 import { reasonsNotAssessable } from '@/lib/planning/reasons'
 import { toScenario } from '@/lib/planning/to-scenario'
 import { parseScenario } from '@/lib/schemas/scenario'
-import { catalogue, catalogueValues } from '@/lib/species'
+import { catalogueValues } from '@/lib/species'
 import { simulate, VARIANTS } from '@/lib/thermal'
 import { DEMO_CONSIGNMENTS } from '@/seeders/demo/consignments'
-import type { DemoWorld } from '@/seeders/demo/consignments/common'
-import { DEMO_PLACES } from '@/seeders/demo/places'
+import { places, profiles, world } from './support/demo-knowledge'
 
 /*
  * Conservation of energy on every journey of the demo that can be assessed: heat in minus heat stored over heat turned
  * over, recomputed from the reported minute track, at most 0.1 per cent. First law of thermodynamics; no other source.
  */
-const keys = Object.keys(DEMO_PLACES) as (keyof typeof DEMO_PLACES)[]
-const world: DemoWorld = {
-  now: new Date('2026-06-09T09:00:00Z'),
-  places: Object.fromEntries(keys.map((key, index) => [key, index + 1])) as DemoWorld['places'],
-  people: { driver: 1, 'second-driver': 2 },
-  shippers: { '0412': 1, '0431': 2, '0457': 3 },
-}
-const places = keys.map((key, index) => {
-  const { latitude, longitude, ...place } = DEMO_PLACES[key]
-  return { ...place, id: index + 1, latitudeDeg: latitude, longitudeDeg: longitude }
-})
-const profiles = Object.values(catalogue).map(({ key, commonName, version }) => {
-  const values = catalogueValues[key]
-  if (values === undefined) throw new Error(`The catalogue has no values for ${key}.`)
-  return { key, commonName, version, values }
-})
-
 describe('closure on the demo', () => {
   const assessable = DEMO_CONSIGNMENTS.filter(({ stage }) => stage !== 'draft')
   it.each(assessable.map((demo) => [demo.key, demo] as const))(

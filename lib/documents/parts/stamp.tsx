@@ -31,7 +31,7 @@ export function VerdictStamp({ stamp, scale }: { stamp: Stamp; scale: Scale }) {
       words={STAMP_WORDS[verdict]}
       scale={scale}
       frame={frame}
-      count={verdict === 'conditional' ? conditions : null}
+      count={verdict === 'conditional' && conditions > 0 ? conditions : null}
     />
   )
 }
@@ -40,7 +40,8 @@ export function VerdictStamp({ stamp, scale }: { stamp: Stamp; scale: Scale }) {
 export function stampWidth({ verdict, conditions }: Stamp, scale: Scale): number {
   if (verdict === 'none') return 120
   return (
-    wordsWidth(STAMP_WORDS[verdict], scale) + (verdict === 'conditional' ? countWidth(conditions, scale) : 0)
+    wordsWidth(STAMP_WORDS[verdict], scale) +
+    (verdict === 'conditional' && conditions > 0 ? countWidth(conditions, scale) : 0)
   )
 }
 

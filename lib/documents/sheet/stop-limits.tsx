@@ -5,6 +5,7 @@ import { CONTENT_WIDTH } from '@/lib/documents/parts/paper'
 import { Figure, INK, Mark, px, Words } from '@/lib/documents/parts/words'
 import { figure } from '@/lib/views/format'
 import type { AirStop, SheetFirm, StopLimitView } from '@/lib/views/sheet'
+import { overriddenLimitWords } from '@/lib/views/sheet-view/stops'
 import { chunk } from './animal-boxes'
 
 const PER_ROW = 4
@@ -66,7 +67,7 @@ const top = {
 } as const
 
 function CrateStops({ limit, width, first }: { limit: StopLimitView; width: number; first: boolean }) {
-  const others = otherLegs(limit)
+  const others = notes(limit)
   return (
     <View
       style={{
@@ -120,6 +121,10 @@ function Side({ word, c, f }: { word: string; c: number | null; f: number | null
   )
 }
 
+function notes(limit: StopLimitView): string {
+  return [otherLegs(limit), overriddenLimitWords(limit)].filter(Boolean).join('. ')
+}
+
 /** "Own limits: leg 3, −6 to 24 °C": legs planned outside the strictest limits, which have their own. */
 function otherLegs({ byLeg }: StopLimitView): string {
   const others = byLeg.filter(({ plannedInside }) => !plannedInside)
@@ -135,6 +140,6 @@ function range({ aboveC, belowC }: AirStop): string {
 }
 
 function noteHeight(limit: StopLimitView, width: number): number {
-  const note = otherLegs(limit)
+  const note = notes(limit)
   return note === '' ? 0 : 3 + 12 * lineCount(note, 'text', 400, 10, width - 20)
 }

@@ -28,7 +28,7 @@ export function headlineOf(
     verdict === 'no-go'
       ? mayOverride(effective.findings)
       : verdict === 'conditional'
-        ? 'It holds only while its conditions are kept.'
+        ? holdsWhile(effective.overridden.length)
         : '',
     fact.outOfDate
       ? 'Out of date: the plan or what it rests on has changed since. Assess again before anything is decided.'
@@ -81,6 +81,12 @@ function whereAndBody(finding: Finding, journey: JourneyLeg[]): string {
       : scheduleInWords(finding.scheduleId, (legId) => journey.find(({ leg }) => leg.id === legId)?.ordinal)
   const words = [body, schedule].filter(Boolean).join(', ')
   return words === '' ? '' : `${capital(words)}.`
+}
+
+function holdsWhile(overrides: number): string {
+  return overrides === 0
+    ? 'It holds only while its conditions are kept.'
+    : 'It rests on a vet’s override, and holds only inside the figures it was signed for.'
 }
 
 /** What a vet may do about it: nothing where anything absolute is in breach. */

@@ -4,6 +4,7 @@ import type { AirStop, EnduranceView, StopLimitView } from '../sheet'
 import type { Assessed } from './assessed'
 import type { SheetFacts } from './facts'
 import type { JourneyLeg, PlannedAir } from './journey'
+import { capital, legsInWords } from './words'
 
 /**
  * Stop limits of each crate: the strictest of its occupants on every leg, and over the legs whose planned air lies inside
@@ -24,8 +25,10 @@ export function stopLimitViews(
       const byLeg = journey.flatMap(({ leg, ordinal, air }) => {
         const onLeg = own.filter(({ legId }) => legId === leg.id)
         if (onLeg.length === 0) return []
-        const stop = strictest(onLeg)
-        return [{ legId: leg.id, ordinal, ...stop, plannedInside: isInside(air, stop) }]
+        const counted = onLeg.map((limit) => afterOverride(limit, assessed))
+        const stop = strictest(counted)
+        const overridden = counted.some((limit, index) => limit !== onLeg[index])
+        return [{ legId: leg.id, ordinal, ...stop, plannedInside: isInside(air, stop), overridden }]
       })
       const inside = byLeg.filter(({ plannedInside }) => plannedInside)
       return [
@@ -38,6 +41,31 @@ export function stopLimitViews(
         },
       ]
     })
+}
+
+/** Where a vet has overridden the alarm of a side, the driver's limit there keeps the critical one instead. */
+function afterOverride(limit: StopLimit, { effective, fact }: Assessed): StopLimit {
+  const { ifOverridden } = limit
+  if (ifOverridden === undefined) return limit
+  const sides = effective.overridden.flatMap(({ findingIndex }) => {
+    const finding = fact.result.findings[findingIndex]
+    const here = finding?.animalId === limit.animalId && finding.legId === limit.legId
+    return here && finding.side !== undefined ? [finding.side] : []
+  })
+  if (sides.length === 0) return limit
+  return {
+    ...limit,
+    ...(sides.includes('high') && ifOverridden.aboveC !== undefined && { aboveC: ifOverridden.aboveC }),
+    ...(sides.includes('low') && ifOverridden.belowC !== undefined && { belowC: ifOverridden.belowC }),
+  }
+}
+
+/** Said under limits that an override moved; empty where none did. */
+export function overriddenLimitWords({ byLeg }: Pick<StopLimitView, 'byLeg'>): string {
+  const moved = byLeg.filter(({ overridden }) => overridden).map(({ ordinal }) => ordinal)
+  return moved.length === 0
+    ? ''
+    : `${capital(legsInWords(moved))} overridden by the vet: 3\u00a0°C inside what keeps the critical limit.`
 }
 
 /** null on a side means that no air in the range keeps the limit; then there is no figure to print for that leg. */
