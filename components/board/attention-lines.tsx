@@ -26,7 +26,7 @@ export function AttentionLines({ lines, nowMs }: { lines: readonly AttentionLine
 
 function LineWords({ line: { row, kind }, nowMs }: { line: AttentionLine; nowMs: number }) {
   const leaves = <Leaves leavesMs={row.leaves?.ms ?? null} nowMs={nowMs} />
-  const deciding = row.deciding === '' ? '' : `: ${row.deciding}`
+  const deciding = row.deciding === '' ? '' : `: ${row.deciding.split('; ')[0]}`
   switch (kind) {
     case 'no-go':
       return (

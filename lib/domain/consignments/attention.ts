@@ -9,8 +9,8 @@ const SOON_MS = 48 * 3_600_000
 const MOST = 5
 
 /**
- * What waits for a decision of the desk, soonest first: NO-GO that leaves within two days, assessments that no longer
- * speak of their plan, and what the vet sent back. Each consignment once, by the first that applies.
+ * What waits for a decision of the desk, soonest first: what the vet sent back, NO-GO that leaves within two days, and
+ * assessments that no longer speak of their plan. Each consignment once, by the first that applies.
  */
 export async function attentionLines(actor: Actor, now: Date): Promise<AttentionLine[]> {
   const ask = async (kind: AttentionLine['kind'], query: Partial<BoardQuery>) => {
@@ -18,11 +18,11 @@ export async function attentionLines(actor: Actor, now: Date): Promise<Attention
     return rows.map((row) => ({ row, kind }))
   }
   const lines = [
+    ...(await ask('returned', { state: ['returned'] })),
     ...(await ask('no-go', { verdict: ['no-go'] })).filter(({ row }) =>
       leavesSoon(row.leaves?.ms ?? null, now),
     ),
     ...(await ask('out-of-date', { verdict: ['out-of-date'] })),
-    ...(await ask('returned', { state: ['returned'] })),
   ]
   const seen = new Set<number>()
   return lines
