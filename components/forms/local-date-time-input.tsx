@@ -46,6 +46,8 @@ export function LocalDateTimeInput({
   // While it has the focus the field shows what is being typed; the value follows as soon as it can be read.
   const [typed, setTyped] = useState<string | null>(null)
   const time = resolveLocalTime(value, zone, offsetMin ?? null)
+  // Asked for as long as the hour comes twice: a choice once made can be seen, and changed.
+  const both = resolveLocalTime(value, zone, null)
   const noteId = `${id}-note`
   const describedBy = join(hint ? `${id}-hint` : '', noteId, error ? `${id}-error` : '')
   const zoneWords = time.kind === 'instant' ? zoneName(time.instantMs, zone) : ''
@@ -77,17 +79,18 @@ export function LocalDateTimeInput({
           {time.kind === 'instant' &&
             `${dayDate(time.instantMs, zone)}, ${zoneWithOffset(time.instantMs, zone)}`}
           {time.kind === 'missing' &&
-            `The clock there skips this time; the next one is ${localText(time.nextLocal)}.`}
+            `The clock there goes from ${time.beforeLabel} to ${time.afterLabel} and skips this time; the next one is ${localText(time.nextLocal)}.`}
         </span>
       </Field>
-      {time.kind === 'doubled' &&
+      {both.kind === 'doubled' &&
         (question ?? (
           <Radios
             id={`${id}-which`}
             name={`${id}-which`}
             label="The clock there shows this hour twice. Which one?"
             inRow
-            options={time.choices.map((choice, index) => ({
+            chosen={String(offsetMin ?? '')}
+            options={both.choices.map((choice, index) => ({
               value: String(choice.offsetMin),
               words: `${index === 0 ? 'first' : 'second'}, ${choice.label}`,
             }))}

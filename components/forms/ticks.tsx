@@ -57,7 +57,10 @@ export interface Option {
   refused?: string
 }
 
-/** One of a few, all in view. `name` and the rest go to every ring, so that one register() serves them all. */
+/**
+ * One of a few, all in view. `name` and the rest go to every ring, so that one register() serves them all; without one,
+ * `chosen` says which ring is filled.
+ */
 export function Radios({
   id,
   label,
@@ -66,8 +69,9 @@ export function Radios({
   className,
   options,
   inRow = false,
+  chosen,
   ...rest
-}: FieldFace & NativeInput & { options: readonly Option[]; inRow?: boolean }) {
+}: FieldFace & NativeInput & { options: readonly Option[]; inRow?: boolean; chosen?: string }) {
   return (
     <FieldSet {...{ id, legend: label, hint, error, className }}>
       <span className={join('flex gap-x-4 gap-y-1', inRow ? 'flex-wrap' : 'flex-col')}>
@@ -81,6 +85,7 @@ export function Radios({
           >
             <input
               {...rest}
+              {...(chosen !== undefined && { checked: chosen === option.value })}
               id={`${id}-${option.value}`}
               type="radio"
               value={option.value}

@@ -20,8 +20,8 @@ export type ResolvedTime =
   | { kind: 'empty' }
   | { kind: 'malformed' }
   | { kind: 'unknown-zone' }
-  /** The clock jumps over this time; `nextLocal` is the first wall time after the gap. */
-  | { kind: 'missing'; nextLocal: string }
+  /** The clock jumps over this time; `nextLocal` is the first wall time after the gap, between the two labels. */
+  | { kind: 'missing'; nextLocal: string; beforeLabel: string; afterLabel: string }
   /** The clock shows this time twice and nobody has said which is meant. */
   | { kind: 'doubled'; choices: OffsetChoice[] }
 
@@ -43,7 +43,7 @@ export function resolveLocalTime(local: string, zone: string, chosenOffsetMin: n
   const chosen = choices.find(({ offsetMin }) => offsetMin === chosenOffsetMin)
   const only = choices.length === 1 ? choices[0] : chosen
   if (only) return { kind: 'instant', ...only }
-  if (choices.length === 0) return { kind: 'missing', nextLocal: firstWallTimeAfterGap(wallMs, zone) }
+  if (choices.length === 0) return gapOver(wallMs, zone)
   return {
     kind: 'doubled',
     choices: choices.map((choice) => ({ ...choice, label: zoneLabel(choice.instantMs, zone) })),
@@ -112,7 +112,8 @@ function offsetsAround(wallMs: number, zone: string): number[] {
   return [...new Set([wallMs - dayMs, wallMs, wallMs + dayMs].map((ms) => zoneOffsetMin(ms, zone)))]
 }
 
-function firstWallTimeAfterGap(wallMs: number, zone: string): string {
+/** The gap a wall time lies in: what the clock shows next, and what its zone is called before and after. */
+function gapOver(wallMs: number, zone: string): Extract<ResolvedTime, { kind: 'missing' }> {
   const dayMs = 24 * 60 * MINUTE_MS
   const before = zoneOffsetMin(wallMs - dayMs, zone)
   let low = wallMs - before * MINUTE_MS - dayMs
@@ -123,7 +124,12 @@ function firstWallTimeAfterGap(wallMs: number, zone: string): string {
     if (zoneOffsetMin(middle, zone) === before) low = middle
     else high = middle
   }
-  return toLocalTime(high, zone)
+  return {
+    kind: 'missing',
+    nextLocal: toLocalTime(high, zone),
+    beforeLabel: zoneLabel(low, zone),
+    afterLabel: zoneLabel(high, zone),
+  }
 }
 
 function wallTimeMs(local: string): number | null {

@@ -36,12 +36,13 @@ describe('a wall time and its instant', () => {
   })
 
   it.each([
-    ['Europe/London', '2026-03-29T01:30', '2026-03-29T02:00'],
-    ['America/New_York', '2026-03-08T02:15', '2026-03-08T03:00'],
-  ])('%s never shows %s', (zone, local, nextLocal) => {
-    expect(resolveLocalTime(local, zone, null)).toEqual({ kind: 'missing', nextLocal })
+    ['Europe/London', '2026-03-29T01:30', '2026-03-29T02:00', 'GMT (UTC)', 'BST (UTC+1)'],
+    ['America/New_York', '2026-03-08T02:15', '2026-03-08T03:00', 'EST (UTC−5)', 'EDT (UTC−4)'],
+  ])('%s never shows %s', (zone, local, nextLocal, beforeLabel, afterLabel) => {
+    const missing = { kind: 'missing', nextLocal, beforeLabel, afterLabel }
+    expect(resolveLocalTime(local, zone, null)).toEqual(missing)
     // A choice of offset cannot make an hour that never was.
-    expect(resolveLocalTime(local, zone, 60)).toEqual({ kind: 'missing', nextLocal })
+    expect(resolveLocalTime(local, zone, 60)).toEqual(missing)
   })
 
   it.each([

@@ -94,7 +94,10 @@ function mealReasons(animal: PlanAnimal, index: number, timeline: Timeline): Rea
     if (time.kind === 'malformed') return [reason(at, `${words}: “${typed}” is not a date and a time.`)]
     if (time.kind === 'missing') {
       const next = time.nextLocal.replace('T', ' ')
-      return [reason(at, `${words}: the clock never shows ${typed}. The next time it shows is ${next}.`)]
+      const change = `it goes from ${time.beforeLabel} to ${time.afterLabel} there`
+      return [
+        reason(at, `${words}: the clock never shows ${typed}, ${change}. The next time it shows is ${next}.`),
+      ]
     }
     if (time.kind !== 'instant' || timeline.departureMs === null) return []
     const beforeHours = (timeline.departureMs - time.instantMs) / 3_600_000

@@ -72,7 +72,7 @@ function clockReasons(
       return [
         reason(
           path,
-          `${words}: the clock at ${place} never shows ${typed}, it is put forward there. The next time it shows is ${time.nextLocal.replace('T', ' ')}.`,
+          `${words}: the clock at ${place} never shows ${typed}, it goes from ${time.beforeLabel} to ${time.afterLabel} there. The next time it shows is ${time.nextLocal.replace('T', ' ')}.`,
         ),
       ]
     case 'doubled':
