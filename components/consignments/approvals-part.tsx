@@ -36,7 +36,7 @@ export function ApprovalsPart({ approvals }: { approvals: readonly ApprovalLine[
             <Cell label="Decision">
               <Lines
                 first={DECISION_WORDS[line.decision]}
-                second={line.reasons || line.conditions.join('. ')}
+                second={[line.statement, line.reasons, line.conditions.join('. ')].filter(Boolean).join(' ')}
               />
             </Cell>
             <Cell label="Signed by">

@@ -8,7 +8,7 @@ import { ErrorSummary } from '@/components/ui/error-summary'
 import { Notice } from '@/components/ui/notice'
 import type { ReviewView } from '@/lib/views/review'
 import type { FindingView } from '@/lib/views/sheet'
-import { isBreach } from './override-words'
+import { concernedIndexes, isBreach } from './override-words'
 import { chosenOverrides } from './review-form-schema'
 import type { ReviewForm } from './review-form-schema'
 import type { ReviewFormState } from './review-desk'
@@ -83,7 +83,7 @@ export function DecisionPart({
               examined={values.examined}
               marks={marks}
               conditionCount={view.sheet.conditions.length + values.conditions.length}
-              overridden={overridden.map(({ finding }) => finding)}
+              overridden={overriddenWords(overridden, view, values.crateIds)}
             />
             <Radios
               {...form.field('examined')}
@@ -119,6 +119,18 @@ export function DecisionPart({
       </section>
     </>
   )
+}
+
+/** As the server names them: every single finding that goes along, in the order of the assessment. */
+function overriddenWords(
+  overridden: readonly { finding: FindingView }[],
+  { crates, subjects }: ReviewView,
+  crateIds: readonly string[],
+): string[] {
+  const indexes = overridden.flatMap(({ finding }) =>
+    concernedIndexes(finding, { crates, subjects }, crateIds),
+  )
+  return indexes.sort((a, b) => a - b).flatMap((index) => subjects[index]?.words ?? [])
 }
 
 function refusedApproval(open: readonly FindingView[]): string | undefined {

@@ -36,7 +36,7 @@ export function whyNotOverridable(
 /** What a signature over these crates is about, and what of the findings concerns it. */
 export interface Coverage {
   crates: readonly Pick<ReviewCrate, 'crateId' | 'animals'>[]
-  subjects: readonly FindingSubject[]
+  subjects: readonly Pick<FindingSubject, 'crateId' | 'animalId'>[]
 }
 
 /**

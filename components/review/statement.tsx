@@ -1,7 +1,6 @@
 import { approvalStatement } from '@/lib/schemas/approval-statement'
-import type { FindingView } from '@/lib/views/sheet'
 
-/** What is about to be signed: the statement word for word, and the crates, conditions and findings it goes with. */
+/** What is about to be signed, word for word: it names the crates and every finding that is overridden. */
 export function Statement({
   examined,
   marks,
@@ -12,30 +11,21 @@ export function Statement({
   examined: string
   marks: readonly string[]
   conditionCount: number
-  overridden: readonly FindingView[]
+  /** Each in full, in the order of the assessment. */
+  overridden: readonly string[]
 }) {
+  const answer = examined === '' ? null : examined === 'yes'
   return (
     <div className="mt-1 text-small">
-      <p>
-        {examined === ''
-          ? approvalStatement({ examined: false }).split('. ')[0]
-          : approvalStatement({ examined: examined === 'yes' })}
-        {examined === '' && '. The statement goes on with your answer below.'}
-      </p>
+      <p>{approvalStatement({ examined: answer, crateMarks: marks, overridden })}</p>
+      {answer === null && (
+        <p className="mt-1 text-mute">Your answer below, whether you have examined, goes into it.</p>
+      )}
       <dl className="mt-1.5 grid grid-cols-[auto_1fr] gap-x-3 gap-y-0.5">
-        <dt className="text-mute">Crates</dt>
-        <dd className="crate m-0">{marks.join(', ') || 'none'}</dd>
         <dt className="text-mute">Conditions</dt>
         <dd className="m-0">{conditionCount === 0 ? 'none' : conditionCount}</dd>
         <dt className="text-mute">Overridden</dt>
-        <dd className="m-0">
-          {overridden.length === 0 ? 'nothing' : null}
-          {overridden.map((finding) => (
-            <span key={finding.number} className="block">
-              {finding.asked} ({finding.whoLegWords})
-            </span>
-          ))}
-        </dd>
+        <dd className="m-0">{overridden.length === 0 ? 'nothing' : overridden.length}</dd>
       </dl>
     </div>
   )

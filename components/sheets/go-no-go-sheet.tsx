@@ -10,6 +10,7 @@ import { ConditionsTable } from './conditions-table'
 import { FindingsTable } from './findings-table'
 import { PaperLegs } from './legs-table'
 import { Cautions, Overrides, Provenance } from './provenance'
+import { Signatures } from './signatures'
 import { SheetCorridors } from './sheet-corridors'
 import { StopLimits } from './stop-limits'
 
@@ -95,6 +96,11 @@ export function GoNoGoSheet({ view }: { view: SheetView }) {
           >
             <FindingsTable findings={view.findings.slice(0, MOST_FINDINGS)} />
           </Part>
+          {view.approvals.length > 0 && (
+            <Part title="Vet’s approval">
+              <Signatures approvals={view.approvals} />
+            </Part>
+          )}
           <Part title="What this sheet speaks of">
             <Provenance view={view} />
           </Part>

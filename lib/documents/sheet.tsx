@@ -12,6 +12,7 @@ import { corridors } from './sheet/corridors'
 import { findingTable } from './sheet/finding-table'
 import { legTables } from './sheet/leg-table'
 import { overrideNotes } from './sheet/override-notes'
+import { signatures } from './sheet/signatures'
 import { speaksOf } from './sheet/speaks-of'
 import { stopLimits } from './sheet/stop-limits'
 
@@ -36,6 +37,7 @@ function blocksOf(view: SheetView): Block[] {
     ...stopLimits(view.stopLimits, view.firm),
     ...corridors(view),
     ...findingTable(view.findings),
+    ...signatures(view.approvals),
     ...speaksOf(view),
   ]
 }

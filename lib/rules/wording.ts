@@ -29,7 +29,7 @@ export function list(names: readonly string[]): string {
   return names.length < 2 ? last : `${names.slice(0, -1).join(', ')} and ${last}`
 }
 
-type NamedLeg = Pick<Leg, 'id' | 'kind' | 'flightPhase'>
+type NamedLeg = Pick<Leg, 'id' | 'kind'> & { flightPhase?: Leg['flightPhase'] | null }
 
 /** Words for a schedule: "on time", "all typical delays", "worst delay of leg 7 (ramp)". */
 export function scheduleWords(scheduleId: string, legs: readonly NamedLeg[]): string {
@@ -46,7 +46,7 @@ export function legWords(legId: string, legs: readonly NamedLeg[]): string {
 }
 
 function kindWords({ kind, flightPhase }: NamedLeg): string {
-  if (kind !== 'flight' || flightPhase === undefined) return LEG_KIND_WORDS[kind]
+  if (kind !== 'flight' || !flightPhase) return LEG_KIND_WORDS[kind]
   return flightPhase === 'airborne' ? 'airborne' : 'doors shut'
 }
 

@@ -14,6 +14,8 @@ export interface ApprovalLine {
   registration: string
   signedAt: Moment
   examined: boolean
+  /** As signed, word for word; empty where it was returned. */
+  statement: string
   reasons: string
   conditions: string[]
   /** Counts for the plan as it stands now. */

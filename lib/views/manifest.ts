@@ -1,6 +1,7 @@
 import type {
   AirStop,
   AnimalView,
+  ApprovalView,
   BodyLimits,
   ConditionView,
   LegView,
@@ -49,23 +50,6 @@ export interface ManifestLeg extends Omit<LegView, 'cells'> {
   decidedWords: string
   /** Letter of the crate that has least to spare. */
   crateLetter: string
-}
-
-export interface ApprovalView {
-  vetName: string
-  registration: string
-  registrationCountry: string
-  /** Day, "2027-03-31". */
-  registrationExpires: string
-  /** "Record checked by admin 14 Jan 2026". */
-  checkedWords: string
-  signedAt: Moment
-  crateMarks: string[]
-  /** The statement as signed, word for word. */
-  statement: string
-  examined: boolean
-  /** "Holds while: …"; empty until envelopes exist. */
-  envelopeWords: string
 }
 
 export interface CallView {

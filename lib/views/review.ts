@@ -36,6 +36,8 @@ export interface ReviewView {
 export interface FindingSubject {
   crateId: string | null
   animalId: string | null
+  /** The finding in full, as the statement names it where it is overridden. */
+  words: string
 }
 
 export interface ReviewCrate {

@@ -186,13 +186,31 @@ export interface FindingView {
 /** A finding a vet has overridden; stands beside the stamp wherever the stamp stands. */
 export interface OverrideView {
   findingIndex: number
-  /** "alarm limit, Otto (D), legs 7 and 8" */
+  /** In full: "Body at most 39.7 °C, alarm limit, Otto (D), leg 7 (ramp)" */
   findingWords: string
   reason: string
   vetName: string
   signedAt: Moment
   minutesPast: number | null
   worstBodyC: number | null
+}
+
+/** A vet’s signature in force, with the record it was checked against. */
+export interface ApprovalView {
+  vetName: string
+  registration: string
+  registrationCountry: string
+  /** Day, "2027-03-31". */
+  registrationExpires: string
+  /** "Record checked by admin 14 Jan 2026". */
+  checkedWords: string
+  signedAt: Moment
+  crateMarks: string[]
+  /** The statement as signed, word for word. */
+  statement: string
+  examined: boolean
+  /** "Holds while: …"; empty until envelopes exist. */
+  envelopeWords: string
 }
 
 /** Stop limits of one crate: the strictest of the legs whose planned air lies inside it, and all by leg. */
@@ -327,6 +345,8 @@ export interface SheetView {
   headlineMore: string[]
   margin: Margin
   overrides: OverrideView[]
+  /** Signatures in force. */
+  approvals: ApprovalView[]
 
   animals: AnimalView[]
   legs: LegView[]

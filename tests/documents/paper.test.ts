@@ -3,6 +3,7 @@ import { describe, expect, it } from 'vitest'
 import { qrModules, qrPicture } from '@/lib/documents/parts/qr'
 import { renderManifest, renderSheet } from '@/lib/documents/render'
 import { readDocumentCode } from '@/lib/documents/verify'
+import { approvalStatement } from '@/lib/schemas/approval-statement'
 import type { SheetView } from '@/lib/views/sheet'
 import { manifest2433 } from './fixtures/manifest-2433'
 import { sheet2441 } from './fixtures/sheet-2441'
@@ -75,6 +76,36 @@ describe('the go/no-go sheet on paper', () => {
       for (let index = 1; index <= 27; index += 1) expect(text).toContain(`Stretch ${index} of the road`)
       for (let index = 1; index <= 60; index += 1) expect(text).toContain(`Asked for the ${index}th time`)
       expect(text).toContain(`Sheet ${pages} of ${pages}`)
+    },
+    SLOW,
+  )
+})
+
+describe('a vet’s signature on paper', () => {
+  const [approval] = manifest2433.approvals
+  if (approval === undefined) throw new Error('The fixture is signed.')
+  const statement = approvalStatement({
+    examined: false,
+    crateMarks: ['2441-A', '2441-B', '2441-D'],
+    overridden: [1, 2, 3, 4, 5].map(
+      (leg) =>
+        `Keeping warm takes under 60 % of what the animal can do, never an hour on end above it, Otto (D), leg ${leg} (road): 85 min past, body to 36.9 °C`,
+    ),
+  })
+  const signed = { ...approval, crateMarks: ['2441-A', '2441-B', '2441-D'], statement }
+
+  it(
+    'names crates and findings in full on the sheet and on the manifest, however many',
+    async () => {
+      const sheet = await renderSheet({ ...sheet2441, approvals: [signed] })
+      const manifest = await renderManifest({ ...manifest2433, approvals: [signed, signed] })
+      for (const { bytes } of [sheet, manifest]) {
+        const text = (await textOf(bytes)).replace(/\s+/g, ' ')
+        // A statement stands in a column: its lines are told apart by what stands beside them.
+        for (const leg of [1, 2, 3, 4, 5]) expect(text).toContain(`Otto (D), leg ${leg} (road): 85 min past`)
+        for (const words of ['set-ups 2441-A, 2441-B and 2441-D', 'I override by name', signed.vetName])
+          expect(text).toContain(words)
+      }
     },
     SLOW,
   )

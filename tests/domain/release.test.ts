@@ -66,7 +66,7 @@ describe('release', () => {
       holder: 'driver',
     })
     expect((await planInForce(row))?.plan).toEqual(place.plan)
-    expect(await models.OutboxMessage.findAll()).toMatchObject([
+    expect(await models.OutboxMessage.findAll({ where: { subject: 'Manifest' } })).toMatchObject([
       { toAddress: 'j.strand@example.org', state: 'waiting' },
     ])
   })

@@ -7,8 +7,10 @@ import { returnCrates } from '@/lib/domain/approvals/return'
 import { withdrawApproval } from '@/lib/domain/approvals/withdraw'
 import { recordAssessment } from '@/lib/domain/assessments/record'
 import { assessConsignment } from '@/lib/domain/consignments/assess'
+import { loadDeskPage } from '@/lib/domain/consignments/desk-page'
 import { saveConsignment } from '@/lib/domain/consignments/save'
 import { submitConsignment } from '@/lib/domain/consignments/submit'
+import { approvalStatement } from '@/lib/schemas/approval-statement'
 import { models } from '@/models'
 import { emptyTables } from '../support/db'
 import {
@@ -171,6 +173,7 @@ describe('a vet’s signature', () => {
     const named = await signature(place, consignmentId, {
       overrides: [{ findingIndex: 0, reason: 'Short, and I ride along with him.' }],
     })
+    const shown = await loadReview(place.as('vet'), { consignmentId, crateId: null }, NOW)
     expect(await approveCrates(place.as('vet'), named, NOW)).toMatchObject({ state: 'approved' })
     expect(await models.Override.findAll()).toMatchObject([
       {
@@ -182,6 +185,24 @@ describe('a vet’s signature', () => {
       },
     ])
     expect(await load(consignmentId)).toMatchObject({ verdict: 'conditional' })
+    // What the page showed is what is stored, word for word, on the approval of every crate it covers.
+    const statement = approvalStatement({
+      examined: true,
+      crateMarks: shown.crates.map(({ mark }) => mark),
+      overridden: [shown.subjects[0]?.words ?? ''],
+    })
+    const [mark] = shown.crates.map((crate) => crate.mark)
+    expect(statement.replaceAll('\u00a0', ' ')).toBe(
+      `I approve the crate set-ups ${mark} and ${mark?.replace('A', 'B')} on the facts shown. I override by name: Body at most 39.7 °C, alarm, Moss (A), leg 1 (road): 12 min past, body to 39.9 °C. I have examined the animal. This is not a certificate of fitness to travel.`,
+    )
+    const approvals = await models.Approval.findAll({ where: { consignmentId } })
+    expect(approvals.map((approval) => approval.statement)).toEqual([statement, statement])
+    const after = await loadDeskPage(place.as('dispatcher'), { consignmentId }, NOW)
+    expect(after.sheet.approvals).toMatchObject([{ crateMarks: [mark, mark?.replace('A', 'B')], statement }])
+    expect(after.approvals.map((line) => line.statement)).toEqual([statement, statement])
+    expect(after.sheet.overrides).toMatchObject([
+      { findingWords: 'Body at most 39.7 °C, alarm, Moss (A), leg 1 (road)' },
+    ])
   })
 
   it.each([

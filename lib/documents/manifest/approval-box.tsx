@@ -5,7 +5,8 @@ import { CONTENT_WIDTH, Heading } from '@/lib/documents/parts/paper'
 import { plainDate } from '@/lib/documents/parts/made-words'
 import { INK, px, Words } from '@/lib/documents/parts/words'
 import { dayDateYear, localTime } from '@/lib/views/format'
-import type { ApprovalView, ManifestView } from '@/lib/views/manifest'
+import type { ManifestView } from '@/lib/views/manifest'
+import type { ApprovalView } from '@/lib/views/sheet'
 import { signature } from './signature'
 
 const RECORD = 236

@@ -1,6 +1,7 @@
 import 'server-only'
 import type { Transaction } from 'sequelize'
 import { SteadfoldError } from '@/lib/errors'
+import { crateMark } from '@/lib/planning/crate-mark'
 import type { Actor } from '@/lib/policies/actor'
 import { can } from '@/lib/policies/can'
 import { signedFigures } from '@/lib/rules/effective-verdict'
@@ -8,6 +9,7 @@ import type { ApproveCrates } from '@/lib/schemas/approval'
 import { approvalStatement } from '@/lib/schemas/approval-statement'
 import type { Plan } from '@/lib/schemas/plan'
 import type { ConsignmentState } from '@/lib/states/consignment'
+import { overrideInFull } from '@/lib/views/override-words'
 import { models } from '@/models'
 import type { Approval, Consignment } from '@/models'
 import { act } from '../act'
@@ -58,10 +60,24 @@ export async function approveCrates(actor: Actor, input: ApproveCrates, now: Dat
       const again = crates.find(({ id }) => signed.has(id))
       if (again) throw new SteadfoldError('conflict', `Crate ${again.letter} is signed already.`)
       const overrides = signedOverrides(findings, crates, input.overrides)
+      const statement = approvalStatement({
+        examined: input.examined,
+        crateMarks: crates.map(({ letter }) => crateMark(row.mark, letter)),
+        overridden: findings
+          .filter((finding) => overrides.some((one) => one.finding === finding))
+          .map((finding) => overrideInFull(finding, plan)),
+      })
 
       const approvals: Approval[] = []
       for (const crate of crates) {
-        const facts = { row, assessmentId: assessment.id, crateRef: crate.id, signerId: actor.id, now }
+        const facts = {
+          row,
+          assessmentId: assessment.id,
+          crateRef: crate.id,
+          signerId: actor.id,
+          statement,
+          now,
+        }
         approvals.push(await insertApproval(tx, input, registration, facts))
       }
       await insertOverrides(tx, approvals, overrides)
@@ -87,9 +103,16 @@ async function insertApproval(
   tx: Transaction,
   input: ApproveCrates,
   registration: Registration,
-  facts: { row: Consignment; assessmentId: number; crateRef: string; signerId: number; now: Date },
+  facts: {
+    row: Consignment
+    assessmentId: number
+    crateRef: string
+    signerId: number
+    statement: string
+    now: Date
+  },
 ): Promise<Approval> {
-  const { row, assessmentId, crateRef, signerId, now } = facts
+  const { row, assessmentId, crateRef, signerId, statement, now } = facts
   return models.Approval.create(
     {
       consignmentId: row.id,
@@ -103,7 +126,7 @@ async function insertApproval(
         .filter(({ crateId }) => crateId === crateRef)
         .map(({ text }) => text),
       examined: input.examined,
-      statement: approvalStatement(input),
+      statement,
       signerId,
       ...registration,
       signedAt: now,

@@ -21,6 +21,7 @@ export async function approvalLines(row: Consignment): Promise<ApprovalLine[]> {
     registration: `${approval.registrationNumber}, ${approval.registrationCountry}`,
     signedAt: deskMoment(approval.signedAt),
     examined: approval.examined,
+    statement: approval.statement,
     reasons: approval.reasons,
     conditions: approval.conditions.map(({ text }) => text),
     stands:

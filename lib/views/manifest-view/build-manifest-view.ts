@@ -1,17 +1,9 @@
 import type { Plan, PlanCrate } from '@/lib/schemas/plan'
 import { dayDate, dayDateYear, figure, localTime, localTimeWithOffset } from '../format'
-import type {
-  ApprovalView,
-  CallView,
-  ManifestCrate,
-  ManifestLeg,
-  ManifestView,
-  PartyView,
-  SealView,
-} from '../manifest'
+import type { CallView, ManifestCrate, ManifestLeg, ManifestView, PartyView, SealView } from '../manifest'
 import type { LegCell, LegView, Moment, SheetView, StopLimitView } from '../sheet'
 import { buildSheetView } from '../sheet-view/build-sheet-view'
-import type { ApprovalFact, SheetFacts } from '../sheet-view/facts'
+import type { SheetFacts } from '../sheet-view/facts'
 import { capital } from '../sheet-view/words'
 import { handlingOf } from './handling'
 
@@ -74,7 +66,7 @@ export function buildManifestView(facts: ManifestFacts): ManifestView {
     animals: sheet.animals,
     crates: crates(facts, sheet),
     legs: sheet.legs.map((leg) => manifestLeg(leg, sheet)),
-    approvals: approvals(facts),
+    approvals: sheet.approvals,
     standingWords: facts.standingWords,
     conditions: sheet.conditions,
     handling: handlingOf(plan),
@@ -192,36 +184,6 @@ function worstFirst(a: LegCell, b: LegCell): number {
   const rank = ({ verdict }: LegCell) => (verdict === null ? 3 : RANK[verdict])
   const room = ({ margin }: LegCell) => (margin.outsideAirC ?? 99) * 1000 + (margin.minutes ?? 999)
   return rank(a) - rank(b) || room(a) - room(b)
-}
-
-/** One box for a signature, though it may cover several crates. */
-function approvals({ approvals: rows, plan, consignment, firm }: ManifestFacts): ApprovalView[] {
-  const signed = new Map<string, ApprovalFact[]>()
-  for (const row of rows.filter(({ inForce, decision }) => inForce && decision !== 'returned')) {
-    const key = JSON.stringify([row.signerName, row.signedAtMs, row.statement])
-    signed.set(key, [...(signed.get(key) ?? []), row])
-  }
-  return [...signed.values()].flatMap((group) => {
-    const [approval] = group
-    if (approval === undefined) return []
-    const letters = group
-      .flatMap(({ crateId }) => plan.crates.find(({ id }) => id === crateId)?.letter ?? [])
-      .sort()
-    return [
-      {
-        vetName: approval.signerName,
-        registration: approval.registrationNumber,
-        registrationCountry: approval.registrationCountry,
-        registrationExpires: approval.registrationExpiresOn,
-        checkedWords: approval.checkedWords,
-        signedAt: { ms: approval.signedAtMs, zone: firm.zone },
-        crateMarks: letters.map((letter) => `${consignment.mark}-${letter}`),
-        statement: approval.statement,
-        examined: approval.examined,
-        envelopeWords: '',
-      },
-    ]
-  })
 }
 
 function calls({ firm, plan, vetOnCall }: ManifestFacts): CallView[] {

@@ -2,6 +2,7 @@ import { crateMark } from '@/lib/planning/crate-mark'
 import { earlySignsOf } from '@/lib/species/early-signs'
 import { STATE_WORDS } from '@/lib/states/consignment'
 import { crateStamp } from '../crate-stamp'
+import { overrideInFull } from '../override-words'
 import type { ReviewCrate, ReviewView, SignedApproval, SignerView } from '../review'
 import type { SheetView } from '../sheet'
 import type { SheetFacts } from '../sheet-view/facts'
@@ -66,9 +67,10 @@ export function buildReviewView(facts: ReviewFacts): ReviewView | null {
     sheet,
     crates,
     chosen,
-    subjects: (facts.sheet.assessment?.result.findings ?? []).map(({ crateId, animalId }) => ({
-      crateId: crateId ?? null,
-      animalId: animalId ?? null,
+    subjects: (facts.sheet.assessment?.result.findings ?? []).map((finding) => ({
+      crateId: finding.crateId ?? null,
+      animalId: finding.animalId ?? null,
+      words: overrideInFull(finding, facts.sheet.plan),
     })),
     signer: facts.signer,
     signed: newestFirst(approvals.filter(({ voidedAt }) => voidedAt === null)),

@@ -1,6 +1,7 @@
 import { STATE_WORDS } from '@/lib/states/consignment'
 import type { ConditionView, SheetView } from '../sheet'
 import { animalViews, stampOf } from './animals'
+import { approvalViews } from './approvals'
 import { type Assessed, assessedOf } from './assessed'
 import { sheetCharts } from './charts'
 import { conditionsRemark, conditionViews } from './conditions'
@@ -51,7 +52,8 @@ export function buildSheetView(facts: SheetFacts): SheetView {
     stamp: stampOf(verdict?.verdict, { assessed }, conditions.length),
     ...headlineOf(assessed, animals, journey),
     margin: marginOf(finding),
-    overrides: assessed === null ? [] : overrideViews(assessed, naming, firm.zone),
+    overrides: assessed === null ? [] : overrideViews(assessed, plan, firm.zone),
+    approvals: approvalViews(facts),
     animals,
     legs: legViews(journey, animals, assessed, conditions),
     conditions,
@@ -123,7 +125,6 @@ function namingOf({ plan }: SheetFacts, journey: JourneyLeg[]): Naming {
           ? `${crate.letter} ${names.get(animalId) ?? ''}`
           : crate.letter
     },
-    nameOf: (animalId) => names.get(animalId) ?? '',
     crateLetterOf: (crateId) => plan.crates.find(({ id }) => id === crateId)?.letter ?? '',
     ordinalOf: (legId) => ordinals.get(legId),
   }

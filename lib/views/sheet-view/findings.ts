@@ -1,12 +1,14 @@
+import { isNarrow } from '@/lib/rules/conditions'
 import type { Finding, FindingStatus } from '@/lib/rules/result'
+import type { Plan } from '@/lib/schemas/plan'
+import { findingInFull } from '../override-words'
 import type { ConditionView, FindingView, OverrideView } from '../sheet'
 import type { Assessed } from './assessed'
-import { BASIS_WORDS, legsInWords, limitWords, listed, marginOf, spareWords, valueWords } from './words'
+import { BASIS_WORDS, legsInWords, listed, marginOf, spareWords, valueWords } from './words'
 
 /** What the words of a finding are made with. */
 export interface Naming {
   letterOf: (animalId: string) => string
-  nameOf: (animalId: string) => string
   crateLetterOf: (crateId: string) => string
   ordinalOf: (legId: string) => number | undefined
 }
@@ -149,6 +151,7 @@ function statusOf(
     case 'judgement':
       return { statusBold: '', statusWords: 'For the vet to judge' }
     case 'met':
+      if (isNarrow(finding)) return { statusBold: 'Narrow.', statusWords: 'Met, with under 3 °C to spare' }
       return {
         statusBold: '',
         statusWords: finding.limitKind === 'critical' ? 'Met. Nobody may override it' : 'Met',
@@ -191,18 +194,14 @@ function spareOf({ limit, value, side, unit }: Finding): string {
 }
 
 /** Overrides in force, each with the finding it names, as they stand beside the stamp. */
-export function overrideViews(
-  { effective, original }: Assessed,
-  naming: Naming,
-  zone: string,
-): OverrideView[] {
+export function overrideViews({ effective, original }: Assessed, plan: Plan, zone: string): OverrideView[] {
   return effective.overridden.flatMap(({ findingIndex, by }) => {
     const finding = original[findingIndex]
     if (finding === undefined) return []
     return [
       {
         findingIndex,
-        findingWords: overriddenWords(finding, naming),
+        findingWords: findingInFull(finding, plan),
         reason: by.reason,
         vetName: by.signedBy,
         signedAt: { ms: by.signedAtMs, zone },
@@ -211,15 +210,6 @@ export function overrideViews(
       },
     ]
   })
-}
-
-function overriddenWords(finding: Finding, { nameOf, letterOf, ordinalOf }: Naming): string {
-  const { animalId, legId, limitKind } = finding
-  const ordinal = legId === undefined ? undefined : ordinalOf(legId)
-  const limit =
-    limitKind === 'alarm' || limitKind === 'critical' ? `${limitWords(finding)} limit` : limitWords(finding)
-  const who = animalId === undefined ? '' : `${nameOf(animalId)} (${letterOf(animalId)})`
-  return [limit, who, ordinal === undefined ? '' : `leg ${ordinal}`].filter(Boolean).join(', ')
 }
 
 function distinct(items: readonly (string | undefined)[]): string[] {
