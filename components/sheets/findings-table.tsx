@@ -88,15 +88,11 @@ export function FindingsTable({
   )
 }
 
-/** The bold part of the status stands in its place in the sentence. */
 function StatusWords({ finding: { statusWords, statusBold } }: { finding: FindingView }) {
-  const at = statusBold === '' ? -1 : statusWords.indexOf(statusBold)
-  if (at < 0) return statusWords
   return (
     <>
-      {statusWords.slice(0, at)}
-      <b>{statusBold}</b>
-      {statusWords.slice(at + statusBold.length)}
+      {statusBold && <b>{statusBold} </b>}
+      {statusWords}
     </>
   )
 }
