@@ -7,7 +7,7 @@ import { type FaceName, PAPER_FONTS } from '@/lib/tokens'
  */
 
 export type PaperFont = (typeof PAPER_FONTS)[number]
-export type FontFile = ReturnType<typeof open>
+export type FontFile = fontkit.Font & { set: Map<string, fontkit.GlyphRun>; _glyphs: object }
 
 const shared = globalThis as { steadfoldPaperFonts?: Map<string, FontFile> }
 
@@ -35,35 +35,38 @@ export function fontPath({ file }: Pick<PaperFont, 'file'>): string {
 }
 
 /**
- * A face for one document: the file's tables, with glyphs of its own. The library keeps each glyph with the letter it was
- * first asked for, and embedding a letter made of parts (i is ı and a dot) asks for the parts without a letter: in a later
- * document ı has none and is left out, “Şırnak” came out as “ırnak”.
- *
- * Words set before in the document are not set again, and the caller's features are copied: the library writes all it
- * has switched on into them, and the next words would ask for that.
+ * The file with no memory of an earlier document. The library keeps each glyph with the letter it was first asked for, and
+ * embedding a letter made of parts (i is ı and a dot) asks for the parts without a letter: in a later document ı has none
+ * and is left out, “Şırnak” came out as “ırnak”.
  */
-export function forOneDocument(file: FontFile): FontFile {
-  if (!('_glyphs' in file)) throw new Error('The font library keeps its glyphs elsewhere than it did.')
-  const face = Object.create(file, { _glyphs: { value: {} } }) as FontFile
-  const set = new Map<string, ReturnType<FontFile['layout']>>()
-  face.layout = (text, features, ...more) => {
-    const key = JSON.stringify([text, features, more])
-    const known = set.get(key)
-    if (known) return known
-    const own = Array.isArray(features) ? [...features] : features && { ...features }
-    const run = file.layout.call(face, text, own, ...more)
-    set.set(key, run)
-    return run
-  }
-  return face
+export function forNextDocument(font: PaperFont): FontFile {
+  const file = fontFile(font)
+  file._glyphs = {}
+  file.set.clear()
+  return file
 }
 
-function open(file: string) {
+function open(file: string): FontFile {
   const font = fontkit.openSync(fontPath({ file }))
-  if (!('layout' in font)) throw new Error(`${file} is a collection, not one font.`)
+  if (!('layout' in font) || !('_glyphs' in font))
+    throw new Error(`${file} is not one font as the library keeps it.`)
   // The renderer compares all names of two faces as text at each run of letters.
   Object.defineProperty(namesOf(font), 'toJSON', { value: () => file })
-  return font
+  const set = new Map<string, fontkit.GlyphRun>()
+  const layout = font.layout.bind(font)
+  return Object.assign(font, {
+    set,
+    _glyphs: {},
+    /** Words set before are not set again; features are copied, for the library writes all it switched on into them. */
+    layout: (...[text, features, ...more]: Parameters<typeof layout>) => {
+      const key = JSON.stringify([text, features, more])
+      const known = set.get(key)
+      if (known) return known
+      const run = layout(text, Array.isArray(features) ? [...features] : features && { ...features }, ...more)
+      set.set(key, run)
+      return run
+    },
+  })
 }
 
 function namesOf(font: object): object {

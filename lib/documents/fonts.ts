@@ -1,6 +1,6 @@
 import { Font } from '@react-pdf/renderer'
 import { FACES, type FaceName, PAPER_FONTS } from '@/lib/tokens'
-import { faceFile, fontFile, forOneDocument, fontPath, type PaperFont } from './faces'
+import { faceFile, fontPath, forNextDocument, type PaperFont } from './faces'
 
 /*
  * The paper's faces: full TrueType files, one for each weight. Subset files put other letters in place of those they lack
@@ -16,7 +16,7 @@ export function registerFreshFonts(): void {
     Font.register({ family, fontWeight: font.weight, fontStyle: font.style, src: fontPath(font) })
     const source = known[family]?.sources.at(-1)
     if (source === undefined) throw new Error(`The renderer did not take ${font.file}.`)
-    source.data = forOneDocument(fontFile(font))
+    source.data = forNextDocument(font)
     source.loadResultPromise = Promise.resolve()
   }
   Font.registerHyphenationCallback((word) => [word])

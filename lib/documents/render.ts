@@ -1,7 +1,9 @@
 import { renderToBuffer } from '@react-pdf/renderer'
+import { cloneElement } from 'react'
 import type { ManifestView } from '@/lib/views/manifest'
 import type { SheetView } from '@/lib/views/sheet'
 import { registerFreshFonts } from './fonts'
+import { runsOver } from './laid-out'
 import { manifest } from './manifest'
 import { assertPrintable } from './printable'
 import { goNoGoSheet } from './sheet'
@@ -42,15 +44,14 @@ function renderPlanned<View extends object>(view: View, plan: Plan<View>): Promi
 async function renderNow<View extends object>(view: View, plan: Plan<View>): Promise<RenderedDocument> {
   assertPrintable(view)
   for (const slack of SLACKS) {
-    const { document, sheets } = plan(view, slack)
     registerFreshFonts()
-    const bytes = await renderToBuffer(document)
-    if (pagesOf(bytes) === sheets) return { bytes, pages: sheets }
+    const { document, sheets } = plan(view, slack)
+    let over = false
+    const onRender = (said: object) => {
+      over = runsOver(said)
+    }
+    const bytes = await renderToBuffer(cloneElement(document, { onRender }))
+    if (!over) return { bytes, pages: sheets }
   }
   throw new Error('The document does not fit the sheets planned for it.')
-}
-
-/** Pages as the file itself counts them; the renderer adds one where a sheet ran over. */
-function pagesOf(bytes: Buffer): number {
-  return (bytes.toString('latin1').match(/\/Type \/Page\b(?!s)/g) ?? []).length
 }

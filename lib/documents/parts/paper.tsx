@@ -4,6 +4,8 @@ import { INK, Mark, px, typeset, Words } from './words'
 import { Text } from '@react-pdf/renderer'
 
 const PAGE_WIDTH = 794
+/** Sheets are planned, so the renderer need not look for places to break them; it would lay each out twice. */
+const PAGE_HEIGHT_PT = 841.89
 const BINDING = 68
 const OUTER = 30
 /** Room for what is printed, in pixels. */
@@ -29,7 +31,11 @@ export interface PaperProps {
 export function Paper(props: PaperProps) {
   const { mark, title, revision, sheet, sheets, code, madeWords, edgeWords, children } = props
   return (
-    <Page size="A4" style={{ backgroundColor: '#FFFFFF', color: INK.ink }}>
+    <Page
+      size="A4"
+      wrap={false}
+      style={{ minHeight: PAGE_HEIGHT_PT, backgroundColor: '#FFFFFF', color: INK.ink }}
+    >
       <Edge words={edgeWords} />
       <View style={{ position: 'absolute', top: px(TOP), left: px(BINDING), width: px(CONTENT_WIDTH) }}>
         {sheet === 1 ? <FirstHead {...props} /> : <NextHead {...props} />}
