@@ -239,7 +239,9 @@ async function launch(files, programs, port, forTests) {
     timeoutMs: START_MS,
   })
   if (ended !== undefined || !up)
-    throw new SetupError(`MariaDB did not start (${ended ?? 'no answer'}).\n${lastErrors(files.log, from)}`)
+    throw new SetupError(
+      `MariaDB did not start (${ended ?? 'no answer'}).\n${lastErrors(files.log, from)}\nIf its files are damaged, move ${files.folder} away (it may hold data) and start again: a new database is made.`,
+    )
   letLive()
   child.unref()
 }

@@ -45,6 +45,16 @@ export function whenNpmIsGone(act) {
   watch.unref()
 }
 
+/** The port a variable names, or the one given for it; says what to put where it is no port. */
+export function portFrom(name, otherwise) {
+  const given = process.env[name]
+  const port = given ? Number(given) : otherwise
+  if (Number.isInteger(port) && port >= 1 && port <= 65535) return port
+  throw new SetupError(
+    `${name} is "${given}": put a whole number from 1 to 65535, such as ${name}=${otherwise}.`,
+  )
+}
+
 /** Makes a folder if need be and proves that it can be written; says what to do where it cannot. */
 export function writableFolder(folder) {
   try {

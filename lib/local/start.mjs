@@ -5,7 +5,7 @@ import { build } from './build.mjs'
 import { startMariadb, stopMariadb } from './mariadb.mjs'
 import { FOR_START, checkNode, ensureNodePackages, ensurePrograms } from './packages.mjs'
 import { dataDir, root } from './paths.mjs'
-import { SetupError, freePort, processExists, whenNpmIsGone, writableFolder } from './run.mjs'
+import { SetupError, freePort, processExists, whenNpmIsGone, writableFolder, portFrom } from './run.mjs'
 import { migrateUp, prepareDatabase, runTypescript } from './schema.mjs'
 import { keepSecrets } from './secrets.mjs'
 import { applicationVariables, databaseVariables } from './variables.mjs'
@@ -38,7 +38,7 @@ async function start() {
   writableFolder(dataDir)
   holdTheOnlyStart()
   const host = process.env.HOST || '127.0.0.1'
-  const port = Number(process.env.PORT || 3000)
+  const port = portFrom('PORT', 3000)
   await clearTheWay({ folder: dataDir, host, port })
   const ownDatabase = !process.env.DATABASE_USER
   await ensurePrograms(ownDatabase ? FOR_START : {}, say)
@@ -59,7 +59,7 @@ async function start() {
 
 async function startOwnDatabase(secrets, rest) {
   say('Starting the database …')
-  const port = process.env.DATABASE_PORT ? Number(process.env.DATABASE_PORT) : undefined
+  const port = process.env.DATABASE_PORT ? portFrom('DATABASE_PORT', 3306) : undefined
   // One left running by a start that was killed is ours to stop as well.
   started.push({ stop: () => stopMariadb(dataDir) })
   const server = await startMariadb(dataDir, { port })
