@@ -5,6 +5,8 @@ import { recordProgress, startAssessment } from '@/lib/domain/assessments/start'
 import { isSteadfoldError } from '@/lib/errors'
 import type { SteadfoldError } from '@/lib/errors'
 import type { Progress } from '@/lib/rules/result'
+import { legWords } from '@/lib/rules/wording'
+import type { Scenario } from '@/lib/thermal/scenario'
 import type { Assessor } from './assessor'
 
 const payloadSchema = z.object({ assessmentId: z.number().int().positive() })
@@ -35,7 +37,7 @@ export async function assessJob(payload: unknown, assessor: Assessor, clock: () 
   } catch (error) {
     if (superseded.signal.aborted) return
     if (!isFinal(error)) throw error
-    await recordAssessmentFailure({ assessmentId, error: failureOf(error) }, clock())
+    await recordAssessmentFailure({ assessmentId, error: failureOf(error, task.scenario) }, clock())
   }
 }
 
@@ -43,11 +45,16 @@ function isFinal(error: unknown): error is SteadfoldError {
   return isSteadfoldError(error) && ['not_converged', 'invalid', 'refused'].includes(error.code)
 }
 
-function failureOf({ code, message, details }: SteadfoldError) {
+/** The engine names a leg by its id; people know it by its place in the journey. */
+function failureOf({ code, message, details }: SteadfoldError, { legs }: Scenario) {
   const { legId, minute } = details
+  const place = typeof legId === 'string' ? legWords(legId, legs) : 'a leg'
   return {
     code,
-    message,
+    message:
+      code === 'not_converged'
+        ? `The simulation does not converge on ${place} at minute ${String(minute)}.`
+        : message,
     ...(typeof legId === 'string' && { legId }),
     ...(typeof minute === 'number' && { minute }),
   }

@@ -5,6 +5,8 @@ import path from 'node:path'
 import { fileURLToPath } from 'node:url'
 import { describe, expect, it } from 'vitest'
 import type { Assessment } from '@/lib/rules/result'
+import { SHIPPED_ROWS } from '@/lib/rules/shipped-rows'
+import type { ProfileRow } from '@/lib/thermal'
 import { beagle, crateOf, legOf, roomAt, scenarioOf } from './support/worlds'
 
 const root = path.resolve(path.dirname(fileURLToPath(import.meta.url)), '../..')
@@ -33,6 +35,14 @@ const scenario = scenarioOf({
   crates: [crateOf('a', [beagle('bess')])],
 })
 
+/** A dog's row whose controller is all or nothing at its set-point: every field in its range, and a step no solver can follow. */
+function rowWithoutBands(): ProfileRow {
+  const dog = SHIPPED_ROWS['dog']
+  if (dog === undefined) throw new Error('The catalogue has a dog.')
+  const bands = { vasomotor: [0, 0], cold: [0, 0], pant: [0, 0], wet: [0, 0] } as const
+  return { version: 1, values: { ...dog.values, bands } }
+}
+
 describe('npm run simulate', () => {
   it('prints the assessment, and nothing else, and exits 0', async () => {
     const { code, stdout } = await simulate(file('good.json', scenario))
@@ -41,6 +51,26 @@ describe('npm run simulate', () => {
     expect(result.schema).toBe('steadfold/result@1')
     expect(result.verdict.verdict).toBe('go')
     expect(stdout.trimEnd().split('\n')).toHaveLength(1)
+  }, 60_000)
+
+  it('a valid scenario the engine cannot follow exits 3, names leg and minute, and gives no verdict', async () => {
+    const joins = { ...crateOf('a', [beagle('bess')]), fromLegId: 'ramp' }
+    const stays = crateOf('b', [{ ...beagle('otto'), profile: 'cat', massKg: 4 }])
+    const { code, stdout } = await simulate(
+      file(
+        'stuck.json',
+        scenarioOf({
+          profiles: { dog: rowWithoutBands() },
+          legs: [
+            legOf('road', { durationMin: 45, surroundings: roomAt(18) }),
+            legOf('ramp', { kind: 'ramp', durationMin: 30, surroundings: roomAt(24) }),
+          ],
+          crates: [joins, stays],
+        }),
+      ),
+    )
+    expect(JSON.parse(stdout)).toEqual({ error: { code: 'not_converged', legId: 'ramp', minute: 45 } })
+    expect(code).toBe(3)
   }, 60_000)
 
   it.each<[string, string[], string]>([

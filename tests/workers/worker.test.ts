@@ -74,6 +74,47 @@ describe('an assessment in the queue', () => {
   )
 })
 
+describe('an assessment the engine cannot follow', () => {
+  it(
+    'is an error with its leg and minute, in words, and never a verdict',
+    async () => {
+      const { consignmentId } = await saved(place, NOW)
+      await bandsWithoutWidth()
+      const ask = { ...act(), consignmentId }
+      const { assessmentId } = await assessConsignment(place.as('dispatcher'), ask, NOW)
+      expect(await runNextJob(shift())).toBe(true)
+      expect(await models.Assessment.findByPk(assessmentId)).toMatchObject({
+        status: 'failed',
+        verdict: null,
+        error: {
+          code: 'not_converged',
+          legId: 'leg-1',
+          minute: 0,
+          message: 'The simulation does not converge on leg 1 (road) at minute 0.',
+        },
+      })
+      const row = await models.Consignment.findByPk(consignmentId)
+      expect(row).toMatchObject({ state: 'draft', verdict: null })
+    },
+    LONG,
+  )
+})
+
+/** A dog's row whose controller is all or nothing at its set-point: a step no solver can follow. */
+async function bandsWithoutWidth() {
+  const old = await models.SpeciesProfile.findOne({ where: { key: 'dog' }, rejectOnEmpty: true })
+  const { id: _id, profile, ...row } = old.get({ plain: true })
+  const none: [number, number] = [0, 0]
+  const bands = { ...profile.bands, value: { vasomotor: none, cold: none, pant: none, wet: none } }
+  const createdBy = place.people.admin.id
+  await models.SpeciesProfile.create({
+    ...row,
+    profile: { ...profile, bands },
+    version: row.version + 1,
+    createdBy,
+  })
+}
+
 describe('a release in the queue', () => {
   it(
     'makes sealed papers, queues the mail, and the shipper gets the manifest to the byte',
@@ -119,10 +160,11 @@ describe('a release in the queue', () => {
         worker: 'worker-1',
         clock: () => later(2),
       }
-      expect(await deliverNext(delivery)).toBe('sent')
-      expect(await deliverNext(delivery)).toBeNull()
+      while ((await deliverNext(delivery)) === 'sent') continue
       await server.close()
-      const [mail] = server.taken
+      const papersMailed = server.taken.filter(({ attachments }) => attachments.length > 0)
+      expect(papersMailed).toHaveLength(1)
+      const [mail] = papersMailed
       expect(mail?.attachments).toHaveLength(1)
       expect(mail?.attachments[0]?.content.equals(manifest?.bytes ?? Buffer.alloc(0))).toBe(true)
       expect(mail?.subject).toContain('revision 1')
@@ -140,7 +182,7 @@ describe('the worker as a process', () => {
     async () => {
       const { assessmentId } = await asked()
       const first = start()
-      await until(async () => (await models.Job.findOne())?.state === 'running')
+      await until(async () => (await models.Assessment.findByPk(assessmentId))?.status === 'running')
       await ended(first, 'SIGKILL')
       expect(await models.Job.findOne()).toMatchObject({ state: 'running' })
       expect((await models.Assessment.findByPk(assessmentId))?.status).toBe('running')
