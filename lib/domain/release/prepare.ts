@@ -54,12 +54,13 @@ export async function prepareRelease(payload: unknown, now: Date): Promise<Prepa
   )
   if (obstacles.length > 0) throw notYet(obstacles)
   const shipper = await models.Shipper.findByPk(row.shipperId)
-  const facts = (code: string) => sheetFacts(row, { which: 'working', tracks: true, documentCode: code, now })
+  // Both papers speak of the same: tracks are long, and are read once.
+  const facts = await sheetFacts(row, { which: 'working', tracks: true, now })
   return {
     task,
     releasedBy,
-    sheet: await facts(await freeCode()),
-    manifest: await facts(await freeCode()),
+    sheet: { ...facts, documentCode: await freeCode() },
+    manifest: { ...facts, documentCode: await freeCode() },
     shipperEmail: shipper?.email ?? '',
   }
 }
