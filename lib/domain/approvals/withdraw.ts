@@ -13,6 +13,7 @@ import { authorize } from '../authorize'
 import { writeEffectiveVerdict } from '../consignments/effective-figures'
 import { move } from '../consignments/move'
 import { findConsignment } from '../consignments/visible'
+import { writeRow } from '../consignments/write-row'
 import { voidDocuments } from '../documents/document-state'
 import { voidApprovals } from './void'
 
@@ -78,10 +79,7 @@ async function takeBack(
   const none = inForceFalls ? { inForceRevision: null, inForceState: null, inForceSnapshotHash: null } : {}
   const own = approval.planHash === row.planHash
   if (own && nextState(row.state, 'withdraw') !== undefined) return move(tx, row, 'withdraw', none)
-  if (inForceFalls) {
-    await models.Consignment.update(none, { where: { id: row.id }, transaction: tx })
-    await row.reload({ transaction: tx })
-  }
+  if (inForceFalls) await writeRow(tx, row, none)
   return row.state
 }
 

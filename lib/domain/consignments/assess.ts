@@ -20,6 +20,7 @@ import type { JudgedPlan } from './judge-plan'
 import { move, wrongState } from './move'
 import { readPlan } from './read-plan'
 import { findConsignment } from './visible'
+import { writeRow } from './write-row'
 
 export interface AskedAssessment {
   assessmentId: number
@@ -52,7 +53,7 @@ export function assessConsignment(actor: Actor, input: ConsignmentAct, now: Date
         { where: { consignmentId, status: ['queued', 'running'] }, transaction: tx },
       )
       const assessment = await insert(tx, row, judged, { by: actor.id, at: now })
-      await row.update({ assessmentId: assessment.id, planHash: judged.planHash }, { transaction: tx })
+      await writeRow(tx, row, { assessmentId: assessment.id, planHash: judged.planHash })
       await enqueue(tx, {
         kind: 'assess',
         payload: { assessmentId: assessment.id },

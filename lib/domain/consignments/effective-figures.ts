@@ -13,6 +13,7 @@ import { readResult } from '../assessments/read-result'
 import type { AssessmentResult } from '../assessments/read-result'
 import { signedCrates } from '../approvals/signed-crates'
 import { readPlan } from './read-plan'
+import { writeRow } from './write-row'
 
 /** The verdict that counts, worked out from what is stored: see lib/rules/effective-verdict.ts. */
 export function effectiveOf(
@@ -65,16 +66,13 @@ export async function writeEffectiveVerdict(tx: Transaction, row: Consignment): 
   const { verdict, decidedBy } = effective.verdict
   const finding = decidedBy === undefined ? undefined : effective.findings[decidedBy]
   const room = finding?.marginMin === undefined ? narrowest(effective.findings) : finding
-  await row.update(
-    {
-      verdict,
-      deciding: finding === undefined ? null : boardWords(finding, room, plan),
-      marginMin: room?.marginMin ?? null,
-      marginOutsideAirC: room?.marginOutsideAirC ?? null,
-      marginBodyC: room?.marginBodyC ?? null,
-    },
-    { transaction: tx },
-  )
+  await writeRow(tx, row, {
+    verdict,
+    deciding: finding === undefined ? null : boardWords(finding, room, plan),
+    marginMin: room?.marginMin ?? null,
+    marginOutsideAirC: room?.marginOutsideAirC ?? null,
+    marginBodyC: room?.marginBodyC ?? null,
+  })
 }
 
 /** A law or a judgement that decides has no minutes: the smallest margin then is another finding's, named after it. */

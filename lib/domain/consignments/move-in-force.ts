@@ -15,6 +15,7 @@ import { HOLDER_OF, wrongState } from './move'
 import { planInForce } from './plan-in-force'
 import { readPlan } from './read-plan'
 import { writePlan } from './write-plan'
+import { writeRow } from './write-row'
 
 type RoadMove = 'depart' | 'deliver' | 'stop'
 
@@ -62,25 +63,22 @@ async function setDraftAside(
   const { plan } = released
   const timeline = timelineOf(plan, released.places)
   await writePlan(tx, row.id, plan, timeline, { at: now, by: actor.id })
-  await row.update(
-    {
-      ...boardFigures(plan, timeline, await planningKnowledge(plan, tx)),
-      revision: released.revision,
-      version: row.version + 1,
-      planHash: released.planHash,
-      assessmentId: released.assessmentId,
-      outOfDate: false,
-      shipperId: plan.shipperId,
-      purpose: plan.purpose,
-      parties: {
-        consignor: plan.consignor,
-        consignee: plan.consignee,
-        emergencyContact: plan.emergencyContact,
-      },
-      handlingNote: plan.handlingNote,
+  await writeRow(tx, row, {
+    ...boardFigures(plan, timeline, await planningKnowledge(plan, tx)),
+    revision: released.revision,
+    version: row.version + 1,
+    planHash: released.planHash,
+    assessmentId: released.assessmentId,
+    outOfDate: false,
+    shipperId: plan.shipperId,
+    purpose: plan.purpose,
+    parties: {
+      consignor: plan.consignor,
+      consignee: plan.consignee,
+      emergencyContact: plan.emergencyContact,
     },
-    { transaction: tx },
-  )
+    handlingNote: plan.handlingNote,
+  })
   await writeEffectiveVerdict(tx, row)
   return `The draft of revision ${draft.revision} was set aside (kept as ${kept.slice(0, 16)}).`
 }
