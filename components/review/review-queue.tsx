@@ -73,7 +73,7 @@ function Row({
           {row.decision === 'approved' && ', approved'}
           {row.decision === 'returned' && ', returned'}
         </span>
-        {row.decision === 'waiting' && (
+        {row.stamp && (
           <span className="mt-1.5 block">
             <Stamp {...row.stamp} size="s" />
           </span>

@@ -41,7 +41,10 @@ export function decide(findings: readonly Finding[], passages: readonly Passage[
 }
 
 /** What a finding alone makes of a leg. */
-export function weightOf({ status, marginOutsideAirC }: Finding): Verdict {
+export function weightOf({
+  status,
+  marginOutsideAirC,
+}: Pick<Finding, 'status' | 'marginOutsideAirC'>): Verdict {
   switch (status) {
     case 'breach':
       return 'no-go'

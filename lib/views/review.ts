@@ -11,7 +11,8 @@ export interface ReviewQueueRow {
   /** "Otto, pug. Peebles to Ravenna" */
   words: string
   leaves: Moment
-  stamp: Stamp
+  /** What was found about it; null once it is signed. */
+  stamp: Stamp | null
   decision: 'waiting' | 'approved' | 'returned'
   /** When it was signed; null while it waits. */
   signed: Moment | null

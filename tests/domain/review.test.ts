@@ -309,7 +309,7 @@ describe('what the vet sees', () => {
 
   it('lists crate set-ups that wait, and opens one with who may sign', async () => {
     const { consignmentId, mark } = await inReview(place, NOW)
-    const queue = await reviewQueue(place.as('vet'), NOW)
+    const queue = await reviewQueue(place.as('vet'))
     expect(queue.map(({ crateMark, decision }) => [crateMark, decision])).toEqual([
       [`${mark}-A`, 'waiting'],
       [`${mark}-B`, 'waiting'],
@@ -320,6 +320,6 @@ describe('what the vet sees', () => {
     expect(view.signer).toMatchObject({ registration: 'VR 40 817', cannot: '' })
     const unchecked = await loadReview(place.as('uncheckedVet'), { consignmentId, crateId: null }, NOW)
     expect(unchecked.signer.cannot).not.toBe('')
-    expect(await refusal(reviewQueue(place.as('dispatcher'), NOW))).toMatchObject({ code: 'not_allowed' })
+    expect(await refusal(reviewQueue(place.as('dispatcher')))).toMatchObject({ code: 'not_allowed' })
   })
 })

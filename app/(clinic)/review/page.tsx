@@ -12,7 +12,7 @@ export const dynamic = 'force-dynamic'
 export default async function ReviewQueuePage() {
   const actor = await openPage('/review', '/review')
   const now = new Date()
-  const rows = await reviewQueue(actor, now)
+  const rows = await reviewQueue(actor)
   return (
     <Page>
       <PageTitle

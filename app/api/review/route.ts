@@ -5,6 +5,6 @@ export const dynamic = 'force-dynamic'
 
 /** The vet's queue, for a page that stays open. */
 export const GET = jsonRoute('/api/review', async ({ actor, now }) => ({
-  rows: await reviewQueue(actor, now),
+  rows: await reviewQueue(actor),
   nowMs: now.getTime(),
 }))

@@ -6,9 +6,13 @@ import { models } from '@/models'
 import { act } from '../act'
 import type { Done } from '../act'
 import { authorize } from '../authorize'
+import { writeEffectiveVerdict } from './effective-figures'
 import { findConsignment } from './visible'
 
-/** Writes down what a party answered to a condition: confirmed or refused, by whom and how. It is answered once. */
+/**
+ * Writes down what a party answered to a condition: confirmed or refused, by whom and how. It is answered once, and the
+ * verdict that counts follows: what is refused cannot go.
+ */
 export function answerCondition(
   actor: Actor,
   input: ConditionAnswerInput,
@@ -35,6 +39,7 @@ export function answerCondition(
         { where: { id: conditionId, answer: null }, transaction: tx },
       )
       if (count === 0) throw new SteadfoldError('wrong_state', 'This condition has an answer already.')
+      await writeEffectiveVerdict(tx, row)
       return {
         result: { answer: input.answer },
         consignmentId: row.id,

@@ -34,7 +34,7 @@ export default async function ReviewPage({
   const view = await orNotFound(
     loadReview(actor, { consignmentId, crateId: crate === '' ? null : crate }, now),
   )
-  const rows = await reviewQueue(actor, now)
+  const rows = await reviewQueue(actor)
   const { sheet, chosen } = view
   return (
     <Page>
