@@ -21,6 +21,7 @@ const variables = z.object({
   NODE_ENV: z.enum(['development', 'test', 'production']).default('development'),
   PORT: port.default(3000),
   APP_URL: webAddress,
+  TRUST_PROXY: z.enum(['yes', 'no'], { error: 'put yes or no' }).default('no'),
   NEXTAUTH_SECRET: z.string().min(32, 'put at least 32 characters of chance'),
   NEXTAUTH_URL: webAddress.optional(),
   DATABASE_HOST: z.string().trim().min(1).default('127.0.0.1'),
@@ -83,6 +84,8 @@ function arrange(values: z.infer<typeof variables>) {
     port: values.PORT,
     /** Where people reach the application, without a slash at the end. Links in mails and QR codes start with it. */
     appUrl: values.APP_URL,
+    /** A proxy of ours stands in front, and what it says in x-forwarded-for is believed. */
+    trustProxy: values.TRUST_PROXY === 'yes',
     auth: { secret: values.NEXTAUTH_SECRET, url: values.NEXTAUTH_URL ?? values.APP_URL },
     database: {
       host: values.DATABASE_HOST,

@@ -45,8 +45,15 @@ describe('configuration', () => {
     [{ SMTP_URL: 'mail.example.org' }, 'SMTP_URL is wrong: put an address such as smtp://'],
     [{ DATABASE_NAME: 'drop table;' }, 'DATABASE_NAME is wrong'],
     [{ NODE_ENV: 'staging' }, 'NODE_ENV is wrong'],
+    [{ TRUST_PROXY: 'true' }, 'TRUST_PROXY is wrong: put yes or no'],
   ])('%j: %s', (wrong, message) => {
     expect(() => readEnv({ ...least, ...wrong })).toThrow(message)
+  })
+
+  test('believes no proxy unless told to', () => {
+    expect(readEnv(least).trustProxy).toBe(false)
+    expect(readEnv({ ...least, TRUST_PROXY: 'no' }).trustProxy).toBe(false)
+    expect(readEnv({ ...least, TRUST_PROXY: 'yes' }).trustProxy).toBe(true)
   })
 
   test('never repeats a secret that is too short', () => {
