@@ -109,9 +109,9 @@ function Conditions({ conditions }: { conditions: readonly PortalCondition[] }) 
             <span className="font-head font-bold">{condition.number}</span>
             <span>
               {condition.text}
-              {/^\d/.test(condition.legWords) && (
-                <span className="text-mute"> Leg {condition.legWords}.</span>
-              )}
+              <span className="block text-mute">
+                {condition.whereWords}, from {dayTime(condition.from.ms, condition.from.zone)}
+              </span>
             </span>
             <span className="text-mute max-desk:col-start-2">{answerWords(condition)}</span>
           </li>

@@ -65,10 +65,14 @@ export interface PortalAnimal {
 export interface PortalCondition {
   number: number
   text: string
-  legWords: string
+  /** "Leg 7", "Legs 4 to 6", "Whole journey". */
+  whereWords: string
+  /** From when it must be so: the start of its first leg, by the clock there. */
+  from: Moment
   answer: ConditionAnswer
   /** "the carrier", "the handler", "our people". */
   party: string
+  /** When it was confirmed or refused. */
   answeredAt: Moment | null
 }
 

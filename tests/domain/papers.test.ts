@@ -1,4 +1,6 @@
 import { beforeEach, describe, expect, it } from 'vitest'
+import { approveCrates } from '@/lib/domain/approvals/approve'
+import { answerCondition } from '@/lib/domain/consignments/answer-condition'
 import { downloadDocument } from '@/lib/domain/documents/download'
 import { verifyCode, verifyFile } from '@/lib/domain/documents/verify'
 import { acknowledgeDocument } from '@/lib/domain/portal/acknowledge'
@@ -8,7 +10,7 @@ import { loadOwnConsignment } from '@/lib/domain/portal/load'
 import { cancelConsignment } from '@/lib/domain/consignments/cancel'
 import { models } from '@/models'
 import { emptyTables } from '../support/db'
-import { NOW, act, later, refusal, released, saved, world } from './world'
+import { NOW, act, inReview, later, recordPapers, refusal, released, saved, signature, world } from './world'
 import type { World } from './world'
 
 let place: World
@@ -124,6 +126,33 @@ describe('a shipper', () => {
     })
     const told = JSON.stringify(view)
     for (const name of ['Skerrow', '0433', 'Bellweather']) expect(told).not.toContain(name)
+  })
+
+  it('reads on which legs and from when each condition must be so, and when it was confirmed', async () => {
+    const { consignmentId } = await inReview(place, NOW)
+    const conditions = [
+      { text: 'Shed held at 18 °C.', legId: 'leg-2', party: '' },
+      { text: 'No food on the way.', legId: null, party: 'Skerrow Air Cargo' },
+    ]
+    await approveCrates(place.as('vet'), await signature(place, consignmentId, { conditions }), NOW)
+    for (const { id } of await models.Condition.findAll({ order: ['id'] })) {
+      const answer = { answer: 'confirmed', answeredBy: 'D. Aird', how: 'writing', note: '' } as const
+      await answerCondition(place.as('dispatcher'), { ...act(), conditionId: id, ...answer }, later(40))
+    }
+    await recordPapers(place, consignmentId, later(50))
+    const { view } = await loadOwnConsignment(place.as('shipper'), { consignmentId }, later(60))
+    const confirmed = {
+      answer: 'confirmed',
+      party: 'the handler',
+      answeredAt: { ms: later(40).getTime(), zone: 'Europe/London' },
+    }
+    // 10:00 and 11:00 on the clock at Balfron and Glasgow in June.
+    const at = (time: string) => ({ ms: Date.parse(`2026-06-10T${time}:00+01:00`), zone: 'Europe/London' })
+    expect(view?.conditions).toMatchObject([
+      { text: 'No food on the way.', whereWords: 'Whole journey', from: at('10:00'), ...confirmed },
+      { text: 'Shed held at 18 °C.', whereWords: 'Leg 2', from: at('11:00'), ...confirmed },
+    ])
+    expect(JSON.stringify(view)).not.toMatch(/Skerrow|Aird/)
   })
 
   it('acknowledges the manifest in force once', async () => {

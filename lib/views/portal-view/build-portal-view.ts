@@ -11,6 +11,7 @@ import type {
 import type { ConditionView, LegView, SheetView } from '../sheet'
 import { buildSheetView } from '../sheet-view/build-sheet-view'
 import type { SheetFacts } from '../sheet-view/facts'
+import { capital, legsInWords } from '../sheet-view/words'
 
 export interface PortalFacts {
   /** Of the revision in force. */
@@ -44,7 +45,7 @@ export function buildPortalView(facts: PortalFacts): PortalView {
       describes,
       identification,
     })),
-    conditions: sheet.conditions.map((condition) => portalCondition(condition, sheet)),
+    conditions: sheet.conditions.map((condition) => portalCondition(condition, sheet, facts.sheet)),
     approvals: portalApprovals(facts.sheet),
     overrides: sheet.overrides,
     documents: [...facts.documents],
@@ -76,16 +77,18 @@ function portalLeg(leg: LegView, sheet: SheetView): PortalLeg {
   }
 }
 
-function portalCondition(condition: ConditionView, sheet: SheetView): PortalCondition {
+function portalCondition(condition: ConditionView, sheet: SheetView, facts: SheetFacts): PortalCondition {
   const leg = sheet.legs.find(({ ordinal }) => ordinal === condition.legs[0])
+  const answeredAtMs = facts.conditions.find(({ id }) => id === condition.conditionId)?.answeredAtMs ?? null
   return {
     number: condition.number,
     text: condition.text,
-    legWords: condition.legWords,
+    whereWords: condition.legs.length === 0 ? 'Whole journey' : capital(legsInWords(condition.legs)),
+    from: leg?.start ?? sheet.leaves,
     answer: condition.answer,
     party:
       condition.answer === 'ours' ? 'our people' : leg?.kind === 'flight' ? 'the carrier' : 'the handler',
-    answeredAt: null,
+    answeredAt: answeredAtMs === null ? null : { ms: answeredAtMs, zone: facts.firm.zone },
   }
 }
 
