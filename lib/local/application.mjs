@@ -1,4 +1,5 @@
 import path from 'node:path'
+import { pathToFileURL } from 'node:url'
 import { bundleWorker } from './build.mjs'
 import { root } from './paths.mjs'
 import { Supervised, processNote } from './processes.mjs'
@@ -39,6 +40,7 @@ export async function startApplication({ folder, host, port, variables, dev = fa
   const common = { cwd: root, env, say, note }
   const web = new Supervised({
     ...common,
+    env: { ...env, NODE_OPTIONS: withOwnAddress(process.env.NODE_OPTIONS) },
     name: 'web',
     command: process.execPath,
     args: [
@@ -85,6 +87,15 @@ export async function startApplication({ folder, host, port, variables, dev = fa
     )
   }
   return { address, healthy, stop }
+}
+
+/**
+ * NODE_OPTIONS that put own-address.mjs before everything in the web server. Not an argument of the process: in development
+ * next serves from a child of its own.
+ */
+export function withOwnAddress(options = '') {
+  const file = pathToFileURL(path.join(root, 'lib/local/own-address.mjs'))
+  return `${options} --import=${file}`.trim()
 }
 
 async function isHealthy(address) {

@@ -140,9 +140,7 @@ it('reads the one word next-auth hands to the page', () => {
   expect(readRefusal('refused:often')).toEqual({ kind: 'fault' })
 })
 
-it('takes the address a proxy added last, and nothing that is none', () => {
-  expect(requestIp({ 'x-forwarded-for': '203.0.113.9, 192.0.2.1' })).toBe('192.0.2.1')
-  expect(requestIp(new Headers({ 'x-forwarded-for': '::ffff:127.0.0.1' }))).toBe('127.0.0.1')
-  expect(requestIp({ 'x-forwarded-for': '<script>' })).toBeNull()
-  expect(requestIp({})).toBeNull()
+it('believes no address a request gives of itself', () => {
+  expect(requestIp({ 'x-forwarded-for': '203.0.113.9' })).toBeNull()
+  expect(requestIp(new Headers({ 'x-forwarded-for': '203.0.113.9' }))).toBeNull()
 })
