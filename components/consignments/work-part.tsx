@@ -3,11 +3,9 @@
 import { Button } from '@/components/ui/button'
 import { WorkRow } from '@/components/ui/holes'
 import { Notice } from '@/components/ui/notice'
+import { partsOfStage } from '@/lib/rules/progress'
 import { isWorking, useStatus } from './use-status'
 import type { ConsignmentStatusView } from './status-view'
-
-/** Stages of an assessment in their order (lib/rules/assess.ts); a hole for each. */
-const STAGES = ['Typical and prone animals on every schedule', 'Margins', 'Endurance and stop limits']
 
 /** The worker's row: how far it is, or why it stopped. Nothing where there is nothing to say. */
 export function WorkPart({
@@ -67,7 +65,8 @@ function Assessing({
   lost: boolean
 }) {
   const { status, stage, done, total } = assessment
-  const place = STAGES.indexOf(stage)
+  // A hole for each leg, or schedule, of the stage in hand.
+  const parts = status === 'queued' ? null : partsOfStage(stage)
   const words =
     status === 'queued'
       ? 'Waiting for its turn to be assessed.'
@@ -76,8 +75,8 @@ function Assessing({
         : `${stage || 'Beginning'}.`
   return (
     <WorkRow
-      done={status === 'queued' ? 0 : Math.max(0, place)}
-      of={STAGES.length}
+      done={parts?.done ?? 0}
+      of={parts?.of ?? 1}
       words={words}
       more={
         lost

@@ -29,7 +29,7 @@ export function Hole({ state, size = 11 }: { state: HoleState; size?: number }) 
 /** A row of holes, as many as there are parts. */
 export function Holes({ done, of }: { done: number; of: number }) {
   return (
-    <span className="inline-flex shrink-0 gap-px align-[-3px]" aria-hidden="true">
+    <span className="inline-flex flex-wrap gap-px align-[-3px]" aria-hidden="true">
       {Array.from({ length: of }, (_, index) => (
         <Hole key={index} state={index < done ? 'filled' : 'open'} />
       ))}

@@ -18,7 +18,8 @@ import { type DecidedFacts, inputHash } from './hash'
 import { judgements } from './judgements'
 import { minutesToSpare } from './minutes-to-spare'
 import { packFindings } from './packs'
-import type { Assessment, Endurance, Finding, Progress, StopLimit } from './result'
+import type { Progress } from './progress'
+import type { Assessment, Endurance, Finding, StopLimit } from './result'
 import { type Runner, type Steps, createRunner } from './runner'
 import { setPointFindings } from './set-point'
 import { stopLimitsOf } from './stop-limits'
@@ -92,7 +93,8 @@ function* bodyFindings(prepared: Prepared, base: BaseRuns, runner: Runner): Step
   const { legs } = prepared.scenario
   runner.stage('Margins', legs.length * EXPECTED.margins)
   const findings: Finding[] = []
-  for (const [index, leg] of legs.entries())
+  for (const [index, leg] of legs.entries()) {
+    runner.at('leg', index + 1, legs.length)
     for (const side of ['high', 'low'] as const) {
       const aboard = prepared.subjects.filter((subject) => isAboard(subject, index))
       const judged = aboard.flatMap((subject) => judgeBody(subject, leg, side, base))
@@ -100,6 +102,7 @@ function* bodyFindings(prepared: Prepared, base: BaseRuns, runner: Runner): Step
       const spare = keeps ? yield* minutesToSpare(prepared, runner, index, side) : new Map<string, number>()
       for (const judgement of judged) findings.push(yield* withMargins(judgement, legs, spare, base, runner))
     }
+  }
   return findings
 }
 
@@ -157,6 +160,7 @@ function* legFigures(
   const stopLimits: StopLimit[] = []
   const endurance: Endurance[] = []
   for (const index of legs.keys()) {
+    runner.at('leg', index + 1, legs.length)
     stopLimits.push(...(yield* stopLimitsOf(prepared, runner, index, bodies)))
     endurance.push(...(yield* enduranceOf(prepared, runner, index)))
   }

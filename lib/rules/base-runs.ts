@@ -37,11 +37,12 @@ export const PRONE: Record<Side, Variant> = { high: 'heat-prone', low: 'cold-pro
  */
 export function* makeBaseRuns(prepared: Prepared, runner: Runner, readsAir: boolean): Steps<BaseRuns> {
   const schedules = schedulesOf(prepared.scenario)
-  runner.stage('Typical and prone animals on every schedule', schedules.length * (VARIANTS.length + 2))
+  runner.stage('Typical and prone animals', schedules.length * (VARIANTS.length + 2))
   const planned: NamedRun[] = []
   const warmer: NamedRun[] = []
   const colder: NamedRun[] = []
-  for (const { id: scheduleId } of schedules) {
+  for (const [index, { id: scheduleId }] of schedules.entries()) {
+    runner.at('schedule', index + 1, schedules.length)
     for (const variant of VARIANTS) {
       const tracks = scheduleId === 'on-time' || (readsAir && variant !== 'typical')
       planned.push({ scheduleId, variant, run: yield* runner.journey({ scheduleId, variant, tracks }) })

@@ -98,10 +98,3 @@ export interface Assessment extends Simulation {
   animalVerdicts: AnimalVerdict[]
   verdict: { verdict: Verdict; decidedBy?: number }
 }
-
-/** Where a long assessment stands; done and total count short runs. */
-export interface Progress {
-  stage: string
-  done: number
-  total: number
-}

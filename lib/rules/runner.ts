@@ -7,7 +7,7 @@ import {
   simulate,
   type Scenario,
 } from '@/lib/thermal'
-import type { Progress } from './result'
+import { type Progress, type StagePart, stageWords } from './progress'
 import type { Prepared } from './subject'
 
 /** Work in steps: each yielded value tells how far it has come, so that a worker can report and a page can breathe. */
@@ -29,6 +29,8 @@ export interface Runner {
   /** A failure looked at through the engine's own `endure`; counted as a run. */
   count(): Steps<void>
   stage(name: string, expectedRuns: number): void
+  /** The leg or the schedule of this stage that is in hand now, counted from 1. */
+  at(part: StagePart, number: number, of: number): void
   runs(): number
 }
 
@@ -38,6 +40,7 @@ export const SNAPSHOT_EVERY_MIN = 10
 export function createRunner(prepared: Prepared, shouldStop: () => boolean = () => false): Runner {
   const kept = new Map<string, Run>()
   const progress: Progress = { stage: '', done: 0, total: 0 }
+  let stage = ''
 
   function* count(): Steps<void> {
     if (shouldStop()) throw new SteadfoldError('unavailable', 'The assessment was stopped before its end.')
@@ -74,8 +77,12 @@ export function createRunner(prepared: Prepared, shouldStop: () => boolean = () 
       })
     },
     stage(name, expectedRuns) {
+      stage = name
       progress.stage = name
       progress.total = progress.done + expectedRuns
+    },
+    at(part, number, of) {
+      progress.stage = stageWords(stage, part, number, of)
     },
     runs: () => progress.done,
   }

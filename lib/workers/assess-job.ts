@@ -4,7 +4,7 @@ import { recordAssessment, recordAssessmentFailure } from '@/lib/domain/assessme
 import { recordProgress, startAssessment } from '@/lib/domain/assessments/start'
 import { isSteadfoldError } from '@/lib/errors'
 import type { SteadfoldError } from '@/lib/errors'
-import type { Progress } from '@/lib/rules/result'
+import type { Progress } from '@/lib/rules/progress'
 import { legWords } from '@/lib/rules/wording'
 import type { Scenario } from '@/lib/thermal/scenario'
 import type { Assessor } from './assessor'

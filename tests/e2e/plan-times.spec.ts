@@ -29,7 +29,7 @@ test('an hour the clock skips is refused by name, and nothing else typed is lost
   await expect(page).toHaveURL(/\/new$/)
 
   await page.getByRole('button', { name: /^Save the plan/ }).click()
-  await expect(page).toHaveURL(/consignments\/\d+\/plan$/)
+  await expect(page).toHaveURL(/consignments\/\d+\/plan$/, { timeout: 60_000 })
   await page.reload()
   await expect(leg(page).getByText(sentence)).toBeVisible()
   await expect(leg(page).getByLabel('Start, local')).toHaveValue(missing)
@@ -75,7 +75,7 @@ test('an hour the clock shows twice is asked for, and the answer kept', async ({
   await expect(leg(page).getByText(asked)).toBeHidden()
 
   await page.getByRole('button', { name: /^Save the plan/ }).click()
-  await expect(page).toHaveURL(/consignments\/\d+\/plan$/)
+  await expect(page).toHaveURL(/consignments\/\d+\/plan$/, { timeout: 60_000 })
   await page.reload()
   await expect(leg(page).getByLabel('Start, local')).toHaveValue(doubled)
   await expect(second).toBeChecked()

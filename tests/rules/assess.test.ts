@@ -1,5 +1,6 @@
 import { describe, expect, it } from 'vitest'
 import { assess } from '@/lib/rules/assess'
+import { partsOfStage } from '@/lib/rules/progress'
 import type { Assessment, Finding } from '@/lib/rules/result'
 import { SHIPPED_ROWS } from '@/lib/rules/shipped-rows'
 import type { Scenario } from '@/lib/thermal'
@@ -373,6 +374,30 @@ describe('progress and stopping', () => {
     })
     expect(seen).toEqual([...seen].sort((a, b) => a - b))
     expect(seen.length).toBeGreaterThan(10)
+  })
+
+  it('names the leg or the schedule in hand, each in its turn', () => {
+    const two = scenarioOf({
+      legs: [
+        legOf('road', { surroundings: roomAt(18), delay: { typicalMin: 0, worstMin: 10 } }),
+        legOf('shed', { kind: 'shed', surroundings: roomAt(18) }),
+      ],
+      crates: [crateOf('a', [beagle('bess')])],
+    })
+    const stages: string[] = []
+    assess(two, SHIPPED_ROWS, {
+      onProgress: ({ stage }) => void (stages.at(-1) === stage || stages.push(stage)),
+    })
+    expect(stages).toEqual([
+      'Typical and prone animals, schedule 1 of 2',
+      'Typical and prone animals, schedule 2 of 2',
+      'Margins, leg 1 of 2',
+      'Margins, leg 2 of 2',
+      'Endurance and stop limits, leg 1 of 2',
+      'Endurance and stop limits, leg 2 of 2',
+    ])
+    expect(stages.map(partsOfStage)).toEqual(stages.map((_, index) => ({ done: index % 2, of: 2 })))
+    expect(partsOfStage('Starting')).toBeNull()
   })
 
   it('stops when asked, without a verdict', () => {

@@ -1,6 +1,6 @@
 import 'server-only'
 import type { Scenario } from '@/lib/thermal/scenario'
-import type { Progress } from '@/lib/rules/result'
+import type { Progress } from '@/lib/rules/progress'
 import { SteadfoldError } from '@/lib/errors'
 import { models } from '@/models'
 import { readSnapshot } from '../snapshot'
