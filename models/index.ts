@@ -27,6 +27,7 @@ import { initShipper } from './shipper'
 import { initSnapshot } from './snapshot'
 import { initSpeciesProfile } from './species-profile'
 import { initThrottleAttempt } from './throttle-attempt'
+import { initThrottleKey } from './throttle-key'
 import { initUser } from './user'
 import { associate } from './associations'
 
@@ -60,6 +61,7 @@ export type { Shipper } from './shipper'
 export type { Snapshot } from './snapshot'
 export type { SpeciesProfile } from './species-profile'
 export type { ThrottleAttempt } from './throttle-attempt'
+export type { ThrottleKey } from './throttle-key'
 export type { User } from './user'
 
 export type Models = ReturnType<typeof initModels>
@@ -97,6 +99,7 @@ function initModels(sequelize: Sequelize) {
     Snapshot: initSnapshot(sequelize),
     SpeciesProfile: initSpeciesProfile(sequelize),
     ThrottleAttempt: initThrottleAttempt(sequelize),
+    ThrottleKey: initThrottleKey(sequelize),
     User: initUser(sequelize),
   }
   associate(registry)

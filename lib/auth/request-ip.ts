@@ -13,7 +13,7 @@ export function requestIp(
   const forwarded = headers instanceof Headers ? headers.get('x-forwarded-for') : headers['x-forwarded-for']
   if (typeof forwarded !== 'string') return null
   const last = forwarded.split(',').at(-1)?.trim() ?? ''
-  const bare = last.replace(/^::ffff:/, '')
+  const bare = last.replace(/^::ffff:/, '').replace(/%.*$/, '')
   return /^[0-9a-fA-F.:]{2,45}$/.test(bare) ? bare : null
 }
 

@@ -54,6 +54,7 @@ export const GRANTS = {
   checklist_entries: APPEND,
   audit_events: APPEND,
   throttle_attempts: ['SELECT', 'INSERT', 'DELETE'],
+  throttle_keys: ALL,
 }
 
 export const MIGRATE_USER = 'steadfold_migrate'

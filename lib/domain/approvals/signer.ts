@@ -5,7 +5,7 @@ import { SteadfoldError } from '@/lib/errors'
 import type { Actor } from '@/lib/policies/actor'
 import { models } from '@/models'
 import type { User } from '@/models'
-import { SIGN_IN_THROTTLE, countAttempt, throttleState, throttled } from '../throttle'
+import { SIGN_IN_THROTTLE, claimAttempt, forgiveAttempt, throttled } from '../throttle'
 
 export interface Registration {
   signerName: string
@@ -19,11 +19,13 @@ export interface Registration {
  * screen is no way around its limit.
  */
 export async function confirmPassword(actor: Actor, password: string, now: Date): Promise<void> {
-  const { closedUntil } = await throttleState(SIGN_IN_THROTTLE, actor.email, now)
-  if (closedUntil) throw throttled(closedUntil, 'Too many wrong passwords. Wait a few minutes.')
+  const claim = await claimAttempt(SIGN_IN_THROTTLE, actor.email, now)
+  if (!claim.free) throw throttled(claim.closedUntil, 'Too many wrong passwords. Wait a few minutes.')
   const user = await models.User.findByPk(actor.id, { attributes: ['passwordHash'] })
-  if (user !== null && (await isPassword(user.passwordHash, password))) return
-  await countAttempt(SIGN_IN_THROTTLE, actor.email, now)
+  if (user !== null && (await isPassword(user.passwordHash, password))) {
+    await forgiveAttempt(claim.attemptId)
+    return
+  }
   throw new SteadfoldError('invalid', 'Nothing was signed.', {
     issues: [{ path: 'password', message: 'This is not your password.' }],
   })

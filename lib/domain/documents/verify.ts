@@ -10,7 +10,7 @@ import { models } from '@/models'
 import type { Document } from '@/models'
 import { record } from '../audit/record'
 import { deskMoment } from '../firm'
-import { VERIFY_THROTTLE, countAttempt, throttleState, throttled } from '../throttle'
+import { VERIFY_THROTTLE, claimAttempt, throttled } from '../throttle'
 
 /** Who asks: nobody needs to sign in, so all that is known is where the request came from. */
 export interface Visitor {
@@ -59,10 +59,24 @@ export async function verifyFile(visitor: Visitor, bytes: Uint8Array, now: Date)
 
 /** Every attempt counts, right or wrong: codes are there to be read off a paper, not tried. */
 async function admit(visitor: Visitor, now: Date) {
-  const key = visitor.ip ?? 'unknown'
-  const { closedUntil } = await throttleState(VERIFY_THROTTLE, key, now)
-  if (closedUntil) throw throttled(closedUntil, 'Too many papers were checked from here. Wait a few minutes.')
-  await countAttempt(VERIFY_THROTTLE, key, now)
+  const place = visitor.ip === null ? 'unknown' : networkOf(visitor.ip)
+  const claim = await claimAttempt(VERIFY_THROTTLE, place, now)
+  if (!claim.free)
+    throw throttled(claim.closedUntil, 'Too many papers were checked from here. Wait a few minutes.')
+}
+
+/** One place: an IPv4 address, or the /64 a household or a machine is given of IPv6 and may choose from freely. */
+function networkOf(ip: string): string {
+  if (!ip.includes(':')) return ip
+  const [head = '', tail] = ip.split('::')
+  const groups = head === '' ? [] : head.split(':')
+  const after = tail === undefined || tail === '' ? [] : tail.split(':')
+  const zeros = tail === undefined ? 0 : Math.max(0, 8 - groups.length - after.length)
+  const all = [...groups, ...Array<string>(zeros).fill('0'), ...after]
+  return `${all
+    .slice(0, 4)
+    .map((group) => Number.parseInt(group, 16).toString(16))
+    .join(':')}::/64`
 }
 
 async function answer(
