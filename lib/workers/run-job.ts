@@ -31,7 +31,8 @@ export async function runNextJob(shift: Shift): Promise<boolean> {
     if (left) await giveBack(job.id, worker, clock())
     else await finish(job.id, worker)
   } catch (error) {
-    await fail(job, worker, { message: wordsOf(error), final: isSteadfoldError(error) }, clock())
+    const known = isSteadfoldError(error)
+    await fail(job, worker, { message: wordsOf(error), final: known, forPeople: known }, clock())
   } finally {
     clearInterval(beat)
   }

@@ -57,7 +57,7 @@ describe('the queue', () => {
     for (let attempt = 1; attempt <= MAX_ATTEMPTS; attempt += 1) {
       const job = await take('w1', now)
       if (job === null) throw new Error('The job is not due.')
-      const became = await fail(job, 'w1', { message: 'No answer.', final: false }, now)
+      const became = await fail(job, 'w1', { message: 'No answer.', final: false, forPeople: false }, now)
       expect(became).toBe(attempt === MAX_ATTEMPTS ? 'failed' : 'again')
       const row = await models.Job.findByPk(job.id, { rejectOnEmpty: true })
       waits.push((row.runAfter.getTime() - now.getTime()) / 1000)
@@ -75,6 +75,25 @@ describe('the queue', () => {
     await put('a')
     const job = await take('w1')
     if (job === null) throw new Error('The job is not due.')
-    expect(await fail(job, 'w1', { message: 'Bad plan.', final: true }, NOW)).toBe('failed')
+    expect(await fail(job, 'w1', { message: 'Bad plan.', final: true, forPeople: true }, NOW)).toBe('failed')
+  })
+
+  it('hands a job that silences every worker on until its attempts are used up, and then ends it', async () => {
+    await put('deadly')
+    await put('after')
+    let now = NOW
+    for (let attempt = 1; attempt <= MAX_ATTEMPTS; attempt += 1) {
+      expect(await take(`w${attempt}`, now)).toMatchObject({ dedupeKey: 'deadly', attempts: attempt })
+      now = new Date(now.getTime() + LEASE_MS + 1)
+    }
+    // In the same breath the next one gets its turn.
+    expect(await take('w6', now)).toMatchObject({ dedupeKey: 'after', attempts: 1 })
+    expect(await models.Job.findOne({ where: { state: 'failed' } })).toMatchObject({
+      attempts: MAX_ATTEMPTS,
+      dedupeKey: null,
+      leasedBy: null,
+      lastError: expect.stringContaining('The worker stopped while doing this, 5 times over') as string,
+    })
+    expect(await take('w7', later(60))).toMatchObject({ dedupeKey: 'after', attempts: 2 })
   })
 })

@@ -46,7 +46,8 @@ export async function recordAssessment(
     await move(tx, row, 'assess', { outOfDate: false })
     const scenario = (await readSnapshot(assessment.scenarioHash, tx)) as Scenario
     const plan = await readPlan(row, tx)
-    await voidWorsened(tx, row, { plan, assessmentId: assessment.id, result }, now)
+    const ended = await voidWorsened(tx, row, { plan, assessmentId: assessment.id, result }, now)
+    if (ended && nextState(row.state, 'lapse') !== undefined) await move(tx, row, 'lapse')
     await writeConditions(tx, row, { plan, scenario, result }, now)
     await writeEffectiveVerdict(tx, row)
     await record(tx, {
@@ -62,25 +63,36 @@ export async function recordAssessment(
 }
 
 /** The run failed for good: says why, and where it says nothing more. The consignment stays as it was. */
-export async function recordAssessmentFailure(
-  { assessmentId, error }: { assessmentId: number; error: AssessmentError },
+export function recordAssessmentFailure(failure: FailedAssessment, now: Date): Promise<void> {
+  return transaction((tx) => failAssessment(tx, failure, now))
+}
+
+export interface FailedAssessment {
+  assessmentId: number
+  error: AssessmentError
+  /** What the machine said, for the audit trail alone. */
+  cause?: string
+}
+
+/** The same in the transaction that ends its job. What is done, failed or superseded already stays so. */
+export async function failAssessment(
+  tx: Transaction,
+  { assessmentId, error, cause }: FailedAssessment,
   now: Date,
 ): Promise<void> {
-  await transaction(async (tx) => {
-    const [count] = await models.Assessment.update(
-      { status: 'failed', error, finishedAt: now },
-      { where: { id: assessmentId, status: ['queued', 'running'] }, transaction: tx },
-    )
-    if (count === 0) return
-    const assessment = await models.Assessment.findByPk(assessmentId, { transaction: tx })
-    await record(tx, {
-      actor: null,
-      verb: 'assessment.fail',
-      at: now,
-      subject: { type: 'assessment', id: assessmentId },
-      consignmentId: assessment?.consignmentId ?? null,
-      note: `${error.code}: ${error.message}`,
-    })
+  const [count] = await models.Assessment.update(
+    { status: 'failed', error, finishedAt: now },
+    { where: { id: assessmentId, status: ['queued', 'running'] }, transaction: tx },
+  )
+  if (count === 0) return
+  const assessment = await models.Assessment.findByPk(assessmentId, { transaction: tx })
+  await record(tx, {
+    actor: null,
+    verb: 'assessment.fail',
+    at: now,
+    subject: { type: 'assessment', id: assessmentId },
+    consignmentId: assessment?.consignmentId ?? null,
+    note: [`${error.code}: ${error.message}`, ...(cause === undefined ? [] : [`(${cause})`])].join(' '),
   })
 }
 
