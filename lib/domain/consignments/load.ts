@@ -1,4 +1,5 @@
 import 'server-only'
+import { Op } from 'sequelize'
 import { actsNow } from '@/lib/policies/acts'
 import type { Act } from '@/lib/policies/acts'
 import type { Actor } from '@/lib/policies/actor'
@@ -12,7 +13,7 @@ import { SteadfoldError } from '@/lib/errors'
 import type { ConsignmentRow } from '@/lib/views/consignment-row'
 import type { SheetFacts } from '@/lib/views/sheet-view/facts'
 import { models } from '@/models'
-import type { Consignment } from '@/models'
+import type { Approval, Consignment, Job } from '@/models'
 import { authorize } from '../authorize'
 import { allPlaces, planningKnowledge, profilesInForce } from '../catalogue/knowledge'
 import { SIGNED_AND_CRATES, consignmentRow } from './consignment-row'
@@ -156,10 +157,7 @@ async function statusOf(row: Consignment): Promise<ConsignmentStatus> {
     attributes: { include: [...SIGNED_AND_CRATES] },
   })
   const assessment = row.assessmentId === null ? null : await models.Assessment.findByPk(row.assessmentId)
-  const release = await models.Job.findOne({
-    where: { kind: 'release', state: ['queued', 'running', 'failed'], payload: { consignmentId: row.id } },
-    order: [['id', 'DESC']],
-  })
+  const release = await releaseUnderWay(row)
   return {
     row: consignmentRow(whole ?? row),
     version: row.version,
@@ -171,7 +169,24 @@ async function statusOf(row: Consignment): Promise<ConsignmentStatus> {
       total: assessment.totalCount,
       error: assessment.error?.message ?? '',
     },
-    releasing: release !== null && release.state !== 'failed' && row.state === 'approved',
-    releaseError: release?.state === 'failed' && row.state === 'approved' ? (release.lastError ?? '') : '',
+    releasing: release !== null && release.state !== 'failed',
+    releaseError: release?.state === 'failed' ? (release.lastError ?? '') : '',
   }
+}
+
+/** The release last asked for under the signatures that stand. One that failed before they were put is history. */
+async function releaseUnderWay({ id, state, revision, planHash }: Consignment): Promise<Job | null> {
+  if (state !== 'approved' || planHash === null) return null
+  const signedAt = await models.Approval.max<Date | string | null, Approval>('signedAt', {
+    where: { consignmentId: id, planHash, voidedAt: null },
+  })
+  return models.Job.findOne({
+    where: {
+      kind: 'release',
+      state: ['queued', 'running', 'failed'],
+      payload: { consignmentId: id, revision, planHash },
+      ...(signedAt !== null && { runAfter: { [Op.gte]: signedAt } }),
+    },
+    order: [['id', 'DESC']],
+  })
 }
