@@ -27,6 +27,8 @@ export class Assessment extends Model<InferAttributes<Assessment>, InferCreation
   declare inputHash: string
   /** The snapshot that was run. */
   declare scenarioHash: string
+  /** The plan it was made of, with its places, as a snapshot. */
+  declare planSnapshotHash: CreationOptional<string | null>
   declare status: CreationOptional<AssessmentStatus>
   declare stage: CreationOptional<string>
   declare doneCount: CreationOptional<number>
@@ -54,6 +56,7 @@ export function initAssessment(sequelize: Sequelize): typeof Assessment {
       planHash: hash(),
       inputHash: hash(),
       scenarioHash: hash(),
+      planSnapshotHash: optional(hash()),
       status: withDefault(oneOf(ASSESSMENT_STATUSES), 'queued'),
       stage: withDefault(text(60), ''),
       doneCount: withDefault(count(), 0),

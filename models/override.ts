@@ -10,9 +10,10 @@ export class Override extends Model<InferAttributes<Override>, InferCreationAttr
   declare animalRef: string | null
   declare legRef: string | null
   declare reason: string
-  /** What it was signed for; a later run beyond either figure ends it. */
+  /** What it was signed for; a later run beyond any of these figures ends it. */
   declare minutesPast: number
   declare worstBodyC: number | null
+  declare worstValue: CreationOptional<number | null>
 }
 
 export function initOverride(sequelize: Sequelize): typeof Override {
@@ -26,6 +27,7 @@ export function initOverride(sequelize: Sequelize): typeof Override {
       reason: text(2000),
       minutesPast: whole(),
       worstBodyC: optional(figure()),
+      worstValue: optional(figure()),
     },
     { sequelize, modelName: 'Override', tableName: 'overrides', timestamps: false },
   )

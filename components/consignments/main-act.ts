@@ -21,8 +21,9 @@ function nextOf(state: ConsignmentState, needsAssessment: boolean): DeskAct | nu
     case 'assessed':
       return needsAssessment ? 'assess' : 'submit'
     case 'approved':
-      return 'release'
+      return needsAssessment ? 'assess' : 'release'
     case 'in_review':
+      return needsAssessment ? 'assess' : null
     case 'released':
     case 'under_way':
     case 'delivered':

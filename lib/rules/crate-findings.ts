@@ -74,6 +74,7 @@ function carbonDioxide(found: readonly Found[], about: About, when: When): Findi
         ...shared,
         status: 'breach',
         limit: 15_000,
+        minutesPast: Math.ceil(over15000),
         asked: `Carbon dioxide not above 15,000 ppm for ${CO2_BREACH_MIN} minutes.`,
         overridable: true,
       },

@@ -9,6 +9,8 @@ export interface SignedOverride {
   reason: string
   minutesPast: number
   worstBodyC: number | null
+  /** Of a finding without a body temperature (air, water, carbon dioxide): its own figure. */
+  worstValue: number | null
   signedBy: string
   signedAtMs: number
 }
@@ -90,24 +92,28 @@ export function isOverridable(finding: Finding): boolean {
 export function signedFigures({
   minutesPast = 0,
   worstBodyC,
-}: Finding): Pick<SignedOverride, 'minutesPast' | 'worstBodyC'> {
-  return { minutesPast, worstBodyC: worstBodyC ?? null }
+  value,
+}: Finding): Pick<SignedOverride, 'minutesPast' | 'worstBodyC' | 'worstValue'> {
+  const worstValue = worstBodyC === undefined ? (value ?? null) : null
+  return { minutesPast, worstBodyC: worstBodyC ?? null, worstValue }
 }
 
 /** Why an override holds no longer for this finding of a later run; undefined where it does. */
 export function whyOverrideEnds(finding: Finding | undefined, by: SignedOverride): string | undefined {
   if (finding === undefined || !isOverridable(finding))
     return finding?.overrideRefusedBecause ?? 'This finding can no longer be overridden.'
-  const { minutesPast, worstBodyC } = signedFigures(finding)
+  const { minutesPast, worstBodyC, worstValue } = signedFigures(finding)
   if (minutesPast > by.minutesPast)
     return `Now ${minutesPast} minutes past the limit; signed for ${by.minutesPast}.`
-  if (worstBodyC === null) return undefined
-  const beyond =
-    by.worstBodyC === null ||
-    (finding.side === 'low' ? worstBodyC < by.worstBodyC : worstBodyC > by.worstBodyC)
-  return beyond
-    ? `Now ${worstBodyC.toFixed(2)} °C; signed for ${by.worstBodyC?.toFixed(2) ?? 'no body temperature'}.`
-    : undefined
+  if (worstBodyC !== null && isBeyond(worstBodyC, by.worstBodyC, finding.side))
+    return `Now ${worstBodyC.toFixed(2)} °C; signed for ${by.worstBodyC?.toFixed(2) ?? 'no body temperature'}.`
+  if (worstValue !== null && isBeyond(worstValue, by.worstValue, finding.side))
+    return `Now ${worstValue.toFixed(1)} ${finding.unit ?? ''}; signed for ${by.worstValue?.toFixed(1) ?? 'no figure'}.`
+  return undefined
+}
+
+function isBeyond(now: number, signed: number | null, side: Finding['side']): boolean {
+  return signed === null || (side === 'low' ? now < signed : now > signed)
 }
 
 /** An override reaches only findings of the crate it was signed on. */

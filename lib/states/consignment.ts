@@ -20,6 +20,7 @@ export type ConsignmentMove =
   | 'approve'
   | 'return'
   | 'withdraw'
+  | 'lapse'
   | 'release'
   | 'depart'
   | 'deliver'
@@ -36,12 +37,21 @@ export const MOVES: Record<ConsignmentMove, Partial<Record<ConsignmentState, Con
     approved: 'draft',
     released: 'draft',
   },
-  assess: { draft: 'assessed', returned: 'assessed', assessed: 'assessed' },
+  /** A plan under review or approved is run again where a species row or a version has moved on: it keeps its state. */
+  assess: {
+    draft: 'assessed',
+    returned: 'assessed',
+    assessed: 'assessed',
+    in_review: 'in_review',
+    approved: 'approved',
+  },
   submit: { assessed: 'in_review' },
   approve: { in_review: 'approved' },
   return: { in_review: 'returned' },
   /** A vet takes an approval back before the journey starts; the manifest, if any, is void. */
   withdraw: { approved: 'returned', released: 'returned' },
+  /** A later run of the same plan ended a signature: the desk looks before a vet does. */
+  lapse: { approved: 'assessed' },
   release: { approved: 'released' },
   depart: { released: 'under_way' },
   deliver: { under_way: 'delivered' },

@@ -146,6 +146,7 @@ describe('opening', () => {
     const { consignmentId } = await approved(place, NOW)
     expect((await loadConsignment(place.as('dispatcher'), { consignmentId })).acts).toEqual([
       'save',
+      'assess',
       'release',
       'cancel',
     ])

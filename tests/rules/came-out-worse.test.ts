@@ -47,6 +47,7 @@ const override: SignedOverride = {
   reason: 'Short, and watched throughout.',
   minutesPast: 12,
   worstBodyC: 39.9,
+  worstValue: null,
   signedBy: 'Dr R. Example',
   signedAtMs: 0,
 }

@@ -6,6 +6,7 @@ import {
   effectiveVerdict,
   isOverridable,
   signedFigures,
+  whyOverrideEnds,
 } from '@/lib/rules/effective-verdict'
 import type { Finding } from '@/lib/rules/result'
 import { decide } from '@/lib/rules/verdicts'
@@ -51,6 +52,32 @@ describe('an override by a vet', () => {
     expect(effective.verdict.verdict).toBe('conditional')
     expect(effective.overridden).toEqual([{ findingIndex: 0, by }])
     expect(effective.ended).toEqual([])
+  })
+
+  it('of air, water or carbon dioxide ends beyond the figure it was signed for', () => {
+    const gas = aFinding({
+      rule: 'carbon-dioxide',
+      status: 'breach',
+      limitKind: 'other',
+      overridable: true,
+      minutesPast: 40,
+      value: 16_000,
+      unit: 'ppm',
+    })
+    const floor = aFinding({
+      rule: 'house-air-floor',
+      basis: 'house',
+      status: 'breach',
+      side: 'low',
+      overridable: true,
+      value: 4.5,
+      unit: '°C',
+    })
+    expect(whyOverrideEnds(gas, overrideOf(gas))).toBeUndefined()
+    expect(whyOverrideEnds({ ...gas, value: 29_000 }, overrideOf(gas))).toContain('signed for 16000.0')
+    expect(whyOverrideEnds({ ...gas, minutesPast: 41 }, overrideOf(gas))).toContain('41 minutes')
+    expect(whyOverrideEnds({ ...floor, value: 5 }, overrideOf(floor))).toBeUndefined()
+    expect(whyOverrideEnds({ ...floor, value: 4.4 }, overrideOf(floor))).toContain('signed for 4.5')
   })
 
   it.each<[string, Partial<SignedOverride>, boolean]>([

@@ -8,9 +8,9 @@ const moves = Object.keys(MOVES) as ConsignmentMove[]
 /** Every line there is, written out by hand. */
 const LINES = `
 draft save draft · assessed save draft · returned save draft · in_review save draft · approved save draft · released save draft
-draft assess assessed · returned assess assessed · assessed assess assessed
+draft assess assessed · returned assess assessed · assessed assess assessed · in_review assess in_review · approved assess approved
 assessed submit in_review · in_review approve approved · in_review return returned
-approved withdraw returned · released withdraw returned · approved release released
+approved withdraw returned · released withdraw returned · approved release released · approved lapse assessed
 released depart under_way · under_way deliver delivered · under_way stop stopped
 draft cancel cancelled · assessed cancel cancelled · returned cancel cancelled · in_review cancel cancelled · approved cancel cancelled · released cancel cancelled
 `

@@ -7,7 +7,7 @@ import { models } from '@/models'
 import { act } from '../act'
 import type { Done } from '../act'
 import { authorize } from '../authorize'
-import { currentAssessment } from '../consignments/current-assessment'
+import { latestAssessment } from '../consignments/current-assessment'
 import { move } from '../consignments/move'
 import { findConsignment } from '../consignments/visible'
 import { mailReturned } from '../mail/work-mails'
@@ -32,7 +32,7 @@ export function returnCrates(
       authorize(actor, 'approval.return')
       const state = await move(tx, row, 'return')
       const registration = await registrationOf(tx, actor, now)
-      const { assessment, plan } = await currentAssessment(tx, row)
+      const { assessment, plan } = await latestAssessment(tx, row)
       const crates = chosenCrates(plan, input.crateIds)
       for (const crate of crates) {
         await models.Approval.create(

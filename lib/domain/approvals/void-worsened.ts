@@ -12,14 +12,14 @@ import { voidApprovals } from './void'
 
 /**
  * After the same plan was run again with other species rows, weather or rules: ends every approval whose crate set-up came
- * out worse than what was signed. One that came out no worse goes on standing.
+ * out worse than what was signed. One that came out no worse goes on standing. True where any was ended.
  */
 export async function voidWorsened(
   tx: Transaction,
   row: Consignment,
   later: { plan: Plan; assessmentId: number; result: Outcome },
   now: Date,
-): Promise<void> {
+): Promise<boolean> {
   const worse: Approval[] = []
   for (const [crateId, approval] of await signedCrates(tx, row)) {
     if (approval.assessmentId === later.assessmentId) continue
@@ -28,13 +28,14 @@ export async function voidWorsened(
     const crate = { crateId, occupants, overrides: overridesOf(approval) }
     if (signed === null || cameOutWorse(crate, signed, later.result)) worse.push(approval)
   }
-  if (worse.length === 0) return
+  if (worse.length === 0) return false
   await voidApprovals(tx, row, worse, {
     at: now,
     key: `assessment-${later.assessmentId}`,
     voidedReason: 'The plan was assessed again and came out worse than what was signed.',
     because: 'the plan was assessed again and came out worse than what was signed',
   })
+  return true
 }
 
 async function resultOf(tx: Transaction, { assessmentId }: Approval) {

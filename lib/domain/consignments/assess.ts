@@ -5,6 +5,7 @@ import { SteadfoldError } from '@/lib/errors'
 import type { Actor } from '@/lib/policies/actor'
 import { RULES_VERSION } from '@/lib/rules/version'
 import type { ConsignmentAct } from '@/lib/schemas/act'
+import type { Plan, PlanPlace } from '@/lib/schemas/plan'
 import { nextState } from '@/lib/states/consignment'
 import { ENGINE_VERSION } from '@/lib/thermal/version'
 import { models } from '@/models'
@@ -52,7 +53,10 @@ export function assessConsignment(actor: Actor, input: ConsignmentAct, now: Date
         { status: 'superseded' },
         { where: { consignmentId, status: ['queued', 'running'] }, transaction: tx },
       )
-      const assessment = await insert(tx, row, judged, { by: actor.id, at: now })
+      const places = knowledge.places.filter(({ id }) =>
+        plan.legs.some(({ fromPlaceId, toPlaceId }) => id === fromPlaceId || id === toPlaceId),
+      )
+      const assessment = await insert(tx, row, { judged, plan, places }, { by: actor.id, at: now })
       await writeRow(tx, row, { assessmentId: assessment.id, planHash: judged.planHash })
       await enqueue(tx, {
         kind: 'assess',
@@ -101,10 +105,17 @@ async function stand(
   }
 }
 
+/** What an assessment is made of: the plan hash can be worked out again from it, whatever the working plan becomes. */
+interface AssessedPlan {
+  judged: Extract<JudgedPlan, { assessable: true }>
+  plan: Plan
+  places: readonly PlanPlace[]
+}
+
 async function insert(
   tx: Transaction,
   row: Consignment,
-  judged: Extract<JudgedPlan, { assessable: true }>,
+  { judged, plan, places }: AssessedPlan,
   asked: { by: number; at: Date },
 ): Promise<Assessment> {
   return models.Assessment.create(
@@ -114,6 +125,14 @@ async function insert(
       planHash: judged.planHash,
       inputHash: judged.inputHash,
       scenarioHash: await keepSnapshot(tx, 'scenario', judged.scenario),
+      planSnapshotHash: await keepSnapshot(tx, 'plan', {
+        schema: 'steadfold/assessed-plan@1',
+        mark: row.mark,
+        revision: row.revision,
+        planHash: judged.planHash,
+        plan,
+        places,
+      }),
       engineVersion: ENGINE_VERSION,
       rulesVersion: RULES_VERSION,
       profileVersions: judged.profileVersions,

@@ -21,18 +21,27 @@ export interface CurrentAssessment {
  * `out_of_date` where any of them has moved on, `wrong_state` where there is none.
  */
 export async function currentAssessment(tx: Transaction, row: Consignment): Promise<CurrentAssessment> {
-  if (row.assessmentId === null) throw new SteadfoldError('wrong_state', 'This plan has not been assessed.')
-  const assessment = await models.Assessment.findByPk(row.assessmentId, { transaction: tx })
-  if (assessment === null || assessment.status !== 'done') {
+  const { assessment, plan } = await latestAssessment(tx, row)
+  if (assessment.status !== 'done') {
     throw new SteadfoldError('wrong_state', 'The assessment of this plan is not finished.')
   }
-  const plan = await readPlan(row, tx)
   const judged = judgePlan(plan, row.mark, await planningKnowledge(plan, tx))
   if (row.outOfDate || !judged.assessable || judged.inputHash !== assessment.inputHash) {
     throw new SteadfoldError('out_of_date', 'The assessment is out of date: assess the plan again.')
   }
   const findings = await findingsOf(assessment.id, tx)
   return { assessment, findings, plan }
+}
+
+/** The newest assessment asked for on the working plan, whether or not it still speaks of it. */
+export async function latestAssessment(
+  tx: Transaction,
+  row: Consignment,
+): Promise<Omit<CurrentAssessment, 'findings'>> {
+  const assessment =
+    row.assessmentId === null ? null : await models.Assessment.findByPk(row.assessmentId, { transaction: tx })
+  if (assessment === null) throw new SteadfoldError('wrong_state', 'This plan has not been assessed.')
+  return { assessment, plan: await readPlan(row, tx) }
 }
 
 /** The findings of an assessment in their order: an override or a verdict names one by its place. */

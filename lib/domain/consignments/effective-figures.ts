@@ -50,6 +50,7 @@ export function overridesOf({ overrides = [], signerName, signedAt }: Approval):
     reason: override.reason,
     minutesPast: override.minutesPast,
     worstBodyC: override.worstBodyC,
+    worstValue: override.worstValue,
     signedBy: signerName,
     signedAtMs: signedAt.getTime(),
   }))

@@ -64,6 +64,7 @@ const MOVE_WORDS: Record<ConsignmentMove, string> = {
   approve: 'only what is in review can be approved.',
   return: 'only what is in review can be returned.',
   withdraw: 'an approval can be withdrawn only before the journey starts.',
+  lapse: 'only what is approved can lose its approval.',
   release: 'only an approved consignment can be released.',
   depart: 'only a released consignment can depart.',
   deliver: 'only a consignment under way can be delivered.',
