@@ -32,6 +32,8 @@ export function WorkPart({
   }
   if (assessment !== null && isWorking(status))
     return <Assessing assessment={assessment} lost={status.lost} />
+  if (assessment?.status === 'done' && isWorking(first))
+    return <WorkRow done={1} of={1} words="Assessed. The page is being drawn afresh." />
   if (assessment?.status === 'failed') {
     return (
       <Notice
@@ -81,7 +83,7 @@ function Assessing({
       more={
         lost
           ? 'The desk does not answer just now; the work goes on there.'
-          : 'You can leave; it goes on by itself. Figures below are the last ones.'
+          : 'You can leave; it goes on by itself.'
       }
     />
   )

@@ -87,7 +87,7 @@ export function* assessSteps(
 }
 
 /** Rough numbers of runs a leg takes in each stage, for the progress shown; never for the result. */
-const EXPECTED = { margins: 12, figures: 40 }
+const EXPECTED = { margins: 16, figures: 40 }
 
 function* bodyFindings(prepared: Prepared, base: BaseRuns, runner: Runner): Steps<Finding[]> {
   const { legs } = prepared.scenario
