@@ -71,8 +71,8 @@ function factsBlock(view: ManifestView): Block {
       },
       { caption: 'Animals, crates', value: `${animals} in ${crates}` },
       {
-        caption: 'Time in crate, waybill',
-        value: `${duration(view.journeyMin)}, ${view.waybill === '' ? 'no waybill yet' : `no. ${view.waybill}`}`,
+        caption: 'Time in crate',
+        value: duration(view.journeyMin),
       },
     ],
   ]

@@ -92,7 +92,6 @@ export interface ManifestView {
   animalCount: number
   crateCount: number
   journeyMin: number
-  waybill: string
 
   stamp: Stamp
   headline: string
@@ -104,8 +103,6 @@ export interface ManifestView {
   legs: ManifestLeg[]
 
   approvals: ApprovalView[]
-  /** Says on what a consignment without a signature of its own rests; empty otherwise. */
-  standingWords: string
   conditions: ConditionView[]
   handling: string[]
   calls: CallView[]

@@ -5,8 +5,9 @@ import { firm } from '@/lib/domain/firm'
 import { prepareRelease } from '@/lib/domain/release/prepare'
 import type { PreparedRelease } from '@/lib/domain/release/prepare'
 import { recordRelease } from '@/lib/domain/release/record'
-import type { IssuedPaper } from '@/lib/domain/release/record'
+import type { IssuedPaper, IssuedRelease } from '@/lib/domain/release/record'
 import { env } from '@/lib/env'
+import { SteadfoldError } from '@/lib/errors'
 import { manifestLetter } from '@/lib/mail/letters/manifest-letter'
 import type { Signer } from '@/lib/documents/seal'
 import { signer, signingIdentity } from '@/lib/signing'
@@ -14,18 +15,33 @@ import { buildManifestView } from '@/lib/views/manifest-view/build-manifest-view
 import { buildSheetView } from '@/lib/views/sheet-view/build-sheet-view'
 import { models } from '@/models'
 
+/** Somebody who saves again and again while papers are made has more to say: the release is asked for once that is done. */
+const TURNS = 3
+
 /**
  * Makes the papers of one release and records them: rendering and sealing come before the transaction that records,
- * which looks at everything again. Done twice, it is recorded once.
+ * which looks at everything again. Made anew where the consignment was written to meanwhile. Done twice, it is recorded
+ * once.
  */
 export async function releaseJob(payload: unknown, clock: () => Date): Promise<void> {
-  const prepared = await prepareRelease(payload, clock())
-  if (prepared === null) return
+  for (let turn = 1; turn <= TURNS; turn += 1) {
+    const prepared = await prepareRelease(payload, clock())
+    if (prepared === null) return
+    const issued = await issue(prepared, clock())
+    if ((await recordRelease(prepared, issued, clock())) !== 'changed') return
+  }
+  throw new SteadfoldError(
+    'conflict',
+    'The consignment was changed while its papers were being made. Release it again once nobody is saving.',
+  )
+}
+
+async function issue(prepared: PreparedRelease, now: Date): Promise<IssuedRelease> {
   const holder = await signer()
   const sheet = await sheetPaper(prepared, holder)
-  const { paper: manifest, view } = await manifestPaper(prepared, holder, clock())
+  const { paper: manifest, view } = await manifestPaper(prepared, holder, now)
   const letter = { to: prepared.shipperEmail, ...manifestLetter(view, { appUrl: env().appUrl }) }
-  await recordRelease(prepared.task, { papers: [sheet, manifest], letter }, clock())
+  return { papers: [sheet, manifest], letter }
 }
 
 async function sheetPaper({ sheet }: PreparedRelease, holder: Signer): Promise<IssuedPaper> {
@@ -49,14 +65,12 @@ async function manifestPaper(
     verifyUrl: `${env().appUrl}/verify/${code}`,
     releasedBy: `${releasedBy.name}, ${releasedBy.role}`,
     releasedAtMs: now.getTime(),
-    waybill: '',
     shipperEmail,
     vetOnCall: await vetOnCall(manifest.consignment.id, manifest.consignment.planHash),
     crateModels: (await models.CrateModel.findAll({ attributes: ['id', 'name'] })).map(({ id, name }) => ({
       id,
       name,
     })),
-    standingWords: '',
     seal: { subject, serial, validToMs, selfIssued },
   })
   const { bytes, pages } = await renderManifest(view)

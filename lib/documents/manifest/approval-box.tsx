@@ -14,10 +14,9 @@ const STATEMENT = CONTENT_WIDTH - RECORD - 3 - 20
 const NOT_FITNESS = 'This is not a certificate of fitness to travel.'
 
 /** What a vet signed, one box for each signature; the record beside it was checked by an admin, never typed. */
-export function approvalBoxes({ approvals, standingWords }: ManifestView): FixedBlock[] {
+export function approvalBoxes({ approvals }: ManifestView): FixedBlock[] {
   if (approvals.length === 0) {
-    const text = standingWords === '' ? 'No vet has signed this consignment.' : standingWords
-    return [{ height: 28 + 30, newSheet: true, element: <PlainApproval key="approval" text={text} /> }]
+    return [{ height: 28 + 30, newSheet: true, element: <NotSigned key="approval" /> }]
   }
   return approvals.map((approval, index) => ({
     newSheet: index === 0,
@@ -31,12 +30,12 @@ export function approvalBoxes({ approvals, standingWords }: ManifestView): Fixed
   }))
 }
 
-function PlainApproval({ text }: { text: string }) {
+function NotSigned() {
   return (
     <View>
       <Heading>Vet’s approval</Heading>
       <Words size={12.5} line={16.5} style={{ marginTop: px(4) }}>
-        {text}
+        No vet has signed this consignment.
       </Words>
     </View>
   )

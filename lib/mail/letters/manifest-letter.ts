@@ -184,8 +184,8 @@ function legs({ legs: all }: ManifestView): LetterPart[] {
   ]
 }
 
-function approvals({ approvals: all, standingWords }: ManifestView): LetterPart[] {
-  const none: LetterPart[] = standingWords === '' ? [] : [{ kind: 'paragraph', text: standingWords }]
+function approvals({ approvals: all }: ManifestView): LetterPart[] {
+  const none: LetterPart[] = [{ kind: 'paragraph', text: 'No vet has signed this consignment.' }]
   return [
     { kind: 'heading', text: 'Vet' },
     ...(all.length === 0

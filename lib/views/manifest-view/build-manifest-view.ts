@@ -14,13 +14,10 @@ export interface ManifestFacts extends SheetFacts {
   /** Who released it, and as what: "I. Quennell, dispatcher". */
   releasedBy: string
   releasedAtMs: number
-  waybill: string
   shipperEmail: string
   /** Name and telephone of the vet to ring; null where nobody is named. */
   vetOnCall: { name: string; telephone: string } | null
   crateModels: readonly { id: number; name: string }[]
-  /** Says on what a consignment without a signature of its own rests; empty otherwise. */
-  standingWords: string
   seal: { subject: string; serial: string; validToMs: number; selfIssued: boolean }
 }
 
@@ -58,7 +55,6 @@ export function buildManifestView(facts: ManifestFacts): ManifestView {
     animalCount: sheet.animalCount,
     crateCount: sheet.crateCount,
     journeyMin: sheet.journeyMin,
-    waybill: facts.waybill,
     stamp: sheet.stamp,
     headline: sheet.headline,
     headlineMore: sheet.headlineMore,
@@ -67,7 +63,6 @@ export function buildManifestView(facts: ManifestFacts): ManifestView {
     crates: crates(facts, sheet),
     legs: sheet.legs.map((leg) => manifestLeg(leg, sheet)),
     approvals: sheet.approvals,
-    standingWords: facts.standingWords,
     conditions: sheet.conditions,
     handling: handlingOf(plan),
     calls: calls(facts),
