@@ -30,9 +30,10 @@ export interface SigningIdentity {
 }
 
 export interface SigningAddress {
-  p12Path: string
+  /** The firm's own file; undefined: it has none. A file that is named and cannot be used is an error, never replaced. */
+  p12Path: string | undefined
   p12Password: string
-  /** Where a self-issued pair lives when there is no file at p12Path. */
+  /** Where the self-issued pair of an installation without a file lives. */
   folder: string
   firmName: string
 }
@@ -52,13 +53,7 @@ export async function signer(address: SigningAddress = fromEnv()): Promise<Signe
   return {
     name: commonName(keyring.leaf.subject),
     sign: async (bytes, at) => {
-      const { notBefore, notAfter } = keyring.leaf.validity
-      if (at < notBefore || at > notAfter) {
-        throw new SteadfoldError(
-          'unavailable',
-          `The signing certificate is valid from ${day(notBefore)} to ${day(notAfter)}, not now.`,
-        )
-      }
+      checkValidity(keyring, at)
       return detachedCms(bytes, keyring, at)
     },
   }
@@ -79,6 +74,21 @@ export async function signingIdentity(address: SigningAddress = fromEnv()): Prom
   }
 }
 
+/** Throws "unavailable" where the firm's own key is named and cannot seal now; a self-issued one is made when needed. */
+export async function checkOwnKey(now: Date, address: SigningAddress = fromEnv()): Promise<void> {
+  if (address.p12Path === undefined) return
+  checkValidity(await keyringOf(address), now)
+}
+
+function checkValidity({ leaf, selfIssued }: Keyring, at: Date): void {
+  const { notBefore, notAfter } = leaf.validity
+  if (at >= notBefore && at <= notAfter) return
+  throw new SteadfoldError(
+    'unavailable',
+    `The signing certificate${selfIssued ? '' : ' (SIGNING_P12_PATH)'} is valid from ${day(notBefore)} to ${day(notAfter)}, not now.`,
+  )
+}
+
 function fromEnv(): SigningAddress {
   const { signing, dataDir, firm } = env()
   return { ...signing, folder: path.join(dataDir, 'signing'), firmName: firm.name }
@@ -86,7 +96,7 @@ function fromEnv(): SigningAddress {
 
 function keyringOf(address: SigningAddress): Promise<Keyring> {
   const keyrings = (shared.steadfoldKeyrings ??= new Map())
-  const place = `${address.p12Path}\n${address.folder}`
+  const place = `${address.p12Path ?? ''}\n${address.folder}`
   const known = keyrings.get(place)
   if (known) return known
   const loading = loadKeyring(address)
@@ -97,16 +107,29 @@ function keyringOf(address: SigningAddress): Promise<Keyring> {
 }
 
 async function loadKeyring({ p12Path, p12Password, folder, firmName }: SigningAddress): Promise<Keyring> {
-  const brought = existsSync(p12Path)
-  const file = brought ? p12Path : path.join(folder, OWN_FILE)
-  if (!brought && !existsSync(file)) await issueOwn(folder, firmName)
+  const selfIssued = p12Path === undefined
+  const file = p12Path ?? path.join(folder, OWN_FILE)
+  if (selfIssued && !existsSync(file)) await issueOwn(folder, firmName)
   try {
     const bytes = await readFile(/*turbopackIgnore: true*/ file)
-    return { ...openP12(bytes, brought ? p12Password : ''), selfIssued: !brought }
+    return { ...openP12(bytes, selfIssued ? '' : p12Password), selfIssued }
   } catch (error) {
-    const reason = error instanceof Error ? error.message : String(error)
-    throw new SteadfoldError('unavailable', `The signing key cannot be read: ${reason}`)
+    const name = selfIssued ? '' : ' (SIGNING_P12_PATH)'
+    throw new SteadfoldError('unavailable', `The signing key${name} cannot be read: ${reasonOf(error)}.`)
   }
+}
+
+/** In plain words, and without the path: people at the desk read it too. */
+function reasonOf(error: unknown): string {
+  const { code, message } =
+    error instanceof Error ? (error as NodeJS.ErrnoException) : { message: String(error) }
+  if (code === 'ENOENT') return 'there is no such file'
+  if (code !== undefined) return `the file cannot be opened (${code})`
+  return /password/i.test(message) ? 'the password (SIGNING_P12_PASSWORD) does not open it' : plain(message)
+}
+
+function plain(message: string): string {
+  return message.startsWith('it holds') ? message : `it is no PKCS#12 file (${message.replace(/\.$/, '')})`
 }
 
 function openP12(bytes: Buffer, password: string): Omit<Keyring, 'selfIssued'> {

@@ -15,8 +15,7 @@ export interface DemoSignIns {
  * verbs that people use, with a request id made from what is asked, so that seeding again changes nothing.
  */
 export async function seed(): Promise<DemoSignIns> {
-  if (process.env['DEMO'] === 'no') return { password: '', people: [] }
-  env()
+  if (!env().demo) return { password: '', people: [] }
   const world = await demoWorld(new Date())
   for (const consignment of DEMO_CONSIGNMENTS) await bringTo(consignment, world)
   return {

@@ -3,7 +3,7 @@ import { pathToFileURL } from 'node:url'
 import { bundleWorker } from './build.mjs'
 import { root } from './paths.mjs'
 import { Supervised, processNote } from './processes.mjs'
-import { SetupError, portIsFree, until } from './run.mjs'
+import { SetupError, until, whyNotListening } from './run.mjs'
 
 const HEALTHY_WITHIN_MS = 120_000
 /** Falling this often in a row before it was ever healthy means it cannot start at all. */
@@ -12,9 +12,12 @@ const HOPELESS = 3
 /** Ends what a killed start has left over, then makes sure of the port, before anything slow is begun. */
 export async function clearTheWay({ folder, host, port }) {
   await processesOf(folder).endLeftovers()
-  if (await portIsFree(port, host)) return
+  const reason = await whyNotListening(port, host)
+  if (reason === undefined) return
   throw new SetupError(
-    `Port ${port} is in use by another program. Free it, or choose another: PORT=${port + 1} npm start`,
+    reason === 'EADDRINUSE'
+      ? `Port ${port} is in use by another program. Free it, or choose another: PORT=${port + 1} npm start`
+      : `Nothing can listen at HOST=${host}, PORT=${port} (${reason}). Put an address of this machine, such as 127.0.0.1, or 0.0.0.0 for all of them.`,
   )
 }
 

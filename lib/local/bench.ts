@@ -5,13 +5,20 @@ import { lauderKelso } from '@/seeders/demo/consignments/lauder-kelso'
 import { requestIdOf } from '@/seeders/demo/request-id'
 import { bringTo, confirmAll, personOf, workOff } from '@/seeders/demo/stages'
 import { demoWorld } from '@/seeders/demo/world'
-import { benchThermal } from './bench-thermal'
+import { benchAssess, benchSimulate, benchSolvers } from './bench-thermal'
 
 const RELEASES = 4
 const HOUR_MS = 3_600_000
 
-console.log('Engine')
-benchThermal((line) => console.log(`  ${line}`))
+const print = (line: string) => console.log(`  ${line}`)
+console.log('One run of the reference consignment: 48 h, 8 legs, 4 crates, 6 animals')
+benchSimulate(print)
+console.log(
+  '\nOur solver and an independent one (odex), at the same largest error of body temperature over all minutes',
+)
+benchSolvers(print)
+console.log('\nA whole assessment of the reference consignment')
+benchAssess(print)
 console.log('\nRelease: render, sign, store, queue the mail')
 await benchRelease()
 await closeDatabase()
@@ -32,8 +39,8 @@ async function benchRelease() {
     const milliseconds = performance.now() - began
     const pages = await models.Document.sum('pageCount', { where: { consignmentId: row.id } })
     const aim = 500 + 150 * pages
-    console.log(
-      `  ${turn === 1 ? 'cold' : 'warm'}: ${milliseconds.toFixed(0)} ms for ${pages} pages (aim when warm: ${aim} ms)`,
+    print(
+      `${turn === 1 ? 'cold' : 'warm'}: ${milliseconds.toFixed(0)} ms for ${pages} pages (aim when warm: ${aim} ms)`,
     )
   }
 }

@@ -114,11 +114,16 @@ export function findProgram(...names) {
 }
 
 /** True where nothing listens on the loopback port. */
-export function portIsFree(port, host = '127.0.0.1') {
+export async function portIsFree(port, host = '127.0.0.1') {
+  return (await whyNotListening(port, host)) === undefined
+}
+
+/** The system's code (EADDRINUSE, EACCES, …) where one cannot listen there; undefined where one can. */
+export function whyNotListening(port, host) {
+  const probe = createServer()
   return new Promise((resolve) => {
-    const probe = createServer()
-    probe.once('error', () => resolve(false))
-    probe.listen({ port, host, exclusive: true }, () => probe.close(() => resolve(true)))
+    probe.once('error', (error) => resolve(error.code))
+    probe.listen({ port, host, exclusive: true }, () => probe.close(() => resolve(undefined)))
   })
 }
 

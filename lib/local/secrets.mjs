@@ -3,7 +3,7 @@ import { chmodSync, existsSync, mkdirSync, readFileSync, renameSync, writeFileSy
 import path from 'node:path'
 import { SetupError } from './run.mjs'
 
-const NAMES = ['databaseMigratePassword', 'databaseAppPassword', 'nextauthSecret', 'signingP12Password']
+const NAMES = ['databaseMigratePassword', 'databaseAppPassword', 'nextauthSecret']
 
 /**
  * The passwords of this installation, made at the first start and kept in secrets.json, readable by its owner alone.

@@ -1,13 +1,15 @@
+import './env-file.mjs'
 import { existsSync, readFileSync, rmSync, writeFileSync } from 'node:fs'
 import path from 'node:path'
 import { clearTheWay, startApplication } from './application.mjs'
 import { build } from './build.mjs'
 import { startMariadb, stopMariadb } from './mariadb.mjs'
 import { FOR_START, checkNode, ensureNodePackages, ensurePrograms } from './packages.mjs'
-import { dataDir, root } from './paths.mjs'
+import { dataDir } from './paths.mjs'
 import { SetupError, freePort, processExists, whenNpmIsGone, writableFolder, portFrom } from './run.mjs'
 import { migrateUp, prepareDatabase, runTypescript } from './schema.mjs'
 import { keepSecrets } from './secrets.mjs'
+import { checkSettings } from './settings.mjs'
 import { applicationVariables, databaseVariables } from './variables.mjs'
 
 /*
@@ -34,20 +36,20 @@ start().catch(async (error) => {
 
 async function start() {
   checkNode()
-  if (existsSync(path.join(root, '.env'))) process.loadEnvFile(path.join(root, '.env'))
   writableFolder(dataDir)
   holdTheOnlyStart()
   const host = process.env.HOST || '127.0.0.1'
   const port = portFrom('PORT', 3000)
   await clearTheWay({ folder: dataDir, host, port })
   const ownDatabase = !process.env.DATABASE_USER
-  await ensurePrograms(ownDatabase ? FOR_START : {}, say)
   await ensureNodePackages(say)
   const secrets = keepSecrets(dataDir)
+  const { demo } = await checkSettings({ folder: dataDir, port, secrets, ownDatabase })
+  await ensurePrograms(ownDatabase ? FOR_START : {}, say)
   const mail = process.env.SMTP_URL ? undefined : await startMail()
   const rest = applicationVariables({ folder: dataDir, port, secrets, smtpUrl: mail?.smtpUrl })
   const { variables, signIns, empty } = ownDatabase
-    ? await startOwnDatabase(secrets, rest)
+    ? await startOwnDatabase(secrets, rest, demo)
     : await reachGivenDatabase(rest)
   if (!dev) await build(say)
   say(dev ? 'Starting in development …' : 'Starting …')
@@ -57,7 +59,7 @@ async function start() {
   welcome(rest.APP_URL, mail, signIns, empty)
 }
 
-async function startOwnDatabase(secrets, rest) {
+async function startOwnDatabase(secrets, rest, demo) {
   say('Starting the database …')
   const port = process.env.DATABASE_PORT ? portFrom('DATABASE_PORT', 3306) : undefined
   // One left running by a start that was killed is ours to stop as well.
@@ -65,7 +67,6 @@ async function startOwnDatabase(secrets, rest) {
   const server = await startMariadb(dataDir, { port })
   const database = process.env.DATABASE_NAME || DATABASE
   const variables = { ...rest, ...databaseVariables(server, database, secrets) }
-  const demo = process.env.DEMO !== 'no'
   const ready = await prepareDatabase({ server, database, secrets, variables, folder: dataDir, demo, say })
   return { variables, ...ready }
 }

@@ -1,3 +1,4 @@
+import './env-file.mjs'
 import { existsSync } from 'node:fs'
 import path from 'node:path'
 import { databaseFiles, dataDir, root } from './paths.mjs'
@@ -15,7 +16,6 @@ const [file, ...args] = process.argv.slice(2)
 work().catch(failAndExit)
 
 async function work() {
-  if (existsSync(path.join(root, '.env'))) process.loadEnvFile(path.join(root, '.env'))
   const command = ['--import', path.join(root, 'lib/local/typescript.mjs'), path.join(root, file), ...args]
   const env = { ...process.env, TZ: 'UTC', ...(await variables()) }
   process.exitCode = (await run(process.execPath, command, { cwd: root, env, show: true })).code

@@ -1,10 +1,11 @@
-import { stat, readdir, writeFile } from 'node:fs/promises'
+import { readFile, readdir, stat, writeFile } from 'node:fs/promises'
 import path from 'node:path'
 import { Document, Page, renderToBuffer, Text } from '@react-pdf/renderer'
-import { beforeAll, describe, expect, it } from 'vitest'
+import forge from 'node-forge'
+import { beforeAll, describe, expect, it, vi } from 'vitest'
 import { seal } from '@/lib/documents/seal'
 import { checkSeal } from '@/lib/documents/verify'
-import { signer, type SigningAddress, signingIdentity } from '@/lib/signing'
+import { checkOwnKey, signer, type SigningAddress, signingIdentity } from '@/lib/signing'
 import { inFolder, pdfsig } from './support/pdf-tools'
 
 const FIRM = 'Corran Animal Couriers'
@@ -12,7 +13,7 @@ const AT = new Date()
 
 function addressIn(folder: string, more: Partial<SigningAddress> = {}): SigningAddress {
   return {
-    p12Path: path.join(folder, 'brought.p12'),
+    p12Path: undefined,
     p12Password: '',
     folder: path.join(folder, 'signing'),
     firmName: FIRM,
@@ -119,8 +120,8 @@ describe('a sealed document', () => {
 describe('the signing key', () => {
   it('is made once, though two processes start at once, and only its own user can read it', async () => {
     await inFolder(async (folder) => {
-      // Two addresses that differ in one letter of p12Path are two processes to the cache, with one folder.
-      const both = [addressIn(folder), addressIn(folder, { p12Path: path.join(folder, 'other.p12') })]
+      // Two spellings of one folder are two processes to the cache.
+      const both = [addressIn(folder), addressIn(folder, { folder: `${folder}/./signing` })]
       const [one, two] = await Promise.all(both.map((address) => signingIdentity(address)))
       expect(one?.serial).toBe(two?.serial)
       expect(one).toMatchObject({ subject: FIRM, issuer: `${FIRM}, self-issued root`, selfIssued: true })
@@ -131,22 +132,53 @@ describe('the signing key', () => {
     })
   }, 60_000)
 
-  it('is refused with a reason when the file brought is no PKCS#12, and read again once it is put right', async () => {
+  it('is refused with a reason while the file named is not there or no PKCS#12, and never replaced by one of ours', async () => {
     await inFolder(async (folder) => {
-      const address = addressIn(folder)
-      await writeFile(address.p12Path, 'not a key')
-      await expect(signingIdentity(address)).rejects.toMatchObject({ code: 'unavailable' })
-      const own = addressIn(folder, { p12Path: path.join(folder, 'none.p12') })
-      await signingIdentity(own)
-      await writeFile(
-        address.p12Path,
-        await import('node:fs/promises').then((fs) => fs.readFile(path.join(own.folder, 'signing.p12'))),
-      )
-      expect(await signingIdentity(address)).toMatchObject({
+      const brought = addressIn(folder, { p12Path: path.join(folder, 'brought.p12') })
+      const asked = () => signingIdentity(brought)
+      await expect(asked()).rejects.toMatchObject({
+        code: 'unavailable',
+        message: 'The signing key (SIGNING_P12_PATH) cannot be read: there is no such file.',
+      })
+      await writeFile(brought.p12Path ?? '', 'not a key')
+      await expect(asked()).rejects.toMatchObject({
+        code: 'unavailable',
+        message: expect.stringContaining('it is no PKCS#12 file') as string,
+      })
+      expect(await readdir(folder)).toEqual(['brought.p12'])
+      // Read again once it is put right.
+      await writeFile(brought.p12Path ?? '', await ownKey(folder, 'desk'))
+      await expect(asked()).rejects.toMatchObject({
+        code: 'unavailable',
+        message: expect.stringContaining('the password (SIGNING_P12_PASSWORD) does not open it') as string,
+      })
+      expect(await signingIdentity({ ...brought, p12Password: 'desk' })).toMatchObject({
         subject: FIRM,
         selfIssued: false,
         rootPem: null,
       })
+    })
+  }, 60_000)
+
+  it('is refused before anything is sealed where the firm’s own certificate has run out', async () => {
+    await inFolder(async (folder) => {
+      const p12Path = path.join(folder, 'brought.p12')
+      vi.useFakeTimers({ toFake: ['Date'], now: new Date('2010-06-01') })
+      try {
+        await writeFile(p12Path, await ownKey(folder, ''))
+      } finally {
+        vi.useRealTimers()
+      }
+      const brought = addressIn(folder, { p12Path })
+      await expect(checkOwnKey(AT, brought)).rejects.toMatchObject({
+        code: 'unavailable',
+        message:
+          'The signing certificate (SIGNING_P12_PATH) is valid from 2010-05-30 to 2015-05-30, not now.',
+      })
+      await checkOwnKey(new Date('2012-01-01'), brought)
+      // Nothing to check where none was brought, and nothing made by looking.
+      await checkOwnKey(AT, addressIn(folder, { folder: path.join(folder, 'nowhere') }))
+      expect((await readdir(folder)).sort()).toEqual(['brought.p12', 'signing'])
     })
   }, 60_000)
 
@@ -159,3 +191,17 @@ describe('the signing key', () => {
     })
   }, 60_000)
 })
+
+/** A key and its certificates under a password, as a firm might bring them. */
+async function ownKey(folder: string, password: string): Promise<Buffer> {
+  const own = addressIn(folder)
+  await signingIdentity(own)
+  const bytes = await readFile(path.join(own.folder, 'signing.p12'))
+  const p12 = forge.pkcs12.pkcs12FromAsn1(forge.asn1.fromDer(bytes.toString('binary')), '')
+  const { certBag = '', pkcs8ShroudedKeyBag = '' } = forge.pki.oids
+  const key = p12.getBags({ bagType: pkcs8ShroudedKeyBag })[pkcs8ShroudedKeyBag]?.[0]?.key
+  const chain = (p12.getBags({ bagType: certBag })[certBag] ?? []).flatMap(({ cert }) => (cert ? [cert] : []))
+  if (!key) throw new Error('The pair made here holds no key.')
+  const again = forge.pkcs12.toPkcs12Asn1(key, chain, password, { algorithm: 'aes256' })
+  return Buffer.from(forge.asn1.toDer(again).getBytes(), 'binary')
+}
