@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import { overrideSchema, vetConditionSchema } from '@/lib/schemas/approval'
+import { earlySignSchema, overrideSchema, vetConditionSchema } from '@/lib/schemas/approval'
 import type { ApproveCrates, ReturnCrates } from '@/lib/schemas/approval'
 import { itemId } from '@/lib/schemas/act'
 import type { FindingView } from '@/lib/views/sheet'
@@ -39,6 +39,12 @@ export const reviewFormSchema = z
     values.overrides.forEach(({ on, reason }, index) => {
       const parsed = overrideSchema.shape.reason.safeParse(reason)
       if (on && !parsed.success) issue(['overrides', index, 'reason'], parsed.error.issues[0]?.message ?? '')
+    })
+    values.signs.forEach(({ on, text }, index) => {
+      const parsed = earlySignSchema.shape.text.safeParse(text)
+      // An empty row is no sign, and is left out.
+      if (on && text.trim() !== '' && !parsed.success)
+        issue(['signs', index, 'text'], parsed.error.issues[0]?.message ?? '')
     })
     if (values.examined === '') issue(['examined'], 'Examined: say whether you have examined the animals.')
     if (values.password === '') issue(['password'], 'Your password is missing.')

@@ -1,4 +1,5 @@
 import { type FieldIssue, SteadfoldError } from '@/lib/errors'
+import { notOnPaperWords } from '@/lib/schemas/paper-letters'
 import type { FaceName } from '@/lib/tokens'
 import { missingLetters } from './fonts'
 
@@ -16,29 +17,19 @@ const FACE_OF_FIELD: Record<string, FaceName[]> = {
 
 /**
  * Throws "invalid" where a view holds a letter the paper's fonts cannot show, naming each field by its path. A name left
- * out or put in other letters would make a document of somebody else.
+ * out or put in other letters would make a document of somebody else. The last guard: what people type is refused where they
+ * type it (lib/planning/reasons/paper.ts, printed() in lib/schemas).
  */
 export function assertPrintable(view: object): void {
   const issues: FieldIssue[] = []
   eachText(view, '', (text, path, field) => {
     const faces = FACE_OF_FIELD[field] ?? ['text']
     const missing = [...new Set(faces.flatMap((face) => missingLetters(text, face)))]
-    if (missing.length > 0) issues.push({ path, message: complaint(text, missing), received: text })
+    if (missing.length > 0) issues.push({ path, message: notOnPaperWords(text, missing), received: text })
   })
   if (issues.length === 0) return
   const [first] = issues
   throw new SteadfoldError('invalid', `The document cannot be printed. ${first?.message ?? ''}`, { issues })
-}
-
-function complaint(text: string, missing: string[]): string {
-  const named = missing.map((letter) =>
-    letter.trim() === '' || /\p{C}/u.test(letter) ? codePoint(letter) : `“${letter}”`,
-  )
-  return `“${text}” holds ${named.join(', ')}, which the paper cannot show. Write it in Latin letters, as in the passport.`
-}
-
-function codePoint(letter: string): string {
-  return `U+${(letter.codePointAt(0) ?? 0).toString(16).toUpperCase().padStart(4, '0')}`
 }
 
 function eachText(

@@ -1,5 +1,5 @@
 import { z } from 'zod'
-import { requiredText, text } from './quantity'
+import { printed, requiredText, text } from './quantity'
 
 /*
  * What every act on a consignment says: which one, and a number minted by the page that makes a second press of the same
@@ -40,7 +40,7 @@ export const conditionAnswerSchema = z.object({
   requestId,
   answer: z.enum(['confirmed', 'refused']),
   how: z.enum(['writing', 'telephone', 'in person']),
-  answeredBy: requiredText('Who answered', 120),
+  answeredBy: printed(requiredText('Who answered', 120)),
   note: text('Note', 500),
 })
 export type ConditionAnswerInput = z.infer<typeof conditionAnswerSchema>

@@ -1,25 +1,25 @@
 import { z } from 'zod'
 import { consignmentActSchema, itemId, requestId, rowId } from './act'
-import { requiredText, text } from './quantity'
+import { printed, requiredText, text } from './quantity'
 import { typedPassword } from './sign-in'
 
 const crateIds = z.array(itemId).min(1, { error: 'Crates: choose at least one.' }).max(26)
 
 /** A condition the vet puts with an approval, in words a handler understands. */
 export const vetConditionSchema = z.object({
-  text: requiredText('Condition', 300),
+  text: printed(requiredText('Condition', 300)),
   /** null: the whole journey. */
   legId: itemId.nullable(),
-  party: text('Asked of', 120),
+  party: printed(text('Asked of', 120)),
 })
 
 /** What the driver is told to ring for, chosen by the vet for a crate. */
-export const earlySignSchema = z.object({ crateId: itemId, text: requiredText('Early sign', 200) })
+export const earlySignSchema = z.object({ crateId: itemId, text: printed(requiredText('Early sign', 200)) })
 
 /** Overriding names one finding of the assessment by its place in it, and says why. */
 export const overrideSchema = z.object({
   findingIndex: z.number().int().nonnegative(),
-  reason: requiredText('Reason of the override', 1_000).min(10, {
+  reason: printed(requiredText('Reason of the override', 1_000)).min(10, {
     error: 'Reason of the override: put at least 10 characters, it stands beside the stamp.',
   }),
 })

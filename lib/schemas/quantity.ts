@@ -1,4 +1,5 @@
 import { z } from 'zod'
+import { lettersNotOnPaper, notOnPaperWords } from './paper-letters'
 
 export interface Range {
   label: string
@@ -43,6 +44,13 @@ export function text(label: string, max = 200) {
 /** Text that may not be empty. */
 export function requiredText(label: string, max = 200) {
   return text(label, max).min(1, { error: `${label} is missing.` })
+}
+
+/** Text that goes on a paper as it is: every letter must be one the paper's fonts show. */
+export function printed(words: z.ZodString) {
+  return words.refine((value) => lettersNotOnPaper(value).length === 0, {
+    error: ({ input }) => notOnPaperWords(String(input), lettersNotOnPaper(String(input))),
+  })
 }
 
 function isBlank(input: unknown) {

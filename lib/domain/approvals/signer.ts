@@ -3,6 +3,7 @@ import type { Transaction } from 'sequelize'
 import { isPassword } from '@/lib/auth/password'
 import { SteadfoldError } from '@/lib/errors'
 import type { Actor } from '@/lib/policies/actor'
+import { lettersNotOnPaper, notOnPaperWords } from '@/lib/schemas/paper-letters'
 import { models } from '@/models'
 import type { User } from '@/models'
 import { SIGN_IN_THROTTLE, claimAttempt, forgiveAttempt, throttled } from '../throttle'
@@ -35,7 +36,7 @@ export async function confirmPassword(actor: Actor, password: string, now: Date)
 export async function registrationOf(tx: Transaction, actor: Actor, now: Date): Promise<Registration> {
   const user = await models.User.findByPk(actor.id, { transaction: tx })
   if (user === null) throw new SteadfoldError('not_allowed', 'You may not do this.')
-  const trouble = registrationTrouble(user, now)
+  const trouble = registrationTrouble(user, now) ?? signatureTrouble(user)
   if (trouble !== null) throw new SteadfoldError('refused', trouble)
   return {
     signerName: user.name,
@@ -43,6 +44,14 @@ export async function registrationOf(tx: Transaction, actor: Actor, now: Date): 
     registrationCountry: user.registrationCountry ?? '',
     registrationExpiresOn: user.registrationExpiresOn ?? '',
   }
+}
+
+/** What is signed is printed: a name the paper cannot show would stop the release long after. */
+function signatureTrouble({ name, registrationNumber, registrationCountry }: User): string | null {
+  const words = [name, registrationNumber ?? '', registrationCountry ?? '']
+  const bad = words.find((word) => lettersNotOnPaper(word, 'title').length > 0)
+  if (bad === undefined) return null
+  return `Your record cannot stand on a paper: ${notOnPaperWords(bad, lettersNotOnPaper(bad, 'title'))}`
 }
 
 type RegistrationRow = Pick<

@@ -4,6 +4,7 @@ import { airReasons } from './air'
 import { animalReasons } from './animals'
 import { crateReasons } from './crates'
 import { legReasons } from './legs'
+import { paperReasons } from './paper'
 import { reason } from './reason'
 import type { ProfileInForce, Reason } from './reason'
 
@@ -27,6 +28,7 @@ export function reasonsNotAssessable(plan: Plan, { places, profiles }: PlanningK
     ...crateReasons(plan),
     ...legReasons(plan, timeline),
     ...airReasons(plan),
+    ...paperReasons(plan, timeline),
   ]
 }
 
