@@ -9,6 +9,8 @@ import { readPlan } from '@/lib/domain/consignments/read-plan'
 import { saveConsignment } from '@/lib/domain/consignments/save'
 import { submitConsignment } from '@/lib/domain/consignments/submit'
 import { prepareRelease } from '@/lib/domain/release/prepare'
+import type { PreparedRelease } from '@/lib/domain/release/prepare'
+import { recordRelease } from '@/lib/domain/release/record'
 import { releaseConsignment } from '@/lib/domain/release/release'
 import { models } from '@/models'
 import { emptyTables } from '../support/db'
@@ -35,6 +37,20 @@ beforeEach(async () => {
 
 const load = (id: number) => models.Consignment.findByPk(id, { rejectOnEmpty: true })
 const HOUR = 60
+
+/** Papers of a few bytes: what is sealed into them is tested elsewhere. */
+const issuedOf = ({ manifest }: PreparedRelease) => ({
+  papers: [
+    {
+      kind: 'manifest' as const,
+      code: manifest.documentCode ?? '',
+      bytes: Buffer.from(`%PDF-1.7 ${manifest.documentCode}`),
+      pages: 1,
+      view: {},
+    },
+  ],
+  letter: { to: 'j.strand@example.org', subject: 'Manifest', text: 'Attached.', html: '<p>Attached.</p>' },
+})
 
 describe('release', () => {
   const release = (consignmentId: number, now = NOW) =>
@@ -152,6 +168,49 @@ describe('release', () => {
     )
     expect(await refusal(prepareRelease(job.payload, NOW))).toMatchObject({ code: 'wrong_state' })
     expect(await models.Document.count()).toBe(0)
+  })
+
+  it('records nothing where a telephone was saved while the papers were made, and prepares again', async () => {
+    const { consignmentId } = await approved(place, NOW)
+    const row = await load(consignmentId)
+    await release(consignmentId)
+    const job = await models.Job.findOne({ where: { kind: 'release' }, rejectOnEmpty: true })
+    const first = await prepareRelease(job.payload, NOW)
+    if (first === null) throw new Error('It is not released yet.')
+
+    const plan = structuredClone(place.plan)
+    plan.emergencyContact.telephone = '+44 7700 900999'
+    const save = { ...act(), consignmentId, version: row.version, plan }
+    await saveConsignment(place.as('dispatcher'), save, NOW)
+    // The plan hash is what it was: nothing that was assessed or signed has changed.
+    expect(await load(consignmentId)).toMatchObject({ state: 'approved', planHash: row.planHash })
+
+    expect(await recordRelease(first, issuedOf(first), NOW)).toBe('changed')
+    expect(await models.Document.count()).toBe(0)
+    expect(await load(consignmentId)).toMatchObject({ state: 'approved', inForceState: null })
+
+    const second = await prepareRelease(job.payload, NOW)
+    if (second === null) throw new Error('It is not released yet.')
+    expect(await recordRelease(second, issuedOf(second), NOW)).toMatchObject({
+      documentIds: [expect.any(Number)],
+    })
+    const kept = (await planInForce(await load(consignmentId)))?.plan
+    expect(kept?.emergencyContact.telephone).toBe('+44 7700 900999')
+    expect(second.manifest.plan).toEqual(kept)
+  })
+
+  it('records nothing where an answer to a condition came while the papers were made', async () => {
+    const { consignmentId } = await inReview(place, NOW)
+    const conditions = [{ text: 'Read the air at loading.', legId: 'leg-1', party: '' }]
+    await approveCrates(place.as('vet'), await signature(place, consignmentId, { conditions }), NOW)
+    await release(consignmentId)
+    const job = await models.Job.findOne({ where: { kind: 'release' }, rejectOnEmpty: true })
+    const prepared = await prepareRelease(job.payload, NOW)
+    if (prepared === null) throw new Error('It is not released yet.')
+    const { id: conditionId } = await models.Condition.findOne({ rejectOnEmpty: true })
+    const answer = { answer: 'confirmed', how: 'telephone', answeredBy: 'D. Aird', note: '' } as const
+    await answerCondition(place.as('dispatcher'), { ...act(), conditionId, ...answer }, NOW)
+    expect(await recordRelease(prepared, issuedOf(prepared), NOW)).toBe('changed')
   })
 
   it('replaces the revision in force, supersedes its papers and ends its approvals', async () => {

@@ -282,7 +282,8 @@ export async function recordPapers(place: World, consignmentId: number, now: Dat
     text: 'Attached.',
     html: '<p>Attached.</p>',
   }
-  return recordRelease(task, { papers: [paper('manifest'), paper('go_no_go')], letter }, now)
+  const readAt = { version: row.version, updatedAt: row.updatedAt }
+  return recordRelease({ task, readAt }, { papers: [paper('manifest'), paper('go_no_go')], letter }, now)
 }
 
 function codeOf(n: number): string {

@@ -23,8 +23,16 @@ export const releasePayloadSchema = z.object({
 })
 export type ReleaseTask = z.infer<typeof releasePayloadSchema>
 
+/** A consignment as it was read: any write to it since shows in one of the two. */
+export interface ReadAt {
+  version: number
+  updatedAt: Date
+}
+
 export interface PreparedRelease {
   task: ReleaseTask
+  /** What the papers are made from was read then. */
+  readAt: ReadAt
   releasedBy: Actor
   /** For the go/no-go sheet, with its own code. */
   sheet: SheetFacts
@@ -58,6 +66,7 @@ export async function prepareRelease(payload: unknown, now: Date): Promise<Prepa
   const facts = await sheetFacts(row, { which: 'working', tracks: true, now })
   return {
     task,
+    readAt: { version: row.version, updatedAt: row.updatedAt },
     releasedBy,
     sheet: { ...facts, documentCode: await freeCode() },
     manifest: { ...facts, documentCode: await freeCode() },

@@ -19,7 +19,7 @@ import { supersedeDocuments } from '../documents/document-state'
 import { keepSnapshot } from '../snapshot'
 import { releaseObstacles } from './obstacles'
 import { releaser } from './prepare'
-import type { ReleaseTask } from './prepare'
+import type { PreparedRelease } from './prepare'
 import { notYet } from './release'
 
 /** A paper as it left the press: sealed bytes, and the view they were made from. */
@@ -39,13 +39,15 @@ export interface IssuedRelease {
 
 /**
  * Records a release whose papers are rendered and sealed: looks at everything again, stores papers and plan for good,
- * supersedes what was in force, and writes the mail. Recorded twice, it is stored once.
+ * supersedes what was in force, and writes the mail. Recorded twice, it is stored once. "changed" where the consignment was
+ * written to since the papers were prepared, even in what no plan hash covers (a telephone, the consignee): papers and
+ * stored plan would disagree, so nothing is recorded and the release is to be prepared again.
  */
 export async function recordRelease(
-  task: ReleaseTask,
+  { task, readAt }: Pick<PreparedRelease, 'task' | 'readAt'>,
   issued: IssuedRelease,
   now: Date,
-): Promise<{ documentIds: number[] } | 'already'> {
+): Promise<{ documentIds: number[] } | 'already' | 'changed'> {
   const actor = await releaser(task)
   return transaction(async (tx) => {
     const { row, facts } = await findConsignment(actor, task.consignmentId, { tx, lock: true })
@@ -54,6 +56,8 @@ export async function recordRelease(
     if (row.revision !== task.revision || row.planHash !== task.planHash) {
       throw new SteadfoldError('wrong_state', 'The plan was changed while its papers were being made.')
     }
+    if (row.version !== readAt.version || row.updatedAt.getTime() !== readAt.updatedAt.getTime())
+      return 'changed'
     const current = await currentAssessment(tx, row)
     const obstacles = await releaseObstacles(tx, row, current, now)
     if (obstacles.length > 0) throw notYet(obstacles)
