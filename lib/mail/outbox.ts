@@ -93,12 +93,25 @@ export interface Delivery {
 export async function deliverNext({ transport, from, worker, clock }: Delivery): Promise<OutboxState | null> {
   const mail = await claim(worker, clock())
   if (mail === null) return null
-  const letter = await letterOf(mail, from)
-  const outcome: Outcome =
-    'missing' in letter
-      ? { kind: 'refused', forGood: true, reason: `Document ${letter.missing} to be attached is not there.` }
-      : await transport.send(letter)
-  return settle(mail, outcome, worker, clock())
+  return settle(mail, await handOver(mail, from, transport), worker, clock())
+}
+
+async function handOver(mail: OutboxMessage, from: string, transport: Transport): Promise<Outcome> {
+  let letter: Letter | { missing: number }
+  try {
+    letter = await letterOf(mail, from)
+  } catch (error) {
+    // Nothing has left the house: it waits for the next try instead of standing as uncertain.
+    return { kind: 'unsent', reason: error instanceof Error ? error.message : String(error) }
+  }
+  if ('missing' in letter) {
+    return {
+      kind: 'refused',
+      forGood: true,
+      reason: `Document ${letter.missing} to be attached is not there.`,
+    }
+  }
+  return transport.send(letter)
 }
 
 /** Rows whose sender died while sending: nobody knows whether they arrived. Returns how many. */

@@ -42,8 +42,13 @@ const PATIENCE: Patience = { connectMs: 10_000, greetMs: 15_000, silenceMs: 60_0
 export function smtpTransport(smtpUrl: string, patience: Patience = PATIENCE): Transport {
   return {
     send: async (letter) => {
-      const parcel = await pack(letter)
-      return hand(connectionTo(smtpUrl, patience), credentialsOf(smtpUrl), parcel)
+      try {
+        const parcel = await pack(letter)
+        return await hand(connectionTo(smtpUrl, patience), credentialsOf(smtpUrl), parcel)
+      } catch (error) {
+        // Every later error is an outcome of `hand`: what lands here never reached the server.
+        return { kind: 'unsent', reason: error instanceof Error ? error.message : String(error) }
+      }
     },
   }
 }

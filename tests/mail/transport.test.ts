@@ -1,4 +1,5 @@
 import { createServer } from 'node:net'
+import { Readable } from 'node:stream'
 import { afterEach, describe, expect, it } from 'vitest'
 import { type Letter, type Outcome, smtpTransport } from '@/lib/mail/transport'
 import { answer, type MailServer, mailServer } from './support/mail-server'
@@ -129,5 +130,22 @@ describe('a letter by SMTP', () => {
   it('stays unsent when the line breaks before the letter was asked for', async () => {
     server = await mailServer({ onRcptTo: () => server?.cut() })
     expect(await send(server.url)).toMatchObject({ kind: 'unsent' })
+  })
+
+  it('stays unsent when it cannot even be packed, or the address of the server cannot be read', async () => {
+    server = await mailServer()
+    const content = new Readable({ read: () => content.destroy(new Error('The disk is gone.')) })
+    const attachments = [
+      { filename: 'a.pdf', content: content as unknown as Buffer, contentType: 'application/pdf' },
+    ]
+    expect(await smtpTransport(server.url, SHORT).send({ ...letter, attachments })).toEqual({
+      kind: 'unsent',
+      reason: 'The disk is gone.',
+    })
+    expect(await send(server.url.replace('smtp://', 'smtp://desk:50%@'))).toMatchObject({
+      kind: 'unsent',
+      reason: expect.stringContaining('URI malformed') as string,
+    })
+    expect(server.taken).toEqual([])
   })
 })
