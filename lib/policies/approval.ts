@@ -8,5 +8,4 @@ export const approvalPolicy = {
   'approval.return': line<NoFacts>({ vet: true }),
   'approval.withdraw': line<NoFacts>({ vet: true }),
   'approval.override': line<NoFacts>({ vet: true }),
-  'approval.countersign': line<NoFacts>({ vet: true }),
 }

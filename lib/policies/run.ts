@@ -12,7 +12,6 @@ const own = (actor: Actor, facts: RunLegFacts) => facts.driverId !== null && fac
 
 export const runPolicy = {
   'run.list': line<NoFacts>({ driver: true }),
-  'run.read': line<RunLegFacts>({ driver: own, dispatcher: true, vet: true }),
   'run.enter': line<RunLegFacts>({ driver: own }),
   'run.hand-over': line<RunLegFacts>({ driver: own }),
 }

@@ -46,6 +46,7 @@ export async function approveCrates(actor: Actor, input: ApproveCrates, now: Dat
     async (tx): Promise<Done<SignedApprovals>> => {
       const { row } = await findConsignment(actor, consignmentId, { tx, lock: true })
       authorize(actor, 'approval.approve')
+      if (input.overrides.length > 0) authorize(actor, 'approval.override')
       if (row.state !== 'in_review') throw wrongState(row.state, 'approve')
       if (row.planHash !== input.planHash) {
         throw new SteadfoldError(
