@@ -186,7 +186,7 @@ test('the board’s first pages are read along an index, not sorted', async () =
            FROM seq_1_to_1500`,
     ),
   )
-  for (const column of ['departs_at', 'updated_at', 'margin_min', 'mark']) {
+  for (const column of ['departs_at', 'updated_at', 'margin_rising', 'margin_falling', 'mark']) {
     const [plan] = await database().query<{ Extra: string | null; key: string | null }>(
       `EXPLAIN SELECT id FROM consignments ORDER BY ${column}, id LIMIT 50`,
       { type: QueryTypes.SELECT },

@@ -21,11 +21,9 @@ import { visibleConsignments } from './visible'
  */
 export async function listConsignments(actor: Actor, query: BoardQuery): Promise<ConsignmentPage> {
   authorize(actor, 'consignment.list')
-  const { column, emptyLast } = SORTS[query.sort]
   const direction = query.descending ? 'DESC' : 'ASC'
   const order: Order = [
-    ...(emptyLast ? [[literal(`${column} IS NULL`), 'ASC'] as [ReturnType<typeof literal>, string]] : []),
-    [literal(column), direction],
+    [literal(sortOf(query).column), direction],
     ['id', direction],
   ]
   const rows = await models.Consignment.findAll({
@@ -45,31 +43,25 @@ export async function listConsignments(actor: Actor, query: BoardQuery): Promise
 
 interface Sort {
   column: string
-  /**
-   * Where rows without the figure stand. Left to the index they come first going up and last going down; a margin that
-   * is not known yet must never push the narrowest ones off the page.
-   */
-  emptyLast: boolean
   valueOf: (row: Consignment) => string | number | null
 }
 
-const SORTS: Record<BoardQuery['sort'], Sort> = {
-  departure: {
-    column: '`Consignment`.`departs_at`',
-    emptyLast: false,
-    valueOf: (row) => sqlMoment(row.departsAt),
-  },
-  updated: {
-    column: '`Consignment`.`updated_at`',
-    emptyLast: false,
-    valueOf: (row) => sqlMoment(row.updatedAt),
-  },
-  margin: {
-    column: '`Consignment`.`margin_outside_air_c`',
-    emptyLast: true,
-    valueOf: (row) => row.marginOutsideAirC,
-  },
-  mark: { column: '`Consignment`.`mark`', emptyLast: false, valueOf: (row) => row.mark },
+/** Past any margin there is: rows without one stand last, whichever way the board is sorted. */
+const NO_MARGIN = 9999.9
+
+function sortOf({ sort, descending }: Pick<BoardQuery, 'sort' | 'descending'>): Sort {
+  switch (sort) {
+    case 'departure':
+      return { column: '`Consignment`.`departs_at`', valueOf: (row) => sqlMoment(row.departsAt) }
+    case 'updated':
+      return { column: '`Consignment`.`updated_at`', valueOf: (row) => sqlMoment(row.updatedAt) }
+    case 'margin':
+      return descending
+        ? { column: '`Consignment`.`margin_falling`', valueOf: (row) => row.marginOutsideAirC ?? -NO_MARGIN }
+        : { column: '`Consignment`.`margin_rising`', valueOf: (row) => row.marginOutsideAirC ?? NO_MARGIN }
+    case 'mark':
+      return { column: '`Consignment`.`mark`', valueOf: (row) => row.mark }
+  }
 }
 
 function filters(query: BoardQuery): WhereOptions<Consignment>[] {
@@ -114,22 +106,24 @@ function afterKey(query: BoardQuery): WhereOptions<Consignment>[] {
   const key = keySchema.safeParse(parsed(query.after))
   if (!key.success) return []
   const [value, id] = key.data
-  const { column, emptyLast } = SORTS[query.sort]
+  const { column } = sortOf(query)
   const beyond = query.descending ? '<' : '>'
   const same = value === null ? `${column} IS NULL` : `${column} = ${database().escape(value)}`
   const tied = `(${same} AND \`Consignment\`.\`id\` ${beyond} ${database().escape(id)})`
-  const emptyComeLater = emptyLast || query.descending
   const others =
     value === null
-      ? emptyComeLater
+      ? query.descending
         ? []
         : [`${column} IS NOT NULL`]
-      : [`${column} ${beyond} ${database().escape(value)}`, ...(emptyComeLater ? [`${column} IS NULL`] : [])]
+      : [
+          `${column} ${beyond} ${database().escape(value)}`,
+          ...(query.descending ? [`${column} IS NULL`] : []),
+        ]
   return [literal(`(${[tied, ...others].join(' OR ')})`) as unknown as WhereOptions<Consignment>]
 }
 
-function keyOf(row: Consignment | undefined, { sort }: BoardQuery): string | null {
-  return row === undefined ? null : JSON.stringify([SORTS[sort].valueOf(row), row.id])
+function keyOf(row: Consignment | undefined, query: BoardQuery): string | null {
+  return row === undefined ? null : JSON.stringify([sortOf(query).valueOf(row), row.id])
 }
 
 function parsed(text: string): unknown {
