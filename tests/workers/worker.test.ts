@@ -7,6 +7,8 @@ import { setTimeout as wait } from 'node:timers/promises'
 import * as esbuild from 'esbuild'
 import { afterAll, beforeAll, beforeEach, describe, expect, it, vi } from 'vitest'
 import { assessConsignment } from '@/lib/domain/consignments/assess'
+import { planInForce } from '@/lib/domain/consignments/plan-in-force'
+import { saveConsignment } from '@/lib/domain/consignments/save'
 import { claim, LEASE_MS } from '@/lib/domain/jobs/queue'
 import { releaseConsignment } from '@/lib/domain/release/release'
 import { checkSeal, readDocumentCode } from '@/lib/documents/verify'
@@ -168,6 +170,46 @@ describe('a release in the queue', () => {
       expect(mail?.attachments).toHaveLength(1)
       expect(mail?.attachments[0]?.content.equals(manifest?.bytes ?? Buffer.alloc(0))).toBe(true)
       expect(mail?.subject).toContain('revision 1')
+    },
+    LONG,
+  )
+})
+
+describe('a telephone saved while the papers are made', () => {
+  it(
+    'is on the papers that are recorded, and in the plan kept with them',
+    async () => {
+      await keyOfThatDay()
+      const { consignmentId, version } = await approved(place, NOW)
+      await releaseConsignment(place.as('dispatcher'), { ...act(), consignmentId }, NOW)
+      const plan = structuredClone(place.plan)
+      plan.emergencyContact.telephone = '+44 7700 900999'
+      await models.Job.destroy({ where: { kind: 'assess' } })
+      let asked = 0
+      let saving: Promise<unknown> | undefined
+      const clock = () => {
+        asked += 1
+        // First to take the job, then to prepare; from the third time on the papers are being drawn.
+        if (asked === 3) {
+          const save = { ...act(), consignmentId, version, plan }
+          saving = saveConsignment(place.as('dispatcher'), save, later(1))
+        }
+        return later(1)
+      }
+      expect(await runNextJob(shift('worker-1', clock))).toBe(true)
+      await saving
+      // Once to take the job, three times for papers that were thrown away, three times for those that stand.
+      expect(asked).toBeGreaterThanOrEqual(7)
+      expect(await models.Job.findOne({ where: { kind: 'release' } })).toMatchObject({
+        state: 'done',
+        lastError: null,
+      })
+      const papers = await models.Document.unscoped().findAll({ where: { consignmentId } })
+      expect(papers.map(({ kind }) => kind).sort()).toEqual(['go_no_go', 'manifest'])
+      const manifest = papers.find(({ kind }) => kind === 'manifest')
+      expect(await textOf(manifest?.bytes ?? Buffer.alloc(0))).toContain('+44 7700 900999')
+      const row = await models.Consignment.findByPk(consignmentId, { rejectOnEmpty: true })
+      expect((await planInForce(row))?.plan.emergencyContact.telephone).toBe('+44 7700 900999')
     },
     LONG,
   )
