@@ -176,8 +176,9 @@ export function integrate(
         (tolerance[i] as number) +
         numerics.relTol * Math.max(Math.abs(y[i] as number), Math.abs(stage[i] as number))
       const ratio = Math.abs(error) / scale
-      // Written so that a NaN wins.
-      if (!(ratio <= worst)) worst = ratio
+      if (ratio > worst) worst = ratio
+      // A figure lost in one crate is not made good by the next.
+      else if (!(ratio >= 0)) return NaN
     }
     return worst
   }
@@ -195,6 +196,8 @@ export function integrate(
     counts.accepted++
     rightHandSide(model, s, y, f, q)
     counts.rightHandSides++
+    // What lies inside the step is drawn from these rates.
+    if (!f.every(Number.isFinite)) throw stuck(model, s)
   }
 }
 
@@ -218,7 +221,7 @@ function addScaled(into: Float64Array, from: Float64Array, factor: number): void
 }
 
 /** Absolute tolerance of each state, in its own unit. */
-function tolerances(model: LegModel, numerics: Numerics): Float64Array {
+export function tolerances(model: LegModel, numerics: Numerics): Float64Array {
   const { layout } = model
   const { absTolK, absTolKgM3, absTolPpm } = numerics
   const all = new Float64Array(layout.size)
