@@ -176,13 +176,12 @@ export function odex({ looseness, longestStepS, atMost = Infinity }: OdexSetting
 }
 
 function largest(of: ReadonlyMap<string, number>, reference: ReadonlyMap<string, number>): number {
-  let most = of.size === reference.size && of.size > 0 ? 0 : NaN
-  for (const [key, value] of reference) {
-    const gap = Math.abs((of.get(key) ?? NaN) - value)
-    // Written so that a NaN wins.
-    if (!(gap <= most)) most = gap
-  }
-  return most
+  if (of.size !== reference.size || of.size === 0) return NaN
+  // Math.max keeps a NaN.
+  return [...reference].reduce(
+    (most, [key, value]) => Math.max(most, Math.abs((of.get(key) ?? NaN) - value)),
+    0,
+  )
 }
 
 function temperatures({ blocks }: Layout): number[] {

@@ -3,7 +3,10 @@ import { type Course, gapOf, odex, type OdexSettings, ours, travel } from './ben
 
 /** One setting of a solver: how far it is from the reference, and how long it takes. */
 export interface Point {
-  settings: string
+  /** Tolerances as a multiple of those ours works with: "× 1", or "× 1 to × 0.1" where a point lies between two. */
+  tolerances: string
+  /** What its steps were held to; empty: nothing. */
+  bound: string
   bodyC: number
   airC: number
   milliseconds: number
@@ -40,7 +43,10 @@ export function compareSolvers(scenario: Scenario, variant: Variant, repeats = 2
     THEIR_LOOSENESS.flatMap((looseness) => {
       // A setting that needs more than the reference is none, and a loose one may never end.
       const atMost = reference.evaluations
-      const settings = `tolerances × ${looseness}, ${longestStepS === 0 ? 'any step' : `steps to ${longestStepS} s`}`
+      const settings = {
+        tolerances: `× ${looseness}`,
+        bound: longestStepS === 0 ? '' : `, steps to ${longestStepS} s`,
+      }
       try {
         return [
           measured(settings, reference, repeats, () =>
@@ -48,13 +54,15 @@ export function compareSolvers(scenario: Scenario, variant: Variant, repeats = 2
           ),
         ]
       } catch (error) {
-        lost.push(`${settings}: ${error instanceof Error ? error.message : String(error)}`)
+        lost.push(
+          `tolerances ${settings.tolerances}${settings.bound}: ${error instanceof Error ? error.message : String(error)}`,
+        )
         return []
       }
     }),
   )
   const comparisons = OUR_LOOSENESS.flatMap((looseness) => {
-    const own = measured(`tolerances × ${looseness}`, reference, 5 * repeats, () =>
+    const own = measured({ tolerances: `× ${looseness}`, bound: '' }, reference, 5 * repeats, () =>
       travel(scenario, variant, ours(looseness)),
     )
     const theirs = quickestAt(own.bodyC, series)
@@ -63,29 +71,33 @@ export function compareSolvers(scenario: Scenario, variant: Variant, repeats = 2
   return { comparisons, lost }
 }
 
-/** Writes the comparison down, a line for each tolerance of ours. */
+/** Writes the comparison down, two lines for each tolerance of ours. */
 export function printFindings({ comparisons, lost }: Findings, print: (line: string) => void): void {
   for (const { ours: own, theirs } of comparisons) {
-    print(`ours, ${words(own)}`)
-    print(
-      `  odex at that error, ${words(theirs)}: ratio ${(theirs.milliseconds / own.milliseconds).toFixed(1)} : 1`,
-    )
+    print(`ours ${words(own)}`)
+    print(`odex ${words(theirs)}: ${(theirs.milliseconds / own.milliseconds).toFixed(1)} times as long`)
   }
   for (const line of lost) print(`odex lost the journey, ${line}`)
 }
 
-function words({ settings, milliseconds, bodyC, airC, evaluations }: Point): string {
-  return `${settings}: ${milliseconds.toFixed(1)} ms, body within ${bodyC.toExponential(1)} °C, air ${airC.toExponential(1)} °C, ${evaluations} evaluations`
+function words({ tolerances, bound, milliseconds, bodyC, airC }: Point): string {
+  const time = `${milliseconds.toFixed(1)} ms`.padStart(9)
+  return `${time}, body within ${bodyC.toExponential(1)} °C, air ${airC.toExponential(1)} °C (tolerances ${tolerances}${bound})`
 }
 
-function measured(settings: string, reference: Course, repeats: number, run: () => Course): Point {
+function measured(
+  settings: Pick<Point, 'tolerances' | 'bound'>,
+  reference: Course,
+  repeats: number,
+  run: () => Course,
+): Point {
   let course = run()
   let { milliseconds } = course
   for (let i = 1; i < repeats; i++) {
     course = run()
     milliseconds = Math.min(milliseconds, course.milliseconds)
   }
-  return { settings, milliseconds, evaluations: course.evaluations, ...gapOf(course, reference) }
+  return { ...settings, milliseconds, evaluations: course.evaluations, ...gapOf(course, reference) }
 }
 
 function quickestAt(bodyC: number, series: readonly Point[][]): Point | undefined {
@@ -109,7 +121,8 @@ function between(bodyC: number, points: readonly Point[]): Point[] {
       loose[figure] * Math.pow(tight[figure] / loose[figure], share)
     return [
       {
-        settings: `between ${loose.settings} and ${tight.settings}`,
+        tolerances: `${loose.tolerances} to ${tight.tolerances}`,
+        bound: loose.bound,
         bodyC,
         airC: at('airC'),
         milliseconds: at('milliseconds'),

@@ -201,7 +201,7 @@ function allPast(watches: readonly Watch[], level: 'alarm' | 'critical'): boolea
 }
 
 /** A rest out of the crate gives back water and breath. */
-function restore(model: LegModel, store: Store): void {
+export function restore(model: LegModel, store: Store): void {
   for (const block of model.layout.blocks) {
     for (const { body } of block.animals) {
       const animal = store.animals.get(body.id)
