@@ -16,7 +16,8 @@ const FORWARDED = [
   'x-real-ip',
 ]
 
-if (process.env.TRUST_PROXY !== 'yes') {
+// The words lib/env.ts takes for yes.
+if (!/^(yes|true)$/i.test(process.env.TRUST_PROXY ?? '')) {
   const emit = Server.prototype.emit
   // Whatever the event: a request, an upgrade, or one that waits for "continue".
   Server.prototype.emit = function emitOwnAddress(event, ...args) {

@@ -6,6 +6,7 @@ import type { IncomingHttpHeaders, IncomingMessage, OutgoingHttpHeaders } from '
 import { text } from 'node:stream/consumers'
 import { afterAll, beforeAll, describe, expect, it } from 'vitest'
 import { requestIp } from '@/lib/auth/request-ip'
+import { readEnv } from '@/lib/env'
 import { withOwnAddress } from '@/lib/local/application.mjs'
 
 const FORGED = {
@@ -52,6 +53,23 @@ describe('a web server started as npm start does', () => {
     expect(requestIp(seen.headers, true)).toBe('198.51.100.77')
   })
 })
+
+it.each(['yes', 'true', 'YES', 'no', 'false', ''])(
+  'reads TRUST_PROXY=%s as the configuration does',
+  async (word) => {
+    const least = {
+      APP_URL: 'http://127.0.0.1:3000',
+      NEXTAUTH_SECRET: 'x'.repeat(32),
+      DATABASE_NAME: 'steadfold',
+      DATABASE_USER: 'steadfold_app',
+      DATABASE_PASSWORD: '',
+    }
+    const served = await serve({ TRUST_PROXY: word })
+    const { vouchedFor } = await ask(served, FORGED)
+    served.child.kill()
+    expect(vouchedFor).toBe(!readEnv({ ...least, TRUST_PROXY: word }).trustProxy)
+  },
+)
 
 describe('the address of a request', () => {
   it('is unknown where nothing vouches for the header, and never what is no address', () => {
