@@ -75,6 +75,9 @@ export class Consignment extends Model<InferAttributes<Consignment>, InferCreati
   declare deciding: string | null
   declare marginMin: number | null
   declare marginOutsideAirC: number | null
+  /** Computed by the database for the board's order: the margin, or past any there is. Never write them. */
+  declare marginRising: CreationOptional<number | null>
+  declare marginFalling: CreationOptional<number | null>
   declare marginBodyC: number | null
   declare outOfDate: CreationOptional<boolean>
   /** Whose move it is. */
@@ -119,6 +122,8 @@ export function initConsignment(sequelize: Sequelize): typeof Consignment {
       deciding: optional(text(300)),
       marginMin: optional(whole()),
       marginOutsideAirC: optional(decimal('marginOutsideAirC', 5, 1)),
+      marginRising: optional(decimal('marginRising', 6, 1)),
+      marginFalling: optional(decimal('marginFalling', 6, 1)),
       marginBodyC: optional(decimal('marginBodyC', 6, 3)),
       outOfDate: withDefault(yesNo(), false),
       holder: withDefault(oneOf(HOLDERS), 'dispatcher'),

@@ -1,5 +1,6 @@
 import type { AnimalTrack, CompartmentTrack, CrateTrack, Schedule } from './result'
 import type { CoreLimits, InitialState, ProfileValues, Variant } from './scenario'
+import type { Waypoint } from './waypoint'
 
 /** How one run is to be made. Everything else is in the scenario. */
 export interface SimulateOptions {
@@ -14,6 +15,15 @@ export interface SimulateOptions {
   start?: StartFrom
   /** Minute from departure at which to stop. Default: the arrival. */
   untilMin?: number
+  /** Last leg to simulate, by id. Default: the last of the journey. */
+  throughLegId?: string
+  /** Keeps a waypoint behind each leg. */
+  waypoints?: boolean
+  /**
+   * Goes on from a waypoint of another run of this scenario, in place of the departure. The legs before it must be the same, in
+   * the same variant, at the same shift and limits; with tracks only where that run kept them.
+   */
+  from?: Waypoint
   /** Minute tracks at the scenario's outputStepS. Default true; the short runs of margins leave them out. */
   tracks?: boolean
   /** Spacing of stored states, minutes. Leg starts and the end are always stored. Default: those only. */
@@ -64,6 +74,8 @@ export interface Run {
   /** Leg starts, the asked spacing and the end, ascending by minute. Read it through `stateAt`. */
   snapshots: StartFrom[]
   finalState: InitialState
+  /** One behind each leg, where they were asked for. */
+  waypoints: Waypoint[]
   closure: Closure
   steps: StepCounts
 }

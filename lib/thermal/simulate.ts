@@ -1,6 +1,6 @@
 import { SteadfoldError } from '../errors'
 import { buildLeg } from './build-leg'
-import { closureOf, holdStart, type Held } from './closure'
+import { closureOf, holdStart } from './closure'
 import { stateIn } from './dense'
 import { load, save } from './exchange'
 import {
@@ -11,17 +11,17 @@ import {
   setAnimalSample,
   setCrateSample,
   watchOf,
-  type Memory,
   type Watch,
 } from './extremes'
 import { journeyOf, type Journey } from './journey'
 import { legModelOf, type LegModel } from './leg-model'
 import { integrate, type Step } from './rosenbrock'
-import type { LegExtremes, Numerics, Run, SimulateOptions, StartFrom, StepCounts } from './run'
+import type { Numerics, Run, SimulateOptions } from './run'
 import type { CoreLimits, InitialState, Leg, Scenario } from './scenario'
 import { shiftAir, startsOf, withDelays } from './schedule'
 import { initialStateOf, storeOf, type Store } from './store'
-import { writeTracks, type Tracks } from './tracks'
+import { freshTracks, writeTracks } from './tracks'
+import { carriedFrom, waypointOf, type Carried, type Waypoint } from './waypoint'
 
 /** Chosen so that core stays within 0.005 °C and crate air within 0.02 °C of a solution a thousand times tighter. */
 export const NUMERICS: Numerics = {
@@ -55,48 +55,49 @@ export function simulate(scenario: Scenario, options: SimulateOptions): Run {
     numerics: { ...NUMERICS, ...options.numerics },
     scheduleId,
     spacingS: planned.outputStepS,
-    store: storeOf(options.start?.state ?? initialFor(planned, options)),
-    memories: new Map(),
-    tracks: {
-      crates: new Map(),
-      animals: new Map(),
-      spaces: [],
-      nextS: firstOutputS(startMin, planned.outputStepS),
-    },
-    extremes: [],
-    snapshots: [],
+    ...(options.from
+      ? carriedFrom(options.from, options.tracks !== false, scheduleId)
+      : departing(planned, options, startMin)),
     nextSnapshotMin: startMin,
-    held: { animals: new Map(), crates: new Map(), residualW: 0 },
-    counts: { accepted: 0, rejected: 0, rightHandSides: 0, jacobians: 0 },
     untilS: untilMin * 60,
-    reachedS: startMin * 60,
     over: false,
+    waypoints: [],
   }
-  for (let index = 0; index < journey.legs.length && !run.over; index++) {
+  for (let index = options.from?.nextLeg ?? 0; index < journey.legs.length && !run.over; index++) {
     const fromS = Math.max(run.reachedS, (journey.startsMin[index] as number) * 60)
-    const toS = Math.min(run.untilS, (journey.startsMin[index + 1] as number) * 60)
+    const endS = (journey.startsMin[index + 1] as number) * 60
+    const toS = Math.min(run.untilS, endS)
     if (toS - fromS > 1e-6) runLeg(run, index, fromS, toS)
+    if (options.waypoints && !run.over && run.untilS >= endS)
+      run.waypoints.push(waypointOf(run, index + 1, options.tracks !== false, scheduleId))
+    if (journey.legs[index]?.id === options.throughLegId) break
   }
   return resultOf(run)
 }
 
-interface Running {
+function departing(planned: Scenario, options: SimulateOptions, startMin: number): Carried {
+  return {
+    store: storeOf(options.start?.state ?? initialFor(planned, options)),
+    memories: new Map(),
+    tracks: freshTracks(firstOutputS(startMin, planned.outputStepS)),
+    extremes: [],
+    snapshots: [],
+    held: { animals: new Map(), crates: new Map(), residualW: 0 },
+    counts: { accepted: 0, rejected: 0, rightHandSides: 0, jacobians: 0 },
+    reachedS: startMin * 60,
+  }
+}
+
+interface Running extends Carried {
   journey: Journey
   options: SimulateOptions
   numerics: Numerics
   scheduleId: string
   spacingS: number
-  store: Store
-  memories: Map<string, Memory>
-  tracks: Tracks
-  extremes: LegExtremes[]
-  snapshots: StartFrom[]
   nextSnapshotMin: number
-  held: Held
-  counts: StepCounts
   untilS: number
-  reachedS: number
   over: boolean
+  waypoints: Waypoint[]
 }
 
 function runLeg(run: Running, index: number, fromS: number, toS: number): void {
@@ -232,6 +233,7 @@ function resultOf(run: Running): Run {
     compartments: tracks.spaces,
     extremes: run.extremes,
     snapshots: run.snapshots,
+    waypoints: run.waypoints,
     finalState,
     closure: closureOf(run.held, store, journey, animals),
     steps: run.counts,

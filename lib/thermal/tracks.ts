@@ -16,6 +16,10 @@ export interface Tracks {
   nextS: number
 }
 
+export function freshTracks(nextS: number): Tracks {
+  return { crates: new Map(), animals: new Map(), spaces: [], nextS }
+}
+
 /** Writes every output moment that falls into this step; the last moment of a run is written by `force`. */
 export function writeTracks(
   tracks: Tracks,
