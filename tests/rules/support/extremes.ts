@@ -70,6 +70,7 @@ function runOf(variant: Variant, scheduleId: string, one: LegExtremes): Run {
     compartments: [],
     extremes: [one],
     snapshots: [],
+    waypoints: [],
     finalState: { variant, crates: [], animals: [], compartments: [] },
     closure: { maxResidualW: 0, energyErrorPct: 0, accumulatorError: 0, waterError: 0 },
     steps: { accepted: 0, rejected: 0, rightHandSides: 0, jacobians: 0 },
