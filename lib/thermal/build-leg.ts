@@ -71,7 +71,13 @@ export function buildLeg(
   startSpaces(journey, store, index, chain.spaces, spaces, nodes[0] as WeatherNode)
   const aboard = journey.crates.filter(({ fromLeg, toLeg }) => fromLeg <= index && index <= toLeg)
   const boxes = aboard.map(({ crate, bodies, mammals }) => boxOf(crate, bodies, leg, mammals, factor))
-  for (const { bodies } of aboard) for (const body of bodies) body.drinkKgS = 0
+  for (const { bodies } of aboard) {
+    for (const body of bodies) {
+      // Neither a drink nor the sun of the leg before goes on into this one.
+      body.drinkKgS = 0
+      body.sunW = 0
+    }
+  }
   const around = airAround(store, spaces, nodes[0] as WeatherNode)
   aboard.forEach(({ crate, bodies }, i) => {
     startCrate(store, crate, around)

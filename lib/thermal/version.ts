@@ -1,2 +1,2 @@
 /** Raised whenever the same scenario may give other figures. */
-export const ENGINE_VERSION = '1.0.0'
+export const ENGINE_VERSION = '1.1.0'
