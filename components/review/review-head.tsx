@@ -10,7 +10,10 @@ import type { AnimalView } from '@/lib/views/sheet'
 export function ReviewHead({ view }: { view: ReviewView }) {
   const { chosen, sheet } = view
   return (
-    <BoxedFacts columns="auto minmax(9rem,1fr) minmax(9rem,1fr) minmax(15rem,1.6fr)">
+    <BoxedFacts
+      columns="auto minmax(9rem,1fr) minmax(9rem,1fr) minmax(15rem,1.6fr)"
+      className="print:grid-cols-2!"
+    >
       <Fact caption="Crate" whole>
         <Mark size="l">{chosen.mark}</Mark>
       </Fact>

@@ -28,7 +28,7 @@ export default async function OwnConsignmentPage({ params }: { params: Promise<{
   return (
     <Page className="mx-auto max-w-[1232px]">
       <PageTitle acts={<Link href="/portal">All your consignments</Link>}>Your consignment</PageTitle>
-      <div className="grid items-start gap-6 desk:grid-cols-[minmax(0,1fr)_minmax(16rem,376px)]">
+      <div className="grid items-start gap-6 desk:grid-cols-[minmax(0,1fr)_minmax(16rem,376px)] print:block!">
         <div className="min-w-0">
           {view ? (
             <ConsignmentSheet
@@ -59,7 +59,7 @@ export default async function OwnConsignmentPage({ params }: { params: Promise<{
             </Section>
           )}
         </div>
-        <Sheet>
+        <Sheet className="no-print">
           {asked && <Acknowledge asked={asked} action={acknowledge} requestId={randomUUID()} />}
           <AskChange
             consignmentId={consignmentId}
