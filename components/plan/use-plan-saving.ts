@@ -106,10 +106,12 @@ export function usePlanSaving({
         setSaved({ plan: meanwhile.plan, version: meanwhile.version, atMs: null })
         return null
       }
-      for (const issue of result.issues) {
+      // What the server refuses stands under "plan" in what was sent, and at the same path in the form without it.
+      const issues = result.issues.map((issue) => ({ ...issue, path: issue.path.replace(/^plan\./, '') }))
+      for (const issue of issues) {
         form.setError(issue.path as Path<Plan>, { type: 'server', message: issue.message })
       }
-      setFailure({ message: result.message, issues: result.issues })
+      setFailure({ message: result.message, issues })
       return null
     } catch {
       setFailure({

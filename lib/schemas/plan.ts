@@ -1,5 +1,6 @@
 import { z } from 'zod'
 import { draftQuantity, quantity, requiredText, text } from './quantity'
+import { withoutStrays } from './stray-fields'
 
 /*
  * The plan as people type it: centimetres, kilograms, degrees Celsius, local times. One schema for the form, the action
@@ -264,6 +265,6 @@ export const savePlanSchema = z.object({
   consignmentId: z.number().int().positive().nullable(),
   version: z.number().int().nonnegative().nullable(),
   requestId: z.uuid(),
-  plan: planSchema,
+  plan: withoutStrays(planSchema, 'a plan'),
 })
 export type SavePlan = z.infer<typeof savePlanSchema>
