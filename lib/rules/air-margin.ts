@@ -15,7 +15,8 @@ export function* outsideAirMargin(judged: BodyJudgement, base: BaseRuns, runner:
   const { subject, leg, side, limit, scheduleId, variant } = judged
   const sign = side === 'high' ? 1 : -1
   function* keeps(steps: number): Steps<boolean> {
-    const run = yield* runner.journey({ scheduleId, variant, airShiftC: sign * steps * STEP_C })
+    const airShiftC = sign * steps * STEP_C
+    const run = yield* runner.journey({ scheduleId, variant, airShiftC, throughLegId: leg.id })
     const extremes = extremesOf(run, subject.animal.id, leg.id)
     return extremes === undefined || limit.pastFrom(extremes) === undefined
   }

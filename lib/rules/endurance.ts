@@ -40,7 +40,7 @@ function* ifItStays(
   for (const variant of PRONE_VARIANTS) {
     const longer = yield* lengthening(prepared, runner, leg, variant)
     legEndMin = longer.legEndMin
-    const run = yield* longer.by(SPARE_MIN)
+    const run = yield* longer.by(SPARE_MIN, leg.id)
     for (const { animal } of aboard) {
       const { crossedMin = {} } = extremesOf(run, animal.id, leg.id) ?? {}
       const held = soonest.get(animal.id) ?? { alarmMin: Infinity, criticalMin: Infinity }

@@ -42,7 +42,8 @@ export function* minutesToSpare(
 export interface Lengthening {
   leg: Leg
   legEndMin: number
-  by(extraMin: number): Steps<Run>
+  /** At least as far as a leg. */
+  by(extraMin: number, throughLegId: string): Steps<Run>
 }
 
 /** Runs of the same leg are shared by both questions asked of them: minutes to spare, and endurance of a leg that stays. */
@@ -63,7 +64,7 @@ export function* lengthening(
     planned,
     Math.max(planned.snapshots[0]?.minute ?? 0, legStartMin - COLD_EFFORT_BREACH_MIN),
   )
-  function* by(extraMin: number): Steps<Run> {
+  function* by(extraMin: number, throughLegId: string): Steps<Run> {
     if (extraMin === 0) return planned
     return yield* runner.part(
       `lengthened ${leg.id} ${variant} ${extraMin}`,
@@ -73,6 +74,7 @@ export function* lengthening(
         variant,
         start,
         tracks: false,
+        throughLegId,
       },
     )
   }
@@ -94,16 +96,16 @@ function* spareOf(
   scenario: Scenario,
 ): Steps<number> {
   const id = subject.animal.id
-  const longest = extremesOf(yield* by(SPARE_MIN), id, leg.id)
+  const longest = extremesOf(yield* by(SPARE_MIN, leg.id), id, leg.id)
   const pastFrom = longest && limit.pastFrom(longest)
   const onLegMin = pastFrom === undefined ? SPARE_MIN : Math.max(0, Math.floor(pastFrom - legEndMin))
   const later = scenario.legs.filter((_, index) => index > legIndex && isAboard(subject, index))
   function* laterKept(extraMin: number): Steps<boolean> {
-    const run = yield* by(extraMin)
-    return later.every((one) => {
-      const extremes = extremesOf(run, id, one.id)
-      return extremes === undefined || limit.pastFrom(extremes) === undefined
-    })
+    for (const one of later) {
+      const extremes = extremesOf(yield* by(extraMin, one.id), id, one.id)
+      if (extremes !== undefined && limit.pastFrom(extremes) !== undefined) return false
+    }
+    return true
   }
   if (later.length === 0 || onLegMin === 0) return onLegMin
   if (!(yield* laterKept(0))) return 0

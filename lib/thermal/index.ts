@@ -21,6 +21,7 @@ export type {
   StartFrom,
   StepCounts,
 } from './run'
+export type { Waypoint } from './waypoint'
 export type * from './result'
 export type * from './scenario'
 export { VARIANTS } from './scenario'
