@@ -261,8 +261,8 @@ function cross(watch: Watch, sample: Sample): void {
   if (!limits) return
   const low = limits.alarmLowC
   const high = limits.alarmHighC
-  const inside = (coreC: number) => coreC >= low && coreC <= high
-  if (inside(lastCoreC) && inside(sample.coreC)) return
+  const { coreC } = sample
+  if (lastCoreC >= low && lastCoreC <= high && coreC >= low && coreC <= high) return
   const minutes = sample.minute - lastMin
   for (const [key, field, side, level] of MARKS) {
     const before = side * (lastCoreC - limits[field])
